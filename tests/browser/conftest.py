@@ -1,0 +1,103 @@
+"""Fixtures of the browser tests: the built site at a file and at an http address, and a tab in each browser.
+
+Takes `build/site`. Gives `site`, `file_site`, `http_site`, `playwright` and `tab`.
+A test module may override `site` with a folder of its own; everything else follows.
+"""
+
+import itertools
+import shutil
+from collections.abc import Iterator
+from pathlib import Path
+from typing import NamedTuple
+
+import pytest
+from playwright.sync_api import Playwright, sync_playwright
+
+from tests.browser.support.launch import BROWSERS, start_tab
+from tests.browser.support.quiet import MARKERS, list_noise
+from tests.browser.support.static_server import serve_folder
+from tests.browser.support.tab import Tab
+
+SITE = Path(__file__).parents[2] / "build" / "site"
+# A space and letters outside ASCII: what a reader's own folder is called.
+AWKWARD_FOLDER = "Gasmessung Übung 1"
+SUB_PATH = "/field/gas%20laws/"
+
+
+class HttpSite(NamedTuple):
+    """Addresses of the site served over http, each ending in a slash."""
+
+    url: str
+    """At the root of its server."""
+    sub_path_url: str
+    """Below a path of another server, which answers 404 to everything outside that path."""
+
+
+def pytest_configure(config: pytest.Config) -> None:
+    """Make the opt-out markers known."""
+    for name, meaning in MARKERS.items():
+        config.addinivalue_line("markers", f"{name}(reason): {meaning}")
+
+
+@pytest.fixture(scope="session")
+def site() -> Path:
+    """Folder of the built site."""
+    if not (SITE / "index.html").is_file():
+        pytest.fail(
+            f"browser tests\n  found: no index.html in {SITE}\n  expected: the built site\n"
+            "  what to do: build it first: python3 -m generator build",
+            pytrace=False,
+        )
+    return SITE
+
+
+@pytest.fixture(scope="module")
+def file_site(site: Path, tmp_path_factory: pytest.TempPathFactory) -> Path:
+    """Copy the site to a folder whose name has a space and a letter outside ASCII."""
+    return Path(shutil.copytree(site, tmp_path_factory.mktemp("file") / AWKWARD_FOLDER))
+
+
+@pytest.fixture(scope="module")
+def http_site(site: Path) -> Iterator[HttpSite]:
+    """Serve the site on 127.0.0.1, at the root of one server and below a path of another."""
+    with serve_folder(site) as url, serve_folder(site, prefix=SUB_PATH) as sub_path_url:
+        yield HttpSite(url, sub_path_url)
+
+
+@pytest.fixture(scope="session")
+def playwright() -> Iterator[Playwright]:
+    """Playwright, started once."""
+    with sync_playwright() as started:
+        yield started
+
+
+@pytest.fixture(params=[f"{browser}-{scheme}" for browser, scheme in itertools.product(BROWSERS, ("file", "http"))])
+def tab(request: pytest.FixtureRequest, playwright: Playwright, tmp_path: Path) -> Iterator[Tab]:
+    """Start a tab with a fresh profile, in each browser from file:// and over http (below a path); quiet at the end."""
+    browser, scheme = str(request.param).split("-")
+    base = find_base(request, scheme)
+    started = start_tab(browser, playwright=playwright, profile=tmp_path / "profile", base=base)
+    try:
+        yield started
+        noise = list_noise(started, read_markers(request))
+    finally:
+        started.close()
+    assert not noise, "\n".join(noise)
+
+
+def find_base(request: pytest.FixtureRequest, scheme: str) -> str:
+    """Address of the site's folder, ending in a slash; only the fixture needed is made."""
+    if scheme == "file":
+        folder: Path = request.getfixturevalue("file_site")
+        return f"{folder.as_uri()}/"
+    served: HttpSite = request.getfixturevalue("http_site")
+    return served.sub_path_url
+
+
+def read_markers(request: pytest.FixtureRequest) -> frozenset[str]:
+    """Names of the opt-out markers on the test; each must give its reason."""
+    marks = [mark for name in MARKERS if (mark := request.node.get_closest_marker(name))]
+    for mark in marks:
+        if not str(mark.kwargs.get("reason", "")).strip():
+            pytest.fail(f"{request.node.nodeid}: the marker {mark.name} needs reason='…'", pytrace=False)
+    return frozenset(mark.name for mark in marks)

@@ -1,0 +1,272 @@
+"""The harness itself, on a tiny page under the site's own Content-Security-Policy.
+
+Every browser test rests on these: that typing is real, that storage lasts, that the file origin policy is on, and
+that an error or a foreign request does not go unseen.
+"""
+
+import re
+from collections.abc import Iterator
+from pathlib import Path
+
+import pytest
+
+from tests.browser.support.errors import BrowserError
+from tests.browser.support.origin_control import SIBLING_TEXT, read_sibling, write_origin_control
+from tests.browser.support.origins import select_foreign
+from tests.browser.support.quiet import list_noise
+from tests.browser.support.static_server import serve_folder
+from tests.browser.support.tab import Tab
+
+POLICY = (
+    "default-src 'none'; base-uri 'none'; form-action 'none'; style-src 'self'; img-src 'self' data: blob:; "
+    "script-src 'self' 'wasm-unsafe-eval' blob:; worker-src blob:; connect-src blob:"
+)
+HEAD = """<!doctype html><html lang="en"><head><meta charset="utf-8"><title>Harness</title>
+<link rel="icon" href="data:,">"""
+BODY = """<body>
+<label>Pressure <input id="pressure"></label> <output id="echo"></output> <output id="keys"></output>
+<select id="unit"><option value="bar">bar</option><option value="psi">psi</option></select>
+<output id="chosen"></output>
+<button id="store">Store</button> <p id="stored"></p> <input id="file" type="file"> <p id="name"></p>
+<button id="break">Break</button> <button id="worker">Worker</button> <p class="twice">a</p> <p class="twice">b</p>
+<script src="page.js"></script></body></html>
+"""
+SCRIPT = """"use strict";
+const find = id => document.getElementById(id);
+const keys = [];
+find("pressure").addEventListener("keydown", event => {
+  if (event.isTrusted) keys.push(event.key);
+  find("keys").textContent = keys.join("|");
+});
+find("pressure").addEventListener("input", () => {
+  setTimeout(() => { find("echo").textContent = `read ${find("pressure").value}`; }, 200);
+});
+find("unit").addEventListener("change", () => { find("chosen").textContent = find("unit").value; });
+find("file").addEventListener("change", () => { find("name").textContent = find("file").files[0].name; });
+find("break").addEventListener("click", () => { throw new Error("broken on purpose"); });
+find("worker").addEventListener("click", () => {
+  const source = "throw new Error('broken in the worker on purpose')";
+  new Worker(URL.createObjectURL(new Blob([source], {type: "text/javascript"})));
+});
+
+const opening = indexedDB.open("harness", 1);
+opening.onupgradeneeded = () => opening.result.createObjectStore("readings");
+opening.onsuccess = () => {
+  const store = mode => opening.result.transaction("readings", mode, {durability: "strict"}).objectStore("readings");
+  const show = () => {
+    const reading = store("readonly").get("pressure");
+    reading.onsuccess = () => { find("stored").textContent = `stored: ${reading.result ?? "nothing"}`; };
+  };
+  find("store").addEventListener("click", event => {
+    if (!event.isTrusted) return;
+    const readings = store("readwrite");
+    readings.put(find("pressure").value, "pressure");
+    readings.transaction.oncomplete = show;
+  });
+  show();
+};
+"""
+
+
+@pytest.fixture(scope="module")
+def site(tmp_path_factory: pytest.TempPathFactory) -> Path:
+    """Write a site of a few pages, instead of the built one."""
+    folder = tmp_path_factory.mktemp("harness")
+    head = f'{HEAD}<meta http-equiv="Content-Security-Policy" content="{POLICY}"></head>'
+    pages = {
+        "index.html": head + BODY,
+        "open.html": f"{HEAD}</head>{BODY}",
+        "inline.html": f"{head}<body><script>1</script></body></html>",
+        "missing.html": f'{head}<body><script src="no_such_file.js"></script></body></html>',
+    }
+    for name, text in pages.items():
+        (folder / name).write_text(text, encoding="utf-8")
+    (folder / "page.js").write_text(SCRIPT, encoding="utf-8")
+    write_origin_control(folder)
+    return folder
+
+
+@pytest.fixture
+def neighbour(tmp_path: Path) -> Iterator[str]:
+    """Address of another server, with a picture and a script on it: foreign to every page, though on this machine."""
+    folder = tmp_path / "neighbour"
+    folder.mkdir()
+    (folder / "dot.svg").write_text('<svg xmlns="http://www.w3.org/2000/svg" width="1" height="1"/>', encoding="utf-8")
+    (folder / "worker.js").write_text("self.seen = 1;", encoding="utf-8")
+    with serve_folder(folder) as url:
+        yield url
+
+
+def test_address_is_the_awkward_folder_or_the_sub_path(tab: Tab) -> None:
+    """The reader's folder name and the corner of a server are part of every test."""
+    tab.open("index.html")
+    address = str(tab.evaluate("() => location.href"))
+    assert re.search(r"^file:///.*/Gasmessung%20%C3%9Cbung%201/|^http://127\.0\.0\.1:\d+/field/gas%20laws/", address)
+
+
+def test_typing_sends_trusted_key_events_and_replaces(tab: Tab) -> None:
+    """A field hears one key press per character, letters outside ASCII too, and holds exactly what was typed last."""
+    tab.open("index.html")
+    tab.type("#pressure", "999")
+    tab.type("#pressure", "1,5±2 °CX")
+    tab.press("Backspace")
+    assert tab.value("#pressure") == "1,5±2 °C"
+    assert tab.text("#keys").endswith("Delete|1|,|5|±|2| |°|C|X|Backspace")
+    assert tab.wait_text("#echo", r"C$") == "read 1,5±2 °C"
+
+
+def test_waiting_takes_a_predicate_and_ends_with_what_was_seen(tab: Tab) -> None:
+    """Text that comes later is waited for; text that never comes is an error with the last text in it."""
+    tab.open("index.html")
+    tab.type("#pressure", "7")
+    assert tab.wait_text("#echo", lambda text: text != "") == "read 7"
+    with pytest.raises(BrowserError, match=r"text of #echo\n  found: 'read 7' after 0\.3 s"):
+        tab.wait_text("#echo", "read 8", timeout_s=0.3)
+
+
+def test_selector_must_match_one_element(tab: Tab) -> None:
+    """Two matches or none are an error, never the first one by chance."""
+    tab.open("index.html")
+    assert (tab.count(".twice"), tab.exists(".twice"), tab.exists("#nowhere")) == (2, True, False)
+    with pytest.raises(BrowserError, match=r"found: 2 after"):
+        tab.wait_one(".twice", timeout_s=0.2)
+    with pytest.raises(BrowserError, match=r"found: 0 after"):
+        tab.text("#nowhere", timeout_s=0.2)
+
+
+def test_select_and_file_choice(tab: Tab, tmp_path: Path) -> None:
+    """A list and a file field hear of the choice."""
+    tab.open("index.html")
+    tab.select("#unit", "psi")
+    assert tab.wait_text("#chosen", "psi") == "psi"
+    with pytest.raises(BrowserError, match="no enabled option of value 'kPa'"):
+        tab.select("#unit", "kPa")
+    (tmp_path / "day.json").write_text("{}", encoding="utf-8")
+    tab.choose_files("#file", tmp_path / "day.json")
+    assert tab.wait_text("#name", "json") == "day.json"
+
+
+def test_storage_survives_reload_and_restart(tab: Tab) -> None:
+    """IndexedDB starts empty in a fresh profile, and keeps a reading over a reload and over quitting the browser."""
+    tab.open("index.html")
+    assert tab.wait_text("#stored", "stored") == "stored: nothing"
+    tab.type("#pressure", "200 barg")
+    tab.click("#store")
+    tab.wait_text("#stored", "stored: 200 barg")
+    tab.reload()
+    assert tab.wait_text("#stored", "stored") == "stored: 200 barg"
+    tab.restart()
+    tab.open("index.html")
+    assert tab.wait_text("#stored", "stored") == "stored: 200 barg"
+
+
+def test_file_origin_policy_is_on(request: pytest.FixtureRequest, tab: Tab) -> None:
+    """From file:// a page cannot read the file beside it; over http the same page can, so the page itself works."""
+    if tab.base.startswith("file:"):
+        request.applymarker(pytest.mark.provokes_console_errors(reason="browsers report the blocked request"))
+        assert read_sibling(tab) == "blocked"
+    else:
+        assert read_sibling(tab) == SIBLING_TEXT
+
+
+@pytest.mark.provokes_console_errors(reason="breaks the page in each way there is, to see that it is noticed")
+@pytest.mark.parametrize(
+    ("page", "button", "said"),
+    [
+        ("index.html", "#break", "broken on purpose"),
+        ("index.html", "#worker", "broken in the worker on purpose"),
+        ("inline.html", None, "(?i)policy|script-src"),
+        ("missing.html", None, r"no_such_file\.js"),
+    ],
+    ids=["uncaught", "worker", "policy", "not-loaded"],
+)
+def test_console_error_is_noticed(tab: Tab, page: str, button: str | None, said: str) -> None:
+    """Uncaught errors in page and worker, a refusal by policy and a missing script are all reported."""
+    tab.open(page)
+    if button is not None:
+        tab.click(button)
+    tab.wait_error(said)
+
+
+@pytest.mark.provokes_foreign_requests(reason="asks another server, to see that it is noticed")
+def test_foreign_request_of_page_is_noticed(tab: Tab, neighbour: str) -> None:
+    """A picture from another server, which loads without any error, is reported."""
+    tab.open("open.html")
+    load = "url => new Promise(done => { const i = new Image(); i.onload = () => done(true); i.src = url; })"
+    assert tab.evaluate(load, f"{neighbour}dot.svg") is True
+    assert tab.foreign_requests() == [f"{neighbour}dot.svg"]
+
+
+@pytest.mark.provokes_foreign_requests(reason="asks another server from a worker, to see that it is noticed")
+def test_foreign_request_of_worker_is_noticed(tab: Tab, neighbour: str) -> None:
+    """A script imported from another server by a Blob worker, which is where the engine runs, is reported."""
+    tab.open("open.html")
+    load = """url => new Promise(done => {
+      const source = `importScripts("${url}"); postMessage(self.seen);`;
+      const worker = new Worker(URL.createObjectURL(new Blob([source], {type: "text/javascript"})));
+      worker.onmessage = event => done(event.data);
+    })"""
+    assert tab.evaluate(load, f"{neighbour}worker.js") == 1
+    assert tab.foreign_requests() == [f"{neighbour}worker.js"]
+
+
+def test_screenshot_has_the_size_asked_for(tab: Tab, tmp_path: Path) -> None:
+    """A PNG of the viewport; width and height stand at bytes 16 to 24 (PNG, W3C Recommendation, section 11.2.2)."""
+    tab.open("index.html")
+    tab.resize(390, 844)
+    tab.screenshot(tmp_path / "shot.png")
+    data = (tmp_path / "shot.png").read_bytes()
+    assert data.startswith(b"\x89PNG\r\n\x1a\n")
+    assert (int.from_bytes(data[16:20]), int.from_bytes(data[20:24])) == (390, 844)
+
+
+def test_foreign_is_every_other_origin() -> None:
+    """Scheme, host and port all count; what is local is not foreign."""
+    requested = [
+        "file:///a/b.js",
+        "blob:null/1",
+        "data:,",
+        "http://127.0.0.1:8000/a",
+        "http://127.0.0.1:8001/a",
+        "https://127.0.0.1:8000/a",
+        "ws://127.0.0.1:8000/a",
+        "http://127.0.0.1:8001/a",
+    ]
+    assert select_foreign(requested, ["http://127.0.0.1:8000"]) == [
+        "http://127.0.0.1:8001/a",
+        "https://127.0.0.1:8000/a",
+        "ws://127.0.0.1:8000/a",
+    ]
+
+
+class Heard:
+    """What a tab would report."""
+
+    def __init__(self, errors: list[str], foreign: list[str]) -> None:
+        """Keep both lists."""
+        self._errors = errors
+        self._foreign = foreign
+
+    def console_errors(self) -> list[str]:
+        """Report the errors given."""
+        return self._errors
+
+    def foreign_requests(self) -> list[str]:
+        """Report the addresses given."""
+        return self._foreign
+
+
+def test_closing_check_wants_silence_or_a_marker_that_is_true() -> None:
+    """Noise without a marker fails, and so does a marker without its noise."""
+    both = frozenset({"provokes_console_errors", "provokes_foreign_requests"})
+    loud = Heard(["boom"], ["http://other/"])
+    assert list_noise(Heard([], []), frozenset()) == []
+    assert list_noise(loud, both) == []
+    assert list_noise(loud, frozenset()) == [
+        "console errors, none expected: ['boom']",
+        "foreign requests, none expected: ['http://other/']",
+    ]
+    assert list_noise(Heard([], []), both) == [
+        "marked provokes_console_errors, but there was none: remove the marker",
+        "marked provokes_foreign_requests, but there was none: remove the marker",
+    ]
