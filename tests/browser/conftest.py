@@ -8,12 +8,13 @@ import itertools
 import shutil
 from collections.abc import Iterator
 from pathlib import Path
+from tempfile import TemporaryDirectory
 from typing import NamedTuple
 
 import pytest
 from playwright.sync_api import Playwright, sync_playwright
 
-from tests.browser.support.launch import BROWSERS, start_tab
+from tests.browser.support.launch import BROWSERS, make_firefox_profile, start_tab
 from tests.browser.support.quiet import MARKERS, list_noise
 from tests.browser.support.static_server import serve_folder
 from tests.browser.support.tab import Tab
@@ -52,9 +53,10 @@ def site() -> Path:
 
 
 @pytest.fixture(scope="module")
-def file_site(site: Path, tmp_path_factory: pytest.TempPathFactory) -> Path:
+def file_site(site: Path) -> Iterator[Path]:
     """Copy the site to a folder whose name has a space and a letter outside ASCII."""
-    return Path(shutil.copytree(site, tmp_path_factory.mktemp("file") / AWKWARD_FOLDER))
+    with TemporaryDirectory() as folder:
+        yield Path(shutil.copytree(site, Path(folder) / AWKWARD_FOLDER))
 
 
 @pytest.fixture(scope="module")
@@ -71,12 +73,28 @@ def playwright() -> Iterator[Playwright]:
         yield started
 
 
+@pytest.fixture(scope="session")
+def firefox_profile() -> Iterator[Path]:
+    """Make the profile that each tab in Firefox gets a copy of: no page has been opened in it."""
+    with TemporaryDirectory() as folder:
+        yield make_firefox_profile(Path(folder))
+
+
+@pytest.fixture
+def profile() -> Iterator[Path]:
+    """Make a folder for a profile, and remove it at once: each is some 50 MB, too much for pytest's kept folders."""
+    # The browser's helpers may still be writing when its main process has ended.
+    with TemporaryDirectory(ignore_cleanup_errors=True) as folder:
+        yield Path(folder) / "profile"
+
+
 @pytest.fixture(params=[f"{browser}-{scheme}" for browser, scheme in itertools.product(BROWSERS, ("file", "http"))])
-def tab(request: pytest.FixtureRequest, playwright: Playwright, tmp_path: Path) -> Iterator[Tab]:
+def tab(request: pytest.FixtureRequest, playwright: Playwright, profile: Path) -> Iterator[Tab]:
     """Start a tab with a fresh profile, in each browser from file:// and over http (below a path); quiet at the end."""
     browser, scheme = str(request.param).split("-")
-    base = find_base(request, scheme)
-    started = start_tab(browser, playwright=playwright, profile=tmp_path / "profile", base=base)
+    if browser == "firefox":
+        shutil.copytree(request.getfixturevalue("firefox_profile"), profile)
+    started = start_tab(browser, playwright=playwright, profile=profile, base=find_base(request, scheme))
     try:
         yield started
         noise = list_noise(started, read_markers(request))

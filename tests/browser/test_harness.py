@@ -45,7 +45,8 @@ find("unit").addEventListener("change", () => { find("chosen").textContent = fin
 find("file").addEventListener("change", () => { find("name").textContent = find("file").files[0].name; });
 find("break").addEventListener("click", () => { throw new Error("broken on purpose"); });
 find("worker").addEventListener("click", () => {
-  const source = "throw new Error('broken in the worker on purpose')";
+  const source = `console.error("console in a worker"); Promise.reject(new Error("rejected in a worker"));
+    throw new Error("uncaught in a worker");`;
   new Worker(URL.createObjectURL(new Blob([source], {type: "text/javascript"})));
 });
 
@@ -66,6 +67,33 @@ opening.onsuccess = () => {
   show();
 };
 """
+
+NEIGHBOUR_FILES = (
+    "picture.png",
+    "fetched.txt",
+    "style.css",
+    "frame.html",
+    "classic.js",
+    "imported.js",
+    "worker-fetched.txt",
+    "nested-fetched.txt",
+)
+ASK_NEIGHBOUR = """base => {
+  const add = (tag, properties) => document.body.append(Object.assign(document.createElement(tag), properties));
+  const run = source => new Worker(URL.createObjectURL(new Blob([source], {type: "text/javascript"})));
+  const fetching = name => `fetch("${base}${name}", {mode: "no-cors"});`;
+  add("img", {src: `${base}picture.png`});
+  add("link", {rel: "stylesheet", href: `${base}style.css`});
+  add("iframe", {src: `${base}frame.html`});
+  add("script", {src: `${base}classic.js`});
+  fetch(`${base}fetched.txt`, {mode: "no-cors"});
+  run(`importScripts("${base}imported.js");`);
+  run(fetching("worker-fetched.txt"));
+  run(`new Worker(URL.createObjectURL(new Blob(['${fetching("nested-fetched.txt")}'], {type: "text/javascript"})));`);
+  const socket = base.replace("http", "ws");
+  new WebSocket(`${socket}socket`);
+  run(`new WebSocket("${socket}worker-socket");`);
+}"""
 
 
 @pytest.fixture(scope="module")
@@ -88,11 +116,11 @@ def site(tmp_path_factory: pytest.TempPathFactory) -> Path:
 
 @pytest.fixture
 def neighbour(tmp_path: Path) -> Iterator[str]:
-    """Address of another server, with a picture and a script on it: foreign to every page, though on this machine."""
+    """Serve some files at another address: foreign to every page, though on this machine."""
     folder = tmp_path / "neighbour"
     folder.mkdir()
-    (folder / "dot.svg").write_text('<svg xmlns="http://www.w3.org/2000/svg" width="1" height="1"/>', encoding="utf-8")
-    (folder / "worker.js").write_text("self.seen = 1;", encoding="utf-8")
+    for name in NEIGHBOUR_FILES:
+        (folder / name).write_text("", encoding="utf-8")
     with serve_folder(folder) as url:
         yield url
 
@@ -170,44 +198,32 @@ def test_file_origin_policy_is_on(request: pytest.FixtureRequest, tab: Tab) -> N
 
 
 @pytest.mark.provokes_console_errors(reason="breaks the page in each way there is, to see that it is noticed")
-@pytest.mark.parametrize(
-    ("page", "button", "said"),
-    [
-        ("index.html", "#break", "broken on purpose"),
-        ("index.html", "#worker", "broken in the worker on purpose"),
-        ("inline.html", None, "(?i)policy|script-src"),
-        ("missing.html", None, r"no_such_file\.js"),
-    ],
-    ids=["uncaught", "worker", "policy", "not-loaded"],
-)
-def test_console_error_is_noticed(tab: Tab, page: str, button: str | None, said: str) -> None:
-    """Uncaught errors in page and worker, a refusal by policy and a missing script are all reported."""
-    tab.open(page)
-    if button is not None:
-        tab.click(button)
-    tab.wait_error(said)
+def test_console_errors_are_noticed(tab: Tab) -> None:
+    """What goes wrong in the page or in a worker, is refused by the policy or is not there, is reported."""
+    tab.open("index.html")
+    tab.click("#break")
+    tab.wait_error("broken on purpose")
+    tab.click("#worker")
+    for said in ("console in a worker", "uncaught in a worker", "rejected in a worker"):
+        tab.wait_error(said)
+    tab.evaluate("() => { console.error('console in the page'); Promise.reject(new Error('rejected in the page')); }")
+    tab.wait_error("console in the page")
+    tab.wait_error("rejected in the page")
+    tab.open("inline.html")
+    tab.wait_error(r"(?i)script-src|inline script")
+    tab.open("missing.html")
+    tab.wait_error(r"no_such_file\.js")
 
 
-@pytest.mark.provokes_foreign_requests(reason="asks another server, to see that it is noticed")
-def test_foreign_request_of_page_is_noticed(tab: Tab, neighbour: str) -> None:
-    """A picture from another server, which loads without any error, is reported."""
+@pytest.mark.provokes_foreign_requests(reason="asks another server in each way there is, to see that it is noticed")
+@pytest.mark.provokes_console_errors(reason="the other server knows no web sockets")
+def test_foreign_requests_are_noticed(tab: Tab, neighbour: str) -> None:
+    """Requests from the page, a frame, a Blob worker (where the engine runs) and a worker's worker are reported."""
     tab.open("open.html")
-    load = "url => new Promise(done => { const i = new Image(); i.onload = () => done(true); i.src = url; })"
-    assert tab.evaluate(load, f"{neighbour}dot.svg") is True
-    assert tab.foreign_requests() == [f"{neighbour}dot.svg"]
-
-
-@pytest.mark.provokes_foreign_requests(reason="asks another server from a worker, to see that it is noticed")
-def test_foreign_request_of_worker_is_noticed(tab: Tab, neighbour: str) -> None:
-    """A script imported from another server by a Blob worker, which is where the engine runs, is reported."""
-    tab.open("open.html")
-    load = """url => new Promise(done => {
-      const source = `importScripts("${url}"); postMessage(self.seen);`;
-      const worker = new Worker(URL.createObjectURL(new Blob([source], {type: "text/javascript"})));
-      worker.onmessage = event => done(event.data);
-    })"""
-    assert tab.evaluate(load, f"{neighbour}worker.js") == 1
-    assert tab.foreign_requests() == [f"{neighbour}worker.js"]
+    tab.evaluate(ASK_NEIGHBOUR, neighbour)
+    asked = {f"{neighbour}{name}" for name in (*NEIGHBOUR_FILES, "socket", "worker-socket")}
+    tab.wait_until(tab.foreign_requests, lambda found: set(found) >= asked, step="foreign requests")
+    assert set(tab.foreign_requests()) == asked
 
 
 def test_screenshot_has_the_size_asked_for(tab: Tab, tmp_path: Path) -> None:
@@ -229,13 +245,11 @@ def test_foreign_is_every_other_origin() -> None:
         "http://127.0.0.1:8000/a",
         "http://127.0.0.1:8001/a",
         "https://127.0.0.1:8000/a",
-        "ws://127.0.0.1:8000/a",
         "http://127.0.0.1:8001/a",
     ]
     assert select_foreign(requested, ["http://127.0.0.1:8000"]) == [
         "http://127.0.0.1:8001/a",
         "https://127.0.0.1:8000/a",
-        "ws://127.0.0.1:8000/a",
     ]
 
 

@@ -11,6 +11,7 @@ from collections.abc import Callable
 from contextlib import ExitStack
 from typing import Any
 
+from websockets.exceptions import ConnectionClosed
 from websockets.sync.client import connect
 
 from tests.browser.support.errors import BrowserError
@@ -58,18 +59,25 @@ class BidiConnection:
         try:
             return self._take(self._socket.recv(max(0.0, deadline - time.monotonic())))
         except TimeoutError:
-            raise BrowserError(
-                where=f"firefox, command {method}",
-                found=f"no answer after {COMMAND_TIMEOUT_S} s",
-                expected="an answer",
-                todo="look for a page script that never ends, or a machine too busy to answer",
-            ) from None
+            raise no_answer(method, f"no answer after {COMMAND_TIMEOUT_S} s") from None
+        except ConnectionClosed as closed:
+            raise no_answer(method, f"the browser ended the connection: {closed}") from None
 
     def _take(self, text: str | bytes) -> Json:
         message: Json = json.loads(text)
         if message["type"] == "event":
             self._listener(message["method"], message["params"])
         return message
+
+
+def no_answer(method: str, found: str) -> BrowserError:
+    """Describe a command that brought neither a result nor an error."""
+    return BrowserError(
+        where=f"firefox, command {method}",
+        found=found,
+        expected="an answer",
+        todo="look for a page script that never ends, a browser that crashed, or a machine too busy to answer",
+    )
 
 
 def read_result(method: str, message: Json) -> Json:

@@ -43,10 +43,10 @@ class ChromiumTab(Tab):
         self._context.on("weberror", lambda error: self._errors.append(f"uncaught: {error.error}"))
         self._page: Page = self._context.pages[0]
         self._protocol = self._context.new_cdp_session(self._page)
-        self._page.on("websocket", lambda socket: self._requested.append(socket.url))
+        self._page.on("websocket", lambda socket: self._requested.append(as_http(socket.url)))
 
     def _keep_console(self, message: ConsoleMessage) -> None:
-        if message.type == "error":
+        if message.type in {"error", "assert"}:
             self._errors.append(f"{message.text} ({message.location.get('url', '')})")
 
     def _navigate(self, address: str) -> None:
@@ -106,3 +106,8 @@ class ChromiumTab(Tab):
         if self._context is not None:
             self._context.close()
             self._context = None
+
+
+def as_http(address: str) -> str:
+    """Name a web socket by the address of its opening request, as Firefox reports it: ws: as http:, wss: as https:."""
+    return address.replace("ws", "http", 1)

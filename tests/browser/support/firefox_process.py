@@ -13,7 +13,7 @@ from typing import IO
 from tests.browser.support.errors import BrowserError
 
 START_TIMEOUT_S = 60.0
-STOP_TIMEOUT_S = 20.0
+READER_TIMEOUT_S = 10.0
 ADDRESS = re.compile(r"WebDriver BiDi listening on (ws://\S+)")
 
 # Every other preference keeps the reader's default: `remote.prefs.recommended` would relax the file origin policy.
@@ -85,14 +85,14 @@ class FirefoxProcess:
         self._reader.start()
         self.address = self._wait_for_address()
 
-    def stop(self) -> None:
-        """End the process: give it time to quit by itself, if it has been asked to; then insist."""
+    def stop(self, *, patience_s: float) -> None:
+        """Wait that long for the process to quit by itself, as it may have been asked to; then end it."""
         try:
-            self._process.wait(STOP_TIMEOUT_S)
+            self._process.wait(patience_s)
         except subprocess.TimeoutExpired:
             self._process.kill()
             self._process.wait()
-        self._reader.join(STOP_TIMEOUT_S)
+        self._reader.join(READER_TIMEOUT_S)
         self._error_stream().close()
 
     def _error_stream(self) -> IO[str]:
@@ -112,8 +112,7 @@ class FirefoxProcess:
             try:
                 seen.append(self._lines.get(timeout=START_TIMEOUT_S))
             except Empty:
-                self._process.kill()
-                self.stop()
+                self.stop(patience_s=0.0)
                 raise BrowserError(
                     where="firefox, start",
                     found=f"no BiDi address on stderr, only: {''.join(seen)!r}",

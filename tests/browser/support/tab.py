@@ -176,54 +176,16 @@ class Tab(ABC):
                 todo="give the option's value attribute, not its label",
             )
 
-    def wait_one(self, selector: str, *, timeout_s: float = DEFAULT_TIMEOUT_S) -> None:
-        """Wait until exactly one element matches."""
-        self._wait(
-            lambda: self.count(selector),
-            lambda found: found == 1,
-            timeout_s,
-            step=f"element {selector}",
-            expected="exactly one element",
-        )
-
-    def wait_text(self, selector: str, test: TextTest, timeout_s: float = DEFAULT_TIMEOUT_S) -> str:
-        """Text of the element once it passes: a regular expression found in it, or a predicate of it."""
-        found = self._wait(
-            lambda: str(self.evaluate(TEXT, selector)) if self.count(selector) == 1 else None,
-            lambda found: found is not None and passes(test, found),
-            timeout_s,
-            step=f"text of {selector}",
-            expected=f"text that passes {test!r}, in exactly one element",
-        )
-        return str(found)
-
-    def wait_error(self, pattern: str, timeout_s: float = DEFAULT_TIMEOUT_S) -> str:
-        """First error of the page in which the regular expression is found, once there is one."""
-        self._wait(
-            lambda: self._errors,
-            lambda errors: any(re.search(pattern, error) for error in errors),
-            timeout_s,
-            step="errors of the page",
-            expected=f"an error that passes {pattern!r}",
-        )
-        return next(error for error in self._errors if re.search(pattern, error))
-
-    def console_errors(self) -> list[str]:
-        """Errors the page has reported so far: console, uncaught, refused by policy, not loaded."""
-        self._pause(SETTLE_S)
-        return list(self._errors)
-
-    def foreign_requests(self) -> list[str]:
-        """Addresses asked for so far that are not file:, blob:, data: or of the page's own origin."""
-        self._pause(SETTLE_S)
-        return select_foreign(self._requested, self._own_origins)
-
-    def _where(self, step: str) -> str:
-        return f"{self.browser}, {step}"
-
-    def _wait[T](
-        self, look: Callable[[], T], done: Callable[[T], bool], timeout_s: float, *, step: str, expected: str
+    def wait_until[T](
+        self,
+        look: Callable[[], T],
+        done: Callable[[T], bool],
+        *,
+        step: str,
+        expected: str = "the condition to come true",
+        timeout_s: float = DEFAULT_TIMEOUT_S,
     ) -> T:
+        """Look again and again until what is seen is `done`; it comes back. `step` and `expected` are for the error."""
         deadline = time.monotonic() + timeout_s
         while not done(found := look()):
             if time.monotonic() > deadline:
@@ -235,6 +197,51 @@ class Tab(ABC):
                 )
             self._pause(POLL_S)
         return found
+
+    def wait_one(self, selector: str, *, timeout_s: float = DEFAULT_TIMEOUT_S) -> None:
+        """Wait until exactly one element matches."""
+        self.wait_until(
+            lambda: self.count(selector),
+            lambda found: found == 1,
+            step=f"element {selector}",
+            expected="exactly one element",
+            timeout_s=timeout_s,
+        )
+
+    def wait_text(self, selector: str, test: TextTest, timeout_s: float = DEFAULT_TIMEOUT_S) -> str:
+        """Text of the element once it passes: a regular expression found in it, or a predicate of it."""
+        found = self.wait_until(
+            lambda: str(self.evaluate(TEXT, selector)) if self.count(selector) == 1 else None,
+            lambda found: found is not None and passes(test, found),
+            step=f"text of {selector}",
+            expected=f"text that passes {test!r}, in exactly one element",
+            timeout_s=timeout_s,
+        )
+        return str(found)
+
+    def wait_error(self, pattern: str, timeout_s: float = DEFAULT_TIMEOUT_S) -> str:
+        """First error of the page in which the regular expression is found, once there is one."""
+        self.wait_until(
+            lambda: self._errors,
+            lambda errors: any(re.search(pattern, error) for error in errors),
+            step="errors of the page",
+            expected=f"an error that passes {pattern!r}",
+            timeout_s=timeout_s,
+        )
+        return next(error for error in self._errors if re.search(pattern, error))
+
+    def console_errors(self) -> list[str]:
+        """Errors the page has reported so far: console, uncaught, refused by policy, not loaded."""
+        self._pause(SETTLE_S)
+        return list(self._errors)
+
+    def foreign_requests(self) -> list[str]:
+        """Addresses asked for so far that are not file:, blob:, data: or of the page's own origin, each once."""
+        self._pause(SETTLE_S)
+        return select_foreign(self._requested, self._own_origins)
+
+    def _where(self, step: str) -> str:
+        return f"{self.browser}, {step}"
 
 
 def passes(test: TextTest, text: str) -> bool:
