@@ -28,7 +28,8 @@ BODY = """<body>
 <select id="unit"><option value="bar">bar</option><option value="psi">psi</option></select>
 <output id="chosen"></output>
 <button id="store">Store</button> <p id="stored"></p> <input id="file" type="file"> <p id="name"></p>
-<button id="break">Break</button> <button id="worker">Worker</button> <p class="twice">a</p> <p class="twice">b</p>
+<button id="break">Break</button> <button id="worker">Worker</button> <button id="save">Save</button>
+ <p class="twice">a</p> <p class="twice">b</p>
 <script src="page.js"></script></body></html>
 """
 SCRIPT = """"use strict";
@@ -43,6 +44,12 @@ find("pressure").addEventListener("input", () => {
 });
 find("unit").addEventListener("change", () => { find("chosen").textContent = find("unit").value; });
 find("file").addEventListener("change", () => { find("name").textContent = find("file").files[0].name; });
+find("save").addEventListener("click", () => {
+  const link = document.createElement("a");
+  link.download = "day 1.json";
+  link.href = URL.createObjectURL(new Blob([JSON.stringify({pressure: find("pressure").value})]));
+  link.click();
+});
 find("break").addEventListener("click", () => { throw new Error("broken on purpose"); });
 find("worker").addEventListener("click", () => {
   const source = `console.error("console in a worker"); Promise.reject(new Error("rejected in a worker"));
@@ -172,6 +179,14 @@ def test_select_and_file_choice(tab: Tab, tmp_path: Path) -> None:
     (tmp_path / "day.json").write_text("{}", encoding="utf-8")
     tab.choose_files("#file", tmp_path / "day.json")
     assert tab.wait_text("#name", "json") == "day.json"
+
+
+def test_download_is_saved(tab: Tab, tmp_path: Path) -> None:
+    """A file made by the page arrives under its name and with its content."""
+    tab.open("index.html")
+    tab.type("#pressure", "200 barg")
+    saved = tab.download("#save", tmp_path)
+    assert (saved.name, saved.read_text(encoding="utf-8")) == ("day 1.json", '{"pressure":"200 barg"}')
 
 
 def test_storage_survives_reload_and_restart(tab: Tab) -> None:

@@ -84,6 +84,14 @@ class ChromiumTab(Tab):
         """Choose files in an `<input type=file>`."""
         self._page.locator(f"css={selector}").set_input_files(list(paths))
 
+    def download(self, selector: str, folder: Path) -> Path:
+        """Click what offers a file and save it to the folder under the name offered; the file's path."""
+        with self._page.expect_download() as started:
+            self.click(selector)
+        path = folder / started.value.suggested_filename
+        started.value.save_as(path)
+        return path
+
     def resize(self, width: int, height: int) -> None:
         """Set the page's viewport, in CSS pixels."""
         self._page.set_viewport_size({"width": width, "height": height})

@@ -13,7 +13,7 @@ from tests.browser.support.errors import BrowserError
 from tests.browser.support.firefox_process import FirefoxProcess
 from tests.browser.support.tab import Tab
 
-EVENTS = ("log.entryAdded", "network.beforeRequestSent")
+EVENTS = ("log.entryAdded", "network.beforeRequestSent", "browsingContext.downloadEnd")
 
 # A quit takes up to 5 s now and then. What is to be read again waits for it; what is thrown away does not.
 RESTART_PATIENCE_S = 30.0
@@ -75,6 +75,7 @@ class FirefoxTab(Tab):
         super().__init__(base=base)
         self._executable = executable
         self._profile = profile
+        self._downloads: list[Json] = []
         self._start()
 
     def _start(self) -> None:
@@ -98,6 +99,8 @@ class FirefoxTab(Tab):
             self._requested.append(parameters["request"]["url"])
         elif method == "log.entryAdded" and parameters["level"] == "error":
             self._errors.append(f"{parameters['text']} ({parameters['source'].get('realm', '')})")
+        elif method == "browsingContext.downloadEnd":
+            self._downloads.append(parameters)
 
     def _command(self, method: str, **parameters: object) -> Json:
         return self._bidi.command(method, context=self._context, **parameters)
@@ -166,6 +169,15 @@ class FirefoxTab(Tab):
     def choose_files(self, selector: str, *paths: Path) -> None:
         """Choose files in an `<input type=file>`."""
         self._command("input.setFiles", element=self._node(selector), files=[str(path) for path in paths])
+
+    def download(self, selector: str, folder: Path) -> Path:
+        """Click what offers a file and save it to the folder under the name offered; the file's path."""
+        behavior = {"type": "allowed", "destinationFolder": str(folder)}
+        self._bidi.command("browser.setDownloadBehavior", downloadBehavior=behavior)
+        before = len(self._downloads)
+        self.click(selector)
+        ended = self.wait_until(lambda: self._downloads[before:], bool, step=f"download by {selector}")
+        return Path(ended[0]["filepath"])
 
     def resize(self, width: int, height: int) -> None:
         """Set the page's viewport, in CSS pixels."""

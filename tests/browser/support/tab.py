@@ -89,6 +89,10 @@ class Tab(ABC):
         """Choose files in an `<input type=file>`."""
 
     @abstractmethod
+    def download(self, selector: str, folder: Path) -> Path:
+        """Click what offers a file and save it to the folder under the name offered; the file's path."""
+
+    @abstractmethod
     def resize(self, width: int, height: int) -> None:
         """Set the page's viewport, in CSS pixels."""
 
