@@ -1,0 +1,125 @@
+"""Every page of the site: views drawn by templates, framed by the theme, written by mkdocs.
+
+Takes the ``SiteView`` and the folder ``site_src``; gives a folder of HTML, CSS and the search entries.
+``pack`` adds the browser code and the engine beside them, ``write`` puts the whole in place.
+"""
+
+import json
+import logging
+from collections.abc import Iterator
+from pathlib import Path
+from typing import NamedTuple
+
+from jinja2 import Environment, FileSystemLoader, StrictUndefined
+from mkdocs.commands.build import build
+from mkdocs.config import load_config
+from mkdocs.config.defaults import MkDocsConfig
+from mkdocs.plugins import BasePlugin
+from mkdocs.structure.files import File, Files
+from mkdocs.structure.pages import Page
+
+from generator.search_entries import write_entries
+from generator.views import SheetView, SiteView
+
+TEMPLATES = Path(__file__).parent / "templates"
+POLICY = (
+    "default-src 'none'; base-uri 'none'; form-action 'none'; style-src 'self'; img-src 'self' data: blob:; "
+    "script-src 'self' 'wasm-unsafe-eval' blob:; worker-src blob:; connect-src blob:"
+)
+SECTIONS = (
+    ("home", "Jobs", "index.html"),
+    ("sheets", "Sheets", "sheets.html"),
+    ("laws", "Laws", "laws.html"),
+    ("gases", "Gases", "gases.html"),
+    ("tables", "Tables", "tables.html"),
+    ("about", "This copy", "about.html"),
+)
+
+
+class Body(NamedTuple):
+    """A generated page before the theme frames it: address below the site, which part of the site, its HTML."""
+
+    source: str
+    section: str
+    title: str
+    html: str
+
+
+def emit_pages(view: SiteView, site_src: Path, out: Path) -> None:
+    """Write all pages and their styles to ``out``, which is emptied first.
+
+    Raises:
+        mkdocs.exceptions.Abort: a page links to nothing, or a template names a value that is not there.
+    """
+    config = load_config(str(site_src / "mkdocs.yml"), site_dir=str(out), extra=frame_values(view))
+    config.plugins["pages"] = PagesPlugin(tuple(draw_bodies(view)), write_entries(view))
+    logging.getLogger("mkdocs").setLevel(logging.WARNING)
+    build(config)
+
+
+def frame_values(view: SiteView) -> dict[str, object]:
+    """What the theme draws round every page."""
+    return {"policy": POLICY, "sections": SECTIONS, "version": view.version, "digest": view.digest}
+
+
+def draw_bodies(view: SiteView) -> Iterator[Body]:
+    """Every generated page, in the order of the site."""
+    env = make_environment()
+    env.globals["site"] = view
+    env.globals["groups"] = group_sheets(view)
+    env.globals["laws"] = frozenset(law.key for family in view.families for law in family.relations)
+    yield Body("index.md", "home", "Gaswright", env.get_template("home.html").render(root=""))
+    yield Body("sheets.md", "sheets", "Sheets", env.get_template("sheets.html").render(root=""))
+    yield Body("laws.md", "laws", "Laws", env.get_template("laws.html").render(root=""))
+    yield Body("gases.md", "gases", "Gases", env.get_template("gases.html").render(root=""))
+    yield Body("tables.md", "tables", "Tables", env.get_template("tables.html").render(root=""))
+    for family in view.families:
+        for law in family.relations:
+            html = env.get_template("law.html").render(root="../", law=law)
+            yield Body(f"laws/{law.key}.md", "laws", law.title, html)
+    for gas in view.gases:
+        yield Body(f"gases/{gas.key}.md", "gases", gas.title, env.get_template("gas.html").render(root="../", gas=gas))
+
+
+def group_sheets(view: SiteView) -> dict[str, list[SheetView]]:
+    """Sheets by the group of jobs they belong to, in the order in which the groups first come up."""
+    groups: dict[str, list[SheetView]] = {}
+    for sheet in view.sheets:
+        groups.setdefault(sheet.group, []).append(sheet)
+    return groups
+
+
+def make_environment() -> Environment:
+    """Templates of the page bodies: every text escaped, a name that is not there is an error."""
+    return Environment(
+        loader=FileSystemLoader(TEMPLATES), autoescape=True, undefined=StrictUndefined, trim_blocks=True,
+        lstrip_blocks=True,
+    )
+
+
+class PagesPlugin(BasePlugin[MkDocsConfig]):
+    """Hands the generated pages to mkdocs, and keeps out of the site what carries a date."""
+
+    def __init__(self, bodies: tuple[Body, ...], entries: str) -> None:
+        """Take the pages, and the text of the script of search entries."""
+        self.bodies = {body.source: body for body in bodies}
+        self.entries = entries
+
+    def on_config(self, config: MkDocsConfig) -> MkDocsConfig:
+        """Drop mkdocs's own pages: the site map carries today's date."""
+        config.theme.static_templates.clear()
+        return config
+
+    def on_files(self, files: Files, /, *, config: MkDocsConfig) -> Files:
+        """Add the generated pages and the search entries."""
+        for body in self.bodies.values():
+            head = f"---\ntitle: {json.dumps(body.title)}\nsection: {body.section}\n---\n"
+            files.append(File.generated(config, body.source, content=head))
+        files.append(File.generated(config, "search/entries.js", content=self.entries))
+        return Files([file for file in files if not file.src_uri.startswith("sitemap.xml")])
+
+    def on_page_content(self, html: str, /, *, page: Page, config: MkDocsConfig, files: Files) -> str:
+        """Put the drawn body where the page has one; hand-written pages keep their own."""
+        del config, files
+        body = self.bodies.get(page.file.src_uri)
+        return f'<article class="prose">{html}</article>' if body is None else body.html
