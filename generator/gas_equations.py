@@ -1,0 +1,328 @@
+"""Text of the emitted gas modules.
+
+Takes the frozen gases of the spec and the coefficients of the pinned property library; gives {path: text}.
+The stage that writes the engine package comes next; nothing is written here.
+
+Every term of the residual part is a temperature shape times a density shape. Terms with the same density shape
+are summed once per temperature, so that the emitted `slopes` runs over a handful of short polynomials.
+"""
+
+from __future__ import annotations
+
+import json
+from collections.abc import Mapping, Sequence
+from dataclasses import dataclass
+from typing import TYPE_CHECKING, Protocol
+
+import CoolProp.CoolProp as coolprop
+
+from generator.errors import SpecError
+from generator.gas_slopes import Shape, slopes_text
+
+if TYPE_CHECKING:
+    from spec.gas_model import Gas
+
+COOLPROP_VERSION = "8.0.0"
+HEADER = "Generated at build time; do not edit. Coefficients: CoolProp 8.0.0 (MIT licence), fluid {fluid}."
+TOP = "gaswright/gas"
+
+type Json = Mapping[str, "Json"] | Sequence["Json"] | str | float
+type Row = tuple[float, ...]
+
+
+class Block(Protocol):
+    """One block of terms as the library stores it: equal-length columns by name."""
+
+    def __getitem__(self, name: str, /) -> Sequence[float]:
+        """Return one column."""
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class Term:
+    """One separable term: n·tau^t times a temperature shape, delta^d times a density shape."""
+
+    n: float
+    t: float
+    d: int
+    shape: Shape
+    bell: tuple[float, float] | None = None
+    peak: tuple[float, float, float] | None = None
+
+
+def emit_gas_modules(gases: Sequence[Gas]) -> dict[str, str]:
+    """Return {path inside the engine folder: text} of the equation modules and of the identity module.
+
+    Raises:
+        SpecError: the installed library is not the pinned one, or an equation has a term nobody can evaluate.
+    """
+    _demand_version()
+    texts = {f"{TOP}/equations/__init__.py": '"""Generated: coefficients of the reference equations, one gas each."""\n'}
+    for gas in sorted(gases, key=lambda one: one.key):
+        texts[f"{TOP}/equations/{gas.key}.py"] = equation_text(gas)
+    texts[f"{TOP}/identity.py"] = identity_text(gases)
+    return texts
+
+
+def _demand_version() -> None:
+    found = coolprop.get_global_param_string("version")
+    if found != COOLPROP_VERSION:
+        raise SpecError(
+            where="generator/gas_equations.py",
+            found=f"CoolProp {found}",
+            expected=f"CoolProp {COOLPROP_VERSION}, the version the coefficients are pinned to",
+            todo="Install the locked environment again, or pin the new version and check every gas.",
+        )
+
+
+def read_terms(key: str, blocks: Sequence[Mapping[str, object]]) -> tuple[list[Term], list[Row]]:
+    """Return the separable terms and the non-analytic rows (n, a, b, beta, A, B, C, D).
+
+    Raises:
+        SpecError: a block has a type or an exponent nobody can evaluate.
+    """
+    terms: list[Term] = []
+    rows: list[Row] = []
+    for block in blocks:
+        kind = str(block["type"])
+        if kind == "ResidualHelmholtzNonAnalytic":
+            rows += _columns(block, "n a b beta A B C D")
+        elif kind in READERS:
+            terms += READERS[kind](key, block)
+        else:
+            raise SpecError(
+                where=f"gas {key}",
+                found=f"residual term type {kind}",
+                expected="one of " + ", ".join(sorted([*READERS, "ResidualHelmholtzNonAnalytic"])),
+                todo="Add a reader for it in generator/gas_equations.py and its case, or choose another equation.",
+            )
+    return terms, rows
+
+
+def _columns(block: Mapping[str, object], names: str) -> list[Row]:
+    columns = [block[name] for name in names.split()]
+    return [tuple(float(value) for value in row) for row in zip(*columns, strict=True)]  # type: ignore[call-overload]  # columns of a JSON block
+
+
+def _whole(key: str, name: str, value: float) -> int:
+    if value != int(value) or value < 0:
+        raise SpecError(
+            where=f"gas {key}",
+            found=f"exponent {name} = {value!r} of the density",
+            expected="a whole number, zero or more",
+            todo="Extend generator/gas_slopes.py to broken powers, or choose another equation.",
+        )
+    return int(value)
+
+
+def _power(key: str, block: Mapping[str, object]) -> list[Term]:
+    return [
+        Term(n=n, t=t, d=_whole(key, "d", d), shape=Shape(power=_whole(key, "l", power)))
+        for n, t, d, power in _columns(block, "n t d l")
+    ]
+
+
+def _exponential(key: str, block: Mapping[str, object]) -> list[Term]:
+    return [
+        Term(n=n, t=t, d=_whole(key, "d", d), shape=Shape(power=_whole(key, "l", power), factor=factor))
+        for n, t, d, factor, power in _columns(block, "n t d g l")
+    ]
+
+
+def _gaussian(key: str, block: Mapping[str, object]) -> list[Term]:
+    return [
+        Term(n=n, t=t, d=_whole(key, "d", d), shape=Shape(width=eta, centre=epsilon), bell=(beta, gamma))
+        for n, t, d, eta, epsilon, beta, gamma in _columns(block, "n t d eta epsilon beta gamma")
+    ]
+
+
+def _gao(key: str, block: Mapping[str, object]) -> list[Term]:
+    return [
+        Term(n=n, t=t, d=_whole(key, "d", d), shape=Shape(width=-eta, centre=epsilon), peak=(beta, gamma, b))
+        for n, t, d, eta, epsilon, beta, gamma, b in _columns(block, "n t d eta epsilon beta gamma b")
+    ]
+
+
+READERS = {
+    "ResidualHelmholtzPower": _power,
+    "ResidualHelmholtzExponential": _exponential,
+    "ResidualHelmholtzGaussian": _gaussian,
+    "ResidualHelmholtzGaoB": _gao,
+}
+
+
+def read_ideal(key: str, blocks: Sequence[Mapping[str, object]]) -> tuple[list[Row], float, list[Row]]:
+    """Return powers (n, t), the factor of ln(tau), and Planck–Einstein rows (n, theta, c, d): n·ln(c + d·e^(theta tau)).
+
+    Raises:
+        SpecError: a block has a type nobody can evaluate.
+    """
+    powers: list[Row] = []
+    planck: list[Row] = []
+    log_tau = 0.0
+    for block in blocks:
+        match str(block["type"]):
+            case "IdealGasHelmholtzLead" | "IdealGasHelmholtzEnthalpyEntropyOffset":
+                powers += [(_number(block["a1"]), 0.0), (_number(block["a2"]), 1.0)]
+            case "IdealGasHelmholtzLogTau":
+                log_tau += _number(block["a"])
+            case "IdealGasHelmholtzPower":
+                powers += _columns(block, "n t")
+            case "IdealGasHelmholtzPlanckEinstein":
+                planck += [(n, -t, 1.0, -1.0) for n, t in _columns(block, "n t")]
+            case "IdealGasHelmholtzPlanckEinsteinFunctionT":
+                scale = _number(block["Tcrit"])
+                planck += [(n, -v / scale, 1.0, -1.0) for n, v in _columns(block, "n v")]
+            case "IdealGasHelmholtzPlanckEinsteinGeneralized":
+                planck += _columns(block, "n t c d")
+            case kind:
+                raise SpecError(
+                    where=f"gas {key}",
+                    found=f"ideal-gas term type {kind}",
+                    expected="lead, log tau, power, Planck–Einstein or enthalpy–entropy offset terms",
+                    todo="Add it to read_ideal in generator/gas_equations.py, or choose another equation.",
+                )
+    return powers, log_tau, planck
+
+
+def _number(value: object) -> float:
+    return float(value)  # type: ignore[arg-type]  # a number of a JSON block
+
+
+def equation_text(gas: Gas) -> str:
+    """Return the text of one equation module, in units mol, m3, K, Pa, J."""
+    data = json.loads(coolprop.get_fluid_param_string(gas.fluid, "JSON"))[0]
+    equation = data["EOS"][0]
+    terms, rows = read_terms(gas.key, equation["alphar"])
+    powers, log_tau, planck = read_ideal(gas.key, equation["alpha0"])
+    lines = [
+        f'"""{gas.title}: {gas.citation}.',
+        "",
+        HEADER.format(fluid=gas.fluid),
+        '"""',
+        "",
+        "from collections.abc import Callable",
+        "from math import exp",
+        "",
+        *_facts(gas.fluid, equation),
+        *_table("TERMS", [(term.n, term.t) for term in terms], "n, t of n·tau^t"),
+        *_shaped("BELLS", [term.bell for term in terms], "term, beta, gamma of exp(-beta (tau - gamma)^2)"),
+        *_shaped("PEAKS", [term.peak for term in terms], "term, beta, gamma, b of exp(1/(beta (tau - gamma)^2 + b))"),
+        *_table("NON_ANALYTIC", rows, "n, a, b, beta, A, B, C, D"),
+        *_table("IDEAL_POWERS", powers, "n, t of n·tau^t"),
+        f"IDEAL_LOG_TAU = {log_tau!r}",
+        *_table("IDEAL_PLANCK", planck, "n, theta, c, d of n·ln(c + d·exp(theta tau))"),
+        *_saturation(data["ANCILLARIES"]),
+        *_melting(data["ANCILLARIES"].get("melting_line")),
+        "",
+        "",
+        *slopes_text([(term.shape, term.d) for term in terms]),
+    ]
+    return "\n".join(lines) + "\n"
+
+
+def _facts(fluid: str, equation: Mapping[str, object]) -> list[str]:
+    reducing = equation["STATES"]["reducing"]  # type: ignore[index]  # nested JSON
+    return [
+        f"R = {_number(equation['gas_constant'])!r}",
+        f"MOLAR_MASS = {_number(equation['molar_mass'])!r}",
+        f"T_REDUCING = {_number(reducing['T'])!r}",
+        f"RHO_REDUCING = {_number(reducing['rhomolar'])!r}",
+        f"T_CRITICAL = {coolprop.PropsSI('Tcrit', fluid)!r}",
+        f"P_CRITICAL = {coolprop.PropsSI('pcrit', fluid)!r}",
+        f"RHO_CRITICAL = {coolprop.PropsSI('rhomolar_critical', fluid)!r}",
+        f"ACENTRIC = {_number(equation['acentric'])!r}",
+        f"T_MIN = {coolprop.PropsSI('Tmin', fluid)!r}",
+        f"T_MAX = {_number(equation['T_max'])!r}",
+        f"P_MAX = {_number(equation['p_max'])!r}",
+        f"PSEUDO_PURE = {bool(equation['pseudo_pure'])!r}",
+    ]
+
+
+def _table(name: str, rows: Sequence[Row], what: str) -> list[str]:
+    if not rows:
+        return [f"{name}: tuple[tuple[float, ...], ...] = ()  # {what}"]
+    return [f"{name} = (  # {what}", *(f"    {row!r}," for row in rows), ")"]
+
+
+def _shaped(name: str, shapes: Sequence[Row | None], what: str) -> list[str]:
+    rows = [(place, *shape) for place, shape in enumerate(shapes) if shape is not None]
+    return _table(name, rows, what)
+
+
+def _saturation(ancillaries: Mapping[str, Mapping[str, object]]) -> list[str]:
+    bubble = ancillaries.get("pS") or ancillaries["pL"]
+    dew = ancillaries.get("pS") or ancillaries["pV"]
+    named = {"BUBBLE_P": bubble, "DEW_P": dew, "LIQUID_RHO": ancillaries["rhoL"], "VAPOUR_RHO": ancillaries["rhoV"]}
+    what = "# start values along saturation: T_r, value, times T_r/T, exponential, (n, t) of n·(1 - T/T_r)^t"
+    return [what, *(f"{name} = {_ancillary(one)!r}" for name, one in named.items())]
+
+
+def _ancillary(block: Mapping[str, object]) -> tuple[float, float, bool, bool, tuple[Row, ...]]:
+    return (
+        _number(block["T_r"]),
+        _number(block["reducing_value"]),
+        bool(block["using_tau_r"]),
+        block["type"] != "rhoLnoexp",
+        tuple(_columns(block, "n t")),
+    )
+
+
+def _melting(line: Mapping[str, object] | None) -> list[str]:
+    what = "T from, T to, p_0, T_0, shift, (a, t): p_0 + sum a·((T/T_0 - shift)^t - 1 + shift)"
+    if line is None:
+        return _table("MELTING", [], what)
+    parts = [_melting_part(str(line["type"]), part) for part in line["parts"]]  # type: ignore[attr-defined]  # nested JSON
+    return [f"MELTING = (  # {what}", *(f"    {part!r}," for part in parts), ")"]
+
+
+def _melting_part(kind: str, part: Mapping[str, object]) -> tuple[float, float, float, float, float, tuple[Row, ...]]:
+    ends = (_number(part["T_min"]), _number(part["T_max"]), _number(part["p_0"]), _number(part["T_0"]))
+    match kind:
+        case "Simon":
+            return (*ends, 0.0, ((_number(part["a"]), _number(part["c"])),))
+        case "polynomial_in_Tr":
+            return (*ends, 0.0, _scaled(part))
+        case "polynomial_in_Theta":
+            return (*ends, 1.0, _scaled(part))
+    raise SpecError(
+        where="melting line",
+        found=f"type {kind}",
+        expected="Simon, polynomial_in_Tr or polynomial_in_Theta",
+        todo="Add it to _melting_part in generator/gas_equations.py.",
+    )
+
+
+def _scaled(part: Mapping[str, object]) -> tuple[Row, ...]:
+    p_0 = _number(part["p_0"])
+    return tuple((a * p_0, t) for a, t in _columns(part, "a t"))
+
+
+def identity_text(gases: Sequence[Gas]) -> str:
+    """Return the text of the identity module: who each gas is, in the order of the spec."""
+    lines = [
+        '"""Who each gas is: names, numbers, hazards, its equation and how good it is.',
+        "",
+        "Generated at build time from the spec; do not edit.",
+        '"""',
+        "",
+        "from math import inf",
+        "",
+        "from gaswright.gas.record import Identity, Uncertainty",
+        "",
+        "IDENTITIES = (",
+    ]
+    for gas in gases:
+        lines += _identity(gas)
+    return "\n".join([*lines, ")"]) + "\n"
+
+
+def _identity(gas: Gas) -> list[str]:
+    plain = ("key", "title", "formula", "spellings", "cas", "un", "hazards", "citation", "doi", "bubble_note")
+    return [
+        "    Identity(",
+        *(f"        {name}={getattr(gas, name)!r}," for name in plain),
+        "        uncertainties=(",
+        *(f"            Uncertainty({band.T_to!r}, {band.p_to!r}, {band.relative!r}, {band.says!r})," for band in gas.bands),
+        "        ),",
+        "    ),",
+    ]
