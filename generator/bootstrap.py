@@ -1,7 +1,7 @@
 """The project's own environment, made where it is missing or out of date, and entered.
 
-Takes a machine with any Python from 3.6 on; gives a command that runs in ``.venv`` on CPython 3.13 with what the lock names.
-``commands`` comes next. Standard library only: nothing else is there yet.
+Takes a machine with any Python from 3.6 on; gives a command that runs in ``.venv``, on CPython 3.13 with what the lock
+names. ``commands`` comes next. Standard library only: nothing else is there yet.
 """
 
 import hashlib
@@ -111,9 +111,8 @@ def _step(name: str, command: List[str], root: str) -> None:
     print("  {} ...".format(name), flush=True)
     status = subprocess.call(command, cwd=root, env=_clean_environment())
     if status != 0:
-        raise SetUpError(
-            "set-up, {}".format(name), "exit status {}, with the message above".format(status), "a step without errors", _AGAIN
-        )
+        found = "exit status {}, with the message above".format(status)
+        raise SetUpError("set-up, {}".format(name), found, "a step without errors", _AGAIN)
 
 
 def _write_path_file(root: str) -> None:

@@ -1,7 +1,7 @@
 """The browsers that the tests drive: found on this machine, or installed where the system's packages allow it.
 
 Takes nothing; gives the path of a Chromium or a Firefox program, or says what to install.
-``tests/browser`` starts them; ``.ci/run`` installs them first: ``python3 -m generator.browsers``. Standard library only.
+``tests/browser`` starts them. Standard library only.
 """
 
 import os
@@ -16,17 +16,20 @@ from generator.errors import SetUpError
 
 
 class Browser(NamedTuple):
-    """Where one browser may stand: names on the PATH, full paths (``{NAME}`` is a variable of the environment), Debian's package."""
+    """Where one browser may stand."""
 
     title: str
     commands: tuple[str, ...]
+    """Its names on the PATH, the likeliest first."""
     paths: tuple[str, ...]
+    """Where it usually is; ``{NAME}`` is a variable of the environment."""
     package: str
+    """Debian's name for it."""
 
 
 CHROMIUM = Browser(
     title="Chromium",
-    commands=("chromium", "chromium-browser", "google-chrome", "google-chrome-stable", "chrome", "microsoft-edge", "msedge"),
+    commands=("chromium", "chromium-browser", "google-chrome", "google-chrome-stable", "microsoft-edge", "msedge"),
     paths=(
         "/Applications/Chromium.app/Contents/MacOS/Chromium",
         "/Applications/Google Chrome.app/Contents/MacOS/Google Chrome",
@@ -89,7 +92,12 @@ def get(browser: Browser) -> Path:
     return found
 
 
-def find(browser: Browser, *, which: Callable[[str], str | None] = shutil.which, variables: Mapping[str, str] = os.environ) -> Path | None:
+def find(
+    browser: Browser,
+    *,
+    which: Callable[[str], str | None] = shutil.which,
+    variables: Mapping[str, str] = os.environ,
+) -> Path | None:
     """The browser's path on this machine; None where it has none."""
     named = [path for path in map(which, browser.commands) if path is not None]
     usual = [path for path in (_fill(path, variables) for path in browser.paths) if path is not None and path.is_file()]
@@ -113,9 +121,6 @@ def _install(package: str) -> None:
     """Install a package of the system; what fails is on the terminal, and the search that follows finds nothing."""
     print(f"Installing {package} ...", flush=True)
     environment = os.environ | {"DEBIAN_FRONTEND": "noninteractive"}
-    for command in (["apt-get", "update", "-qq"], ["apt-get", "install", "-y", "-qq", "--no-install-recommends", package]):
+    for words in ("update -qq", f"install -y -qq --no-install-recommends {package}"):
+        command = ["apt-get", *words.split()]
         subprocess.run(command, env=environment, stdout=subprocess.DEVNULL, check=False)
-
-
-if __name__ == "__main__":
-    print(find_chromium(), find_firefox(), sep="\n")

@@ -42,7 +42,8 @@ def messages(problems: BaseExceptionGroup[GeneratorError]) -> list[str]:
 def _dispatch(arguments: list[str]) -> int:
     options, others = _parser().parse_known_args(arguments)
     if others and options.command not in {"test", "bench"}:
-        raise SetUpError(f"command {options.command}", " ".join(others), "nothing more", "Run it with --help for its options.")
+        todo = "Run it with --help for its options."
+        raise SetUpError(f"command {options.command}", " ".join(others), "nothing more", todo)
     match options.command:
         case "build":
             return _build()

@@ -1,7 +1,7 @@
 """The errors of set-up and build, each told in four parts.
 
 Takes the facts of what went wrong; gives exceptions that keep them as attributes.
-Every stage of the generator raises these; ``commands`` prints them. The oldest Python that starts the project reads this module.
+Every stage of the generator raises these; ``commands`` prints them. Any Python from 3.6 on reads this module.
 """
 
 

@@ -11,7 +11,7 @@ import glob
 import os
 import subprocess
 import sys
-from typing import Iterator, List, Optional, Sequence, Tuple
+from typing import Iterator, Optional, Sequence, Tuple
 
 from generator.errors import SetUpError
 
@@ -50,7 +50,7 @@ def find_python() -> str:
     Raises:
         SetUpError: none answers, and none could be fetched.
     """
-    tried = []  # type: List[str]
+    tried = []
     for command in candidates():
         tried.append(" ".join(command))
         found = ask(command)
@@ -88,7 +88,7 @@ def _all_candidates() -> Iterator[Sequence[str]]:
         "home": home,
         "pyenv": os.environ.get("PYENV_ROOT", os.path.join(home, ".pyenv")),
         "local": os.environ.get("LOCALAPPDATA", home),
-        "programs": os.environ.get("ProgramFiles", home),
+        "programs": os.environ.get("PROGRAMFILES", home),
     }
     for place in _PLACES:
         for path in sorted(glob.glob(place.format(**{name: glob.escape(folder) for name, folder in folders.items()}))):

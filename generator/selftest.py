@@ -1,7 +1,8 @@
 """The whole check of the repository: ruff, the TypeScript compiler, a build, mypy, pytest.
 
 Takes the project's folder and words for pytest; gives an exit status that is not zero where any part failed.
-The build comes before mypy and pytest because both read the emitted engine. pytest is last, and its closing line ends the output.
+The build comes before mypy and pytest because both read the emitted engine.
+pytest is last, and its closing line ends the output.
 """
 
 import os
@@ -25,7 +26,13 @@ class Part(NamedTuple):
         return f"{self.name}: {'ok' if self.status == 0 else 'FAILED'} in {self.seconds:.0f} s"
 
 
-def run_tests(root: Path, *, build: Sequence[str], others: Sequence[str], run: Callable[..., int] = subprocess.call) -> int:
+def run_tests(
+    root: Path,
+    *,
+    build: Sequence[str],
+    others: Sequence[str],
+    run: Callable[..., int] = subprocess.call,
+) -> int:
     """Zero where every part passed; without a build, pytest has nothing to test and is not run."""
     start = time.time()
     parts = [_run_part(name, command, root, run) for name, command in _commands(root, build)]

@@ -15,7 +15,7 @@ from http.server import SimpleHTTPRequestHandler, ThreadingHTTPServer
 from os import PathLike
 from pathlib import Path
 from threading import Thread
-from typing import ClassVar, override
+from typing import override
 
 from watchfiles import DefaultFilter, watch
 from watchfiles.main import FileChange
@@ -33,7 +33,8 @@ _PAGE = """<!doctype html>
 <body>
 <h1>The site could not be built</h1>
 <pre>{text}</pre>
-<p>The last good site is still in build/site. Correct the source: it is built again at once; then load this page again.</p>
+<p>The last good site is still in build/site.
+Correct the source: it is built again at once; then load this page again.</p>
 </body>
 </html>
 """
@@ -86,7 +87,7 @@ class Handler(SimpleHTTPRequestHandler):
 
     server: Server
     # The site's own types, whatever this machine's registry of types says.
-    extensions_map: ClassVar[dict[str, str]] = {
+    extensions_map = {  # noqa: RUF012 - the base class declares it as an instance's
         ".css": "text/css; charset=utf-8",
         ".csv": "text/csv; charset=utf-8",
         ".html": "text/html; charset=utf-8",
@@ -146,7 +147,7 @@ class Handler(SimpleHTTPRequestHandler):
         self.send_error(HTTPStatus.NOT_FOUND)
 
     @override
-    def log_message(self, format: str, *args: object) -> None:  # noqa: A002 - the name is the base class's
+    def log_message(self, format: str, *args: object) -> None:
         """Keep the terminal for the builds."""
 
 

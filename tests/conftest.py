@@ -1,6 +1,7 @@
 """What all tests share: the option ``--all``, and the summary of the whole check.
 
-Takes the command line and what ``generator.selftest`` leaves in the environment; gives fixtures and lines above pytest's last.
+Takes the command line and what ``generator.selftest`` leaves in the environment.
+Gives fixtures, and lines above pytest's last.
 """
 
 import os
