@@ -1,0 +1,17 @@
+// Takes the page of one law; calculates with what is typed and keeps nothing.
+// page.ts comes next.
+
+import { Calculator } from "./calculator";
+import { find } from "./dom";
+
+/** The page stays as drawn, with its worked example, until something is typed or chosen. */
+export function startLaw(section: HTMLElement): void {
+  const decimal = find<HTMLSelectElement>(section, "#decimal");
+  const calculator = new Calculator(section, { site: () => null, instruments: () => ({}), decimal: () => decimal.value });
+  let isTouched = false;
+  calculator.takeDrawn();
+  calculator.overlay = (state) => (isTouched ? state : "example");
+  calculator.onChange = () => {
+    isTouched = true;
+  };
+}
