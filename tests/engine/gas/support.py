@@ -1,0 +1,81 @@
+"""Random states of the gases and the independent library that judges them.
+
+CoolProp 8.0.0 carries the coefficients, so agreement with it proves transcription and evaluation;
+the published tables in test_published.py judge the coefficients themselves.
+"""
+
+from __future__ import annotations
+
+from collections.abc import Iterator
+from random import Random
+
+import CoolProp.CoolProp as coolprop
+from gaswright.gas import Gas, find
+
+from spec.gases import GASES
+
+FLUIDS = {gas.key: gas.fluid for gas in GASES}
+KEYS = tuple(FLUIDS)
+PURE = tuple(key for key in KEYS if key != "air")
+GAS_PHASES = {coolprop.iphase_gas, coolprop.iphase_supercritical, coolprop.iphase_supercritical_gas}
+TOP = 100e6
+
+
+def judge(key: str) -> coolprop.AbstractState:
+    """Return a fresh state of the independent library."""
+    return coolprop.AbstractState("HEOS", FLUIDS[key])
+
+
+def states(gas: Gas, count: int, seed: str) -> Iterator[tuple[float, float]]:
+    """Yield `count` pairs p [Pa], T [K]: over the whole range up to 100 MPa, the cold part, and around the critical point."""
+    random = Random(f"{seed} {gas.key}")
+    top = min(gas.p_max, TOP)
+    for place in range(count):
+        kind = place % 3
+        if kind == 0:
+            yield 10 ** random.uniform(2, 8) * top / TOP, random.uniform(gas.T_min, gas.T_max)
+        elif kind == 1:
+            yield 10 ** random.uniform(2, 8) * top / TOP, random.uniform(gas.T_min, 1.3 * gas.T_c)
+        else:
+            yield gas.p_c * random.uniform(0.5, 1.5), gas.T_c * random.uniform(0.9, 1.1)
+
+
+def phase(state: coolprop.AbstractState, p: float, T: float) -> str:
+    """Return "gas" where the library calls the state a gas or supercritical above T_c, else why it is none.
+
+    Below the pressure of its triple point the library calls air a gas even where its own dew line says otherwise.
+    """
+    try:
+        state.update(coolprop.PT_INPUTS, p, T)
+    except ValueError as error:
+        return str(error)
+    is_low_air = state.name() == "Air" and p < state.trivial_keyed_output(coolprop.iP_triple) and T < state.T_critical()
+    if is_low_air and p > coolprop.PropsSI("P", "T", T, "Q", 1, "Air"):
+        return "two-phase"
+    return "gas" if state.phase() in GAS_PHASES else str(state.phase())
+
+
+def gas_states(key: str, count: int, seed: str) -> Iterator[tuple[Gas, coolprop.AbstractState, float, float]]:
+    """Yield `count` states that the library calls a gas: the gas, the library at that state, p [Pa], T [K]."""
+    gas, state = find(key), judge(key)
+    found = 0
+    for p, T in states(gas, 4 * count, seed):
+        if phase(state, p, T) == "gas":
+            yield gas, state, p, T
+            found += 1
+        if found == count:
+            return
+    message = f"only {found} of {count} gas states of {key}"
+    raise AssertionError(message)
+
+
+def at_density(state: coolprop.AbstractState, T: float) -> None:
+    """Set the library again at the density it has found and T [K], as a gas."""
+    state.specify_phase(coolprop.iphase_gas)
+    state.update(coolprop.DmolarT_INPUTS, state.rhomolar(), T)
+    state.unspecify_phase()
+
+
+def is_near_critical(gas: Gas, p: float, T: float) -> bool:
+    """Return whether a state is within 1 % of the critical point in both temperature and pressure."""
+    return abs(T / gas.T_c - 1) < 0.01 and abs(p / gas.p_c - 1) < 0.01
