@@ -192,7 +192,7 @@ def open_server(port: int | None, *, site: Path, builder: Builder) -> Server:
 def watch_sources(root: Path) -> Iterator[set[FileChange]]:
     """The changes of the sources, a batch at a time, until Ctrl-C."""
     folders = [root / name for name in _SOURCES if (root / name).is_dir()]
-    return watch(*folders, watch_filter=DefaultFilter(), raise_interrupt=False)
+    return watch(*folders, watch_filter=DefaultFilter(), raise_interrupt=True)
 
 
 def rebuild_on_change(builder: Builder, changes: Iterable[set[FileChange]]) -> None:
