@@ -10,7 +10,7 @@ from dataclasses import dataclass
 from pathlib import Path
 
 from generator.errors import SpecError
-from generator.pack_app import bundle_app, pack_table
+from generator.pack_app import Entries, bundle_app, pack_table
 from generator.pack_bytecode import compile_sources
 from generator.pack_node import install_packages
 from generator.pack_notices import notices
@@ -40,15 +40,17 @@ def pack(engine: Path, site_src: Path, out: Path, version: str) -> Packed:
     Raises:
         SpecError: a source is missing, or a tool says that something is wrong with it.
     """
-    packed = make_packed(engine, site_src, version, site_src / "app/page.ts")
+    entries = Entries(page=site_src / "app/page.ts", worker=site_src / "app/worker.ts")
+    packed = make_packed(engine, site_src, version, entries)
     _write(out / "wheel" / packed.wheel.name, packed.wheel.content)
     for name, content in packed.site.items():
         _write(out / "site" / name, content)
     return packed
 
 
-def make_packed(engine: Path, site_src: Path, version: str, entry: Path) -> Packed:
-    """What ``pack`` writes; ``entry`` is the page's script."""
+def make_packed(engine: Path, site_src: Path, version: str, entries: Entries) -> Packed:
+    """What ``pack`` writes; another page's ``entries`` may be given."""
+    engine, site_src = engine.resolve(), site_src.resolve()
     modules = install_packages(site_src)
     package = _package_files(engine)
     licence = _read(site_src / "LICENSE.txt")
@@ -62,7 +64,7 @@ def make_packed(engine: Path, site_src: Path, version: str, entry: Path) -> Pack
         *runtime_payloads(modules / "pyodide", engine.parent / "cache"),
         make_payload("engine", compiled.content),
     )
-    app = bundle_app(site_src, entry, pack_table(version, payloads, _lock(modules, compiled, version)))
+    app = bundle_app(site_src, entries, pack_table(version, payloads, _lock(modules, compiled, version)))
     return Packed(wheel=native, site=_site_files(payloads, app) | {"notices.txt": notices(site_src).encode()})
 
 

@@ -7,6 +7,7 @@ Takes ``site_src/app/*.ts`` and what the packer knows of the payloads; gives the
 import json
 import tempfile
 from collections.abc import Mapping, Sequence
+from dataclasses import dataclass
 from pathlib import Path
 
 from generator.pack_node import run_node
@@ -23,15 +24,23 @@ def pack_table(version: str, payloads: Sequence[Payload], lock: Mapping[str, obj
     return json.dumps({"version": version, "payloads": table, "lock": lock}, indent=1, sort_keys=True)
 
 
-def bundle_app(site_src: Path, entry: Path, table: str) -> dict[str, bytes]:
-    """The bundle of the page script ``entry``, by file name, with the worker's program in it as text."""
+@dataclass(frozen=True, slots=True, kw_only=True)
+class Entries:
+    """The two programs that a page is made of: its own script, and that of its worker."""
+
+    page: Path
+    worker: Path
+
+
+def bundle_app(site_src: Path, entries: Entries, table: str) -> dict[str, bytes]:
+    """The bundle of the page's script, by file name, with the worker's program in it as text."""
     with tempfile.TemporaryDirectory() as folder:
         work = Path(folder)
         (work / "pack.json").write_text(table, encoding="utf-8")
-        _bundle(site_src, site_src / "app/worker.ts", work / "worker", ())
-        (work / "worker/worker.js").rename(work / "worker.txt")
+        _bundle(site_src, entries.worker, work / "worker", ())
+        (work / "worker" / f"{entries.worker.stem}.js").rename(work / "worker.txt")
         found = (f"--alias:gaswright-pack={work / 'pack.json'}", f"--alias:gaswright-worker={work / 'worker.txt'}")
-        _bundle(site_src, entry, work / "app", found)
+        _bundle(site_src, entries.page, work / "app", found)
         return {file.name: file.read_bytes() for file in sorted((work / "app").iterdir())}
 
 
@@ -47,4 +56,4 @@ def check_types(site_src: Path) -> None:
 
 def _bundle(site_src: Path, entry: Path, out: Path, more: Sequence[str]) -> None:
     esbuild = site_src / "node_modules/esbuild/bin/esbuild"
-    run_node([esbuild, entry, *_BUNDLE, f"--outdir={out}", "--log-level=warning", *more], site_src)
+    run_node([esbuild, entry.resolve(), *_BUNDLE, f"--outdir={out}", "--log-level=warning", *more], site_src)

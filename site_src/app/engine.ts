@@ -23,6 +23,7 @@ const listeners = new Set<StateListener>();
 let state: State = "waiting";
 let reason = "";
 let watchdog: ReturnType<typeof setTimeout> | undefined;
+let worker: Worker | undefined;
 let scheduled = false;
 let begun = false;
 
@@ -58,7 +59,8 @@ function begin(): void {
   change("starting");
   watch();
   try {
-    run(makeWorker());
+    worker = makeWorker();
+    run(worker);
   } catch (cause) {
     giveUp(noWorker(String(cause)));
   }
@@ -69,10 +71,10 @@ function makeWorker(): Worker {
   return new Worker(address, { name: "gaswright" });
 }
 
-function run(worker: Worker): void {
-  const post = (message: ToWorker): void => worker.postMessage(message);
-  worker.onerror = (event) => giveUp(noWorker(event.message || "an error without a message"));
-  worker.onmessage = (event: MessageEvent<FromWorker>) => receive(event.data, post);
+function run(engine: Worker): void {
+  const post = (message: ToWorker): void => engine.postMessage(message);
+  engine.onerror = (event) => giveUp(noWorker(event.message || "an error without a message"));
+  engine.onmessage = (event: MessageEvent<FromWorker>) => receive(event.data, post);
   post({ kind: "begin", pack });
   readPayloads(pack.payloads, (name, text) => post({ kind: "payload", name, text }), giveUp);
 }
@@ -107,6 +109,7 @@ function watch(): void {
 
 function giveUp(why: string): void {
   clearTimeout(watchdog);
+  worker?.terminate();
   queue.close(why);
   change("failed", why);
 }

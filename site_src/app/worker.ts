@@ -2,8 +2,9 @@
 
 import type { PyodideAPI } from "pyodide";
 
-import type { FromWorker, Lock, Pack, PayloadName, ToWorker } from "./protocol";
-import { addressOf, requireWebAssembly, startPython } from "./runtime";
+import { Arrivals } from "./arrivals";
+import type { FromWorker, ToWorker } from "./protocol";
+import { requireWebAssembly, startPython } from "./runtime";
 
 type Answer = (text: string) => string;
 
@@ -25,36 +26,6 @@ function reply(answer: Answer, id: number, text: string): void {
     post({ kind: "answer", id, text: answer(text) });
   } catch (cause) {
     post({ kind: "broken", id, reason: explain(cause) });
-  }
-}
-
-/** One promise per payload, so that each is unpacked as it arrives and waited for where it is needed. */
-class Arrivals {
-  readonly #waiting = new Map<PayloadName, PromiseWithResolvers<string>>();
-
-  constructor(readonly pack: Pack) {
-    for (const { name } of pack.payloads) this.#waiting.set(name, Promise.withResolvers<string>());
-  }
-
-  async receive(name: PayloadName, text: string): Promise<void> {
-    const payload = this.pack.payloads.find((each) => each.name === name);
-    if (!payload) return;
-    this.#waiting.get(name)?.resolve(await addressOf(text, payload));
-    post({ kind: "progress", stage: name });
-  }
-
-  async address(name: PayloadName): Promise<string> {
-    const waiting = this.#waiting.get(name);
-    if (!waiting) throw new Error(`payload ${name} is not in the pack`);
-    return waiting.promise;
-  }
-
-  /** The lock file with the wheel's blob address; the runtime reads the file name behind the "#". */
-  async lock(): Promise<Lock> {
-    const wheel = await this.address("engine");
-    const entries = Object.entries(this.pack.lock.packages);
-    const packages = entries.map(([key, entry]) => [key, { ...entry, file_name: `${wheel}#/${entry.file_name}` }]);
-    return { info: this.pack.lock.info, packages: Object.fromEntries(packages) as Lock["packages"] };
   }
 }
 
@@ -84,6 +55,7 @@ async function handle(message: ToWorker): Promise<void> {
       return;
     case "payload":
       await arrivals?.receive(message.name, message.text);
+      post({ kind: "progress", stage: message.name });
       return;
     case "ask":
       if (answer) reply(await answer, message.id, message.text);
