@@ -1,0 +1,150 @@
+"""Check the loaded spec and refuse it with every mistake at once.
+
+Takes ``Loaded``; gives ``Checked``, which only this stage makes. Every mistake is a SpecError; all are raised
+together as one ExceptionGroup. Next: generator.solve.
+"""
+
+from collections import Counter
+from collections.abc import Iterator, Mapping
+from dataclasses import dataclass
+
+import sympy
+
+from generator.dimension_of import dimension_of
+from generator.errors import SpecError
+from generator.load import Case, Loaded
+from spec.dimensions import Dimension
+from spec.model import Citation, Constant, GasName, Nature, Relation, Variable
+
+WITHOUT_CASE = (Nature.BALANCE, Nature.DEFINITION, Nature.PROPERTY)
+BASES = ("published", "published, digits from memory", "library", "common practice, no source")
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class Checked:
+    """A spec whose equations agree in dimension, whose symbols are bound, and whose laws have outside cases."""
+
+    loaded: Loaded
+
+
+def check(loaded: Loaded) -> Checked:
+    """Give the spec as checked, or raise an ExceptionGroup of SpecError with every mistake found."""
+    mistakes = [*_names(loaded)]
+    for relation in loaded.relations():
+        mistakes.extend(_relation(relation, loaded.cases))
+    mistakes.extend(_cases(loaded))
+    if mistakes:
+        raise ExceptionGroup("the spec cannot be built", mistakes)
+    return Checked(loaded=loaded)
+
+
+def _names(loaded: Loaded) -> Iterator[SpecError]:
+    keys = [*(relation.key for relation in loaded.relations()), *(f"sheet {sheet.key}" for sheet in loaded.sheets)]
+    for key, count in Counter(keys).items():
+        if count > 1:
+            yield SpecError(
+                where=f"spec, {key}", found=f"the key {count} times", expected="every key once",
+                todo="rename one of them",
+            )
+
+
+def _relation(relation: Relation, cases: tuple[Case, ...]) -> Iterator[SpecError]:
+    where = f"relation {relation.key}"
+    unbound = _symbols(relation) - set(relation.where)
+    for symbol in sorted(unbound, key=str):
+        yield SpecError(
+            where=where, found=f"the symbol {symbol} in the equation and not in where",
+            expected="a Variable or a Constant for every symbol", todo=f"add {symbol} to where",
+        )
+    for symbol in [name for name, meaning in relation.where.items() if not isinstance(meaning, GasName)]:
+        if symbol not in _symbols(relation):
+            yield SpecError(
+                where=where, found=f"{symbol} in where and not in the equation",
+                expected="only symbols of the equation", todo=f"remove {symbol} or use it",
+            )
+    if not unbound:
+        yield from _dimensions(relation, where)
+    yield from _source(relation, where)
+    if relation.nature not in WITHOUT_CASE and not any(_is_outside(case, relation) for case in cases):
+        yield SpecError(
+            where=where, found="no case from outside",
+            expected="at least one case in spec/cases that is published or computed by an independent library",
+            todo="add a case with its source, or mark the relation as a balance or definition if it is one",
+        )
+
+
+def _is_outside(case: Case, relation: Relation) -> bool:
+    return case.relation == relation.key and case.basis in BASES
+
+
+def _symbols(relation: Relation) -> set[sympy.Symbol]:
+    return set(relation.left.free_symbols | relation.right.free_symbols)
+
+
+def _source(relation: Relation, where: str) -> Iterator[SpecError]:
+    for what, citation in [
+        ("the relation", relation.source),
+        *((f"the constant {symbol}", constant.source) for symbol, constant in constants_of(relation).items()),
+    ]:
+        if not isinstance(citation, Citation) or not citation.source.work or not citation.where:
+            yield SpecError(
+                where=where, found=f"no source for {what}", expected="a work of spec/sources.py and a place in it",
+                todo='write source=WORK.at("equation or section")',
+            )
+
+
+def _dimensions(relation: Relation, where: str) -> Iterator[SpecError]:
+    meaning = meanings_of(relation)
+    try:
+        left = dimension_of(relation.left, meaning, where)
+        right = dimension_of(relation.right, meaning, where)
+    except SpecError as mistake:
+        yield mistake
+        return
+    if left != right:
+        yield SpecError(
+            where=where, found=f"a left side in {left} and a right side in {right}",
+            expected="the same dimension on both sides", todo="correct the equation or the kinds of its variables",
+        )
+
+
+def meanings_of(relation: Relation) -> Mapping[sympy.Symbol, Dimension]:
+    """Give the dimension of each numeric symbol of ``relation``."""
+    return {
+        symbol: meaning.kind.dimension if isinstance(meaning, Variable) else meaning.dimension
+        for symbol, meaning in relation.where.items()
+        if not isinstance(meaning, GasName)
+    }
+
+
+def constants_of(relation: Relation) -> Mapping[sympy.Symbol, Constant]:
+    """Give the constants of ``relation``, in textbook order."""
+    return {symbol: meaning for symbol, meaning in relation.where.items() if isinstance(meaning, Constant)}
+
+
+def variables_of(relation: Relation) -> Mapping[sympy.Symbol, Variable]:
+    """Give the variables of ``relation``, in textbook order."""
+    return {symbol: meaning for symbol, meaning in relation.where.items() if isinstance(meaning, Variable)}
+
+
+def _cases(loaded: Loaded) -> Iterator[SpecError]:
+    relations = {relation.key: relation for relation in loaded.relations()}
+    for case in loaded.cases:
+        if case.relation not in relations:
+            yield SpecError(
+                where=case.name, found=f"the relation {case.relation}", expected="a key of the spec",
+                todo="correct the key",
+            )
+            continue
+        names = {symbol.name for symbol, meaning in relations[case.relation].where.items()
+                 if not isinstance(meaning, Constant)}
+        for name in [name for name in (*case.given, case.find) if name not in names]:
+            yield SpecError(
+                where=case.name, found=f"the variable {name}", expected=f"one of {', '.join(sorted(names))}",
+                todo="correct the name",
+            )
+        if case.basis not in BASES:
+            yield SpecError(
+                where=case.name, found=f"the basis {case.basis!r}", expected=f"one of {'; '.join(BASES)}",
+                todo="say how the number was come by",
+            )

@@ -1,0 +1,90 @@
+"""Prove solved forms by putting them back.
+
+Takes a relation, an unknown and its form; gives how it was proven or raises SpecError. States are drawn from the
+field's range with a fixed seed, so two builds say the same. Next: generator.solve records the proof.
+"""
+
+import math
+import random
+from collections.abc import Iterator
+
+import sympy
+
+from generator.check import constants_of, variables_of
+from generator.errors import SpecError
+from spec.model import Relation, Sign, Variable
+
+STATES = 12
+DIGITS = 50
+MODEST = 40
+GRID = 24
+USUAL = {
+    "absolute_pressure": (1e4, 3e7), "gauge_pressure": (-5e4, 3e7), "station_pressure": (6e4, 1.1e5),
+    "vacuum_pressure": (1e2, 5e4), "absolute_temperature": (200.0, 400.0), "celsius_temperature": (-60.0, 120.0),
+    "compressibility_factor": (0.5, 1.5), "molar_mass": (2e-3, 0.15), "temperature_constant": (50.0, 300.0),
+}
+
+
+def usual_range(variable: Variable) -> tuple[float, float]:
+    """Give the range a state is drawn from, inside the kind's range (SI)."""
+    kind = variable.kind
+    low, high = USUAL.get(kind.key, (max(kind.low, 1e-4), min(kind.high, 1e4)))
+    return max(low, kind.low), min(high, kind.high)
+
+
+def states(relation: Relation, count: int) -> Iterator[dict[sympy.Symbol, sympy.Float]]:
+    """Draw ``count`` states of all variables, with the constants, at 50 digits."""
+    source = random.Random(relation.key)  # noqa: S311 - sampling, not secrecy; seeded so that builds repeat
+    fixed = {symbol: sympy.Rational(constant.value.numerator, constant.value.denominator)
+             for symbol, constant in constants_of(relation).items()}
+    for _ in range(count):
+        state = {symbol: sympy.Float(_draw(source, variable), DIGITS)
+                 for symbol, variable in variables_of(relation).items()}
+        yield {**fixed, **state}
+
+
+def _draw(source: random.Random, variable: Variable) -> float:
+    low, high = usual_range(variable)
+    if low <= 0 or variable.sign is Sign.ANY:
+        return source.uniform(low, high)
+    return math.exp(source.uniform(math.log(low), math.log(high)))
+
+
+def prove_closed(relation: Relation, unknown: sympy.Symbol, form: sympy.Expr, residual: sympy.Expr) -> str:
+    """Put ``form`` back into ``residual``: identically zero, or zero at 50 digits over sampled states."""
+    put_back = residual.subs(unknown, form.doit())
+    is_identity = sympy.count_ops(put_back) <= MODEST and sympy.simplify(put_back.doit()) == 0
+    sampled = 0
+    for state in states(relation, STATES * 3):
+        found = sympy.N(form.subs(state).doit(), DIGITS)
+        if not found.is_real or (unknown.is_positive and found <= 0) or (unknown.is_nonnegative and found < 0):
+            continue
+        left, right = (sympy.N(side.subs({**state, unknown: found}).doit(), DIGITS)
+                       for side in (relation.left, relation.right))
+        if abs(left - right) > sympy.Float("1e-35", DIGITS) * max(abs(left), abs(right)):
+            raise SpecError(
+                where=f"relation {relation.key}, unknown {unknown}", found=f"a form that misses by {left - right}",
+                expected="a residual of zero when it is put back", todo="correct the branch or the equation",
+            )
+        sampled += 1
+    if not sampled and not is_identity:
+        raise SpecError(
+            where=f"relation {relation.key}, unknown {unknown}", found="no sampled state that gives a real value",
+            expected="at least one state of the field's range", todo="widen the ranges or name a branch",
+        )
+    return "put back: identically zero" if is_identity else f"put back: zero to 35 digits at {sampled} states"
+
+
+def is_monotonic(relation: Relation, unknown: sympy.Symbol, residual: sympy.Expr) -> bool:
+    """Tell whether ``residual`` only rises or only falls with ``unknown`` over the kind's range, at sampled states."""
+    slope = sympy.diff(residual, unknown)
+    kind = variables_of(relation)[unknown].kind
+    low, high = max(kind.low, 1e-12), kind.high
+    places = [low * (high / low) ** (step / GRID) for step in range(GRID + 1)]
+    for state in states(relation, STATES):
+        rest = {symbol: float(value) for symbol, value in state.items() if symbol != unknown}
+        along = sympy.lambdify(unknown, slope.subs(rest), "math")
+        signs = {math.copysign(1.0, value) for value in map(along, places) if value}
+        if len(signs) > 1:
+            return False
+    return True

@@ -1,0 +1,181 @@
+"""Solve every relation for every unknown and prove each form.
+
+Takes a checked relation; gives ``SolvedRelation``: per unknown a closed form, a polynomial with a named root, an inverse of the gas
+model, or a bracketed numeric form; and the slopes of left - right by every variable, from which the sensitivity of
+any unknown to any reading is -F_x/F_y. Next: generator.describe turns them
+into text.
+"""
+
+from collections.abc import Mapping
+from dataclasses import dataclass
+from enum import Enum
+
+import sympy
+
+from generator.arrange import arrange, flatten
+from generator.check import constants_of, variables_of
+from generator.errors import SpecError
+from generator.isolate import isolate
+from generator.prove import is_monotonic, prove_closed
+from spec.model import Nature, Relation, Root
+from spec.symbols import GAS_FUNCTIONS
+
+
+class Way(Enum):
+    """How an unknown is found."""
+
+    CLOSED = "closed form"
+    POLYNOMIAL = "root of a polynomial"
+    GAS = "by the gas model"
+    NUMERIC = "found numerically"
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class Form:
+    """A relation solved for one unknown.
+
+    ``expression`` is the closed form or the inverse call; ``coefficients`` are those of the polynomial, highest power
+    first; ``proof`` says how the form was shown to satisfy the relation.
+    """
+
+    unknown: sympy.Symbol
+    way: Way
+    arguments: tuple[sympy.Symbol, ...]
+    expression: sympy.Expr | None = None
+    coefficients: tuple[sympy.Expr, ...] = ()
+    root: Root | None = None
+    method: str = ""
+    method_arguments: tuple[sympy.Expr, ...] = ()
+    proof: str = ""
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class SolvedRelation:
+    """A relation with a form for every unknown and the slopes of its residual ``left - right``."""
+
+    relation: Relation
+    forms: Mapping[str, Form]
+    slopes: Mapping[str, sympy.Expr]
+    uses_gas: bool
+
+
+def solve_relation(relation: Relation) -> SolvedRelation:
+    """Solve one relation for each of its variables."""
+    variables = variables_of(relation)
+    left, right = evaluated(relation.left), evaluated(relation.right)
+    unknowns = variables if relation.nature not in (Nature.DECISION, Nature.FIT) else [relation.left]
+    forms = {symbol.name: _form(relation, symbol, left, right) for symbol in unknowns}
+    order = order_of(relation)
+    slopes = {symbol.name: arrange(sympy.diff(left - right, symbol), order) for symbol in variables}
+    return SolvedRelation(relation=relation, forms=forms, slopes=slopes, uses_gas=_uses_gas(left - right))
+
+
+def evaluated(expression: sympy.Expr) -> sympy.Expr:
+    """Give an unevaluated expression as sympy would have built it, for algebra."""
+    if not expression.args:
+        return expression
+    return expression.func(*(evaluated(argument) for argument in expression.args))
+
+
+def order_of(relation: Relation) -> Mapping[sympy.Symbol, int]:
+    """Give each symbol's place in textbook order."""
+    return {symbol: place for place, symbol in enumerate(relation.where)}
+
+
+def _uses_gas(expression: sympy.Expr) -> bool:
+    return any(name.func.__name__ in GAS_FUNCTIONS for name in expression.atoms(sympy.Function))
+
+
+def _form(relation: Relation, unknown: sympy.Symbol, left: sympy.Expr, right: sympy.Expr) -> Form:
+    arguments = tuple(symbol for symbol in variables_of(relation) if symbol != unknown)
+    inverse = _gas_form(left, right, unknown, arguments)
+    if inverse is not None:
+        return inverse
+    closed = _textbook(relation, unknown) or _isolated(relation, left, right, unknown)
+    if closed is not None:
+        proof = prove_closed(relation, unknown, closed, left - right)
+        return Form(unknown=unknown, way=Way.CLOSED, arguments=arguments, expression=closed, proof=proof)
+    return _polynomial(relation, unknown, left - right, arguments) or _numeric(relation, unknown, left - right, arguments)
+
+
+def _textbook(relation: Relation, unknown: sympy.Symbol) -> sympy.Expr | None:
+    """Give the printed side itself where the other side is the unknown alone."""
+    for here, there in ((relation.left, relation.right), (relation.right, relation.left)):
+        if here == unknown and not there.has(unknown):
+            return flatten(there)
+    return None
+
+
+def _isolated(relation: Relation, left: sympy.Expr, right: sympy.Expr, unknown: sympy.Symbol) -> sympy.Expr | None:
+    found = isolate(left, right, unknown)
+    if found is None:
+        found = _linear(left - right, unknown)
+    return None if found is None else arrange(found, order_of(relation))
+
+
+def _linear(residual: sympy.Expr, unknown: sympy.Symbol) -> sympy.Expr | None:
+    polynomial = _as_polynomial(residual, unknown)
+    if polynomial is None or polynomial.degree() != 1:
+        return None
+    slope, rest = polynomial.all_coeffs()
+    return sympy.factor_terms(sympy.cancel(-rest / slope))
+
+
+def _as_polynomial(residual: sympy.Expr, unknown: sympy.Symbol) -> sympy.Poly | None:
+    above, _ = sympy.fraction(sympy.together(residual))
+    above = sympy.expand(above)
+    return sympy.Poly(above, unknown) if above.is_polynomial(unknown) else None
+
+
+def _gas_form(
+    left: sympy.Expr, right: sympy.Expr, unknown: sympy.Symbol, arguments: tuple[sympy.Symbol, ...]
+) -> Form | None:
+    """Give the gas model's own inverse where the unknown is an argument of an opaque function that stands alone."""
+    for value, call in ((left, right), (right, left)):
+        name = call.func.__name__
+        if name in GAS_FUNCTIONS and unknown in call.args and not value.has(unknown):
+            place = call.args.index(unknown)
+            inputs = tuple(value if argument == unknown else argument for argument in call.args)
+            return Form(
+                unknown=unknown, way=Way.GAS, arguments=arguments, method=GAS_FUNCTIONS[name].inverses[place],
+                method_arguments=inputs, proof="inverse of the gas model, shown by its own tests",
+            )
+    return None
+
+
+def _polynomial(
+    relation: Relation, unknown: sympy.Symbol, residual: sympy.Expr, arguments: tuple[sympy.Symbol, ...]
+) -> Form | None:
+    polynomial = _as_polynomial(residual, unknown)
+    if polynomial is None:
+        return None
+    branch = next((branch for branch in relation.branches if branch.unknown == unknown), None)
+    if branch is None:
+        raise SpecError(
+            where=f"relation {relation.key}, unknown {unknown}",
+            found=f"a polynomial of degree {polynomial.degree()}, which may have {polynomial.degree()} roots",
+            expected="the physical root named",
+            todo=f"add Branch(unknown={unknown}, root=..., why=...) to branches",
+        )
+    coefficients = tuple(arrange(part, order_of(relation)) for part in polynomial.all_coeffs())
+    return Form(
+        unknown=unknown, way=Way.POLYNOMIAL, arguments=arguments, coefficients=coefficients, root=branch.root,
+        proof=f"all real roots bracketed by those of the derivative; the {branch.root.value} taken: {branch.why}",
+    )
+
+
+def _numeric(
+    relation: Relation, unknown: sympy.Symbol, residual: sympy.Expr, arguments: tuple[sympy.Symbol, ...]
+) -> Form:
+    if not is_monotonic(relation, unknown, residual):
+        raise SpecError(
+            where=f"relation {relation.key}, unknown {unknown}",
+            found="a residual that rises and falls over the field's range, so two values may satisfy it",
+            expected="one root, or the physical root named",
+            todo=f"add Branch(unknown={unknown}, root=..., why=...) to branches, or narrow the kind's range",
+        )
+    return Form(
+        unknown=unknown, way=Way.NUMERIC, arguments=arguments,
+        proof="residual monotonic over sampled states of the range: one root at most, bracketed",
+    )
+

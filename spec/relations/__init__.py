@@ -1,0 +1,23 @@
+"""The relations of the trade, one module per family of the catalogue."""
+
+from spec.relations import (
+    a_pressure,
+    b_simple,
+    c_ideal,
+    d_reference,
+    f_kinetic,
+    g_real,
+    m_vessels,
+    r_balances,
+)
+
+FAMILIES = (
+    a_pressure.FAMILY,
+    b_simple.FAMILY,
+    c_ideal.FAMILY,
+    d_reference.FAMILY,
+    f_kinetic.FAMILY,
+    g_real.FAMILY,
+    m_vessels.FAMILY,
+    r_balances.FAMILY,
+)

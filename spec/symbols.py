@@ -1,0 +1,56 @@
+"""Symbols with the narrowest true assumption, and the gas model's opaque functions.
+
+Takes names; gives sympy symbols and functions. Next: the family files write their relations with them.
+"""
+
+from dataclasses import dataclass
+
+import sympy
+
+from spec import kinds
+from spec.model import Kind
+
+
+def positive(names: str) -> tuple[sympy.Symbol, ...]:
+    """Give one positive symbol for each name."""
+    return tuple(sympy.Symbol(name, positive=True) for name in names.split())
+
+
+def nonnegative(names: str) -> tuple[sympy.Symbol, ...]:
+    """Give one symbol for each name that may also be zero."""
+    return tuple(sympy.Symbol(name, nonnegative=True) for name in names.split())
+
+
+def real(names: str) -> tuple[sympy.Symbol, ...]:
+    """Give one symbol of any sign for each name."""
+    return tuple(sympy.Symbol(name, real=True) for name in names.split())
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class GasFunction:
+    """A property that the gas model works out; to sympy it is an opaque function.
+
+    ``method`` is the engine's name for it, ``slopes`` the methods of its partial derivatives by each argument, and
+    ``inverses`` the methods that give an argument back when the value stands in that argument's place.
+    """
+
+    name: str
+    method: str
+    arguments: tuple[Kind, ...]
+    result: Kind
+    slopes: tuple[str, ...]
+    inverses: tuple[str, ...]
+
+
+RHO_GAS = GasFunction(
+    name="rho_gas",
+    method="density",
+    arguments=(kinds.ABSOLUTE_PRESSURE, kinds.ABSOLUTE_TEMPERATURE),
+    result=kinds.DENSITY,
+    slopes=("density_dp", "density_dT"),
+    inverses=("pressure", "temperature"),
+)
+GAS_FUNCTIONS = {function.name: function for function in (RHO_GAS,)}
+
+rho_gas = sympy.Function("rho_gas", positive=True)
+gas = sympy.Symbol("gas")
