@@ -27,12 +27,11 @@ POLICY = (
     "script-src 'self' 'wasm-unsafe-eval' blob:; worker-src blob:; connect-src blob:"
 )
 SECTIONS = (
-    ("home", "Jobs", "index.html"),
-    ("sheets", "Sheets", "sheets.html"),
+    ("sheets", "Today", "sheets.html"),
     ("laws", "Laws", "laws.html"),
     ("gases", "Gases", "gases.html"),
     ("tables", "Tables", "tables.html"),
-    ("about", "This copy", "about.html"),
+    ("about", "About", "about.html"),
 )
 
 

@@ -7,6 +7,9 @@ import { drawCurve } from "./plot";
 import type { Calculator } from "./calculator";
 import type { Signature } from "./store";
 
+/** Readings and working lines that fill a page in the usual size; beyond them the print is smaller and the plot left out. */
+const MANY_LINES = 24;
+
 export interface PaperFacts {
   job: string;
   place: string;
@@ -23,6 +26,8 @@ export function fillPaper(calculator: Calculator, facts: PaperFacts): void {
     ...drawWorking(calculator), drawLines(facts),
   );
   paper.classList.add("is-filled");
+  const lines = calculator.rows.length + (calculator.answer?.working?.length ?? 0);
+  paper.classList.toggle("is-dense", lines > MANY_LINES);
 }
 
 /** Leaves printing to the page as it stands, as for the day page. */
@@ -34,7 +39,7 @@ export function emptyPaper(): void {
 
 function drawHead(calculator: Calculator, facts: PaperFacts): HTMLElement {
   const head = make("div", "", { class: "over" });
-  const number = facts.signature ? `signed, revision ${facts.revision}` : "not signed on screen";
+  const number = facts.signature ? "signed on screen" : "not signed on screen";
   head.append(make("h1", calculator.section.dataset["title"] ?? ""), make("b", number));
   return head;
 }
@@ -48,10 +53,10 @@ function drawFacts(calculator: Calculator, facts: PaperFacts): HTMLElement {
     ["Site", facts.place || "……………………"],
     ["Printed", stamp(new Date())],
     ["Question", calculator.foundRow?.title ?? ""],
-    ["Site conditions", facts.site],
     ["Calculated by", `Gaswright ${version ?? ""}, spec ${(digest ?? "").slice(0, 12)}`],
+    ["Revision", [String(facts.revision), facts.reason].filter(Boolean).join(", because: ")],
+    ["Site conditions", facts.site],
   ];
-  if (facts.reason) pairs.push(["Reason for revision", facts.reason]);
   for (const [term, value] of pairs) {
     const pair = make("div");
     pair.append(make("dt", term), make("dd", value));
@@ -86,7 +91,7 @@ function drawBox(calculator: Calculator): HTMLElement {
     if (text) box.append(make(tag, text, name ? { class: name } : {}));
   };
   const figure = answer?.figure;
-  for (const text of answer?.cautions ?? []) add("p", text, "cautions");
+  add("p", (answer?.cautions ?? []).join(" "), "cautions");
   add("p", answer?.refusal, "refusal");
   add("p", figure?.label);
   add("p", [figure?.text, figure?.unit].filter(Boolean).join(" "), "figure");
@@ -106,7 +111,7 @@ function drawWorking(calculator: Calculator): HTMLElement[] {
   const rule = make("p", `Rule: ${calculator.section.dataset["rule"] ?? ""}`);
   const plot = calculator.answer?.plot;
   const figure = make("figure", "", { class: "plot" });
-  if (plot) figure.append(drawCurve(plot));
+  if (plot) figure.append(drawCurve(plot, 0));
   return lines.length > 0 ? [make("h2", "Working"), steps, rule, ...(plot ? [figure] : [])] : [rule];
 }
 

@@ -187,7 +187,7 @@ export class Row {
     if (isFound === this.isFound) return;
     this.element.classList.toggle("is-found", isFound);
     show(find(this.element, ".value"), !isFound);
-    show(find(this.element, ".by"), !isFound);
+    for (const part of [".by", ".origin"]) show(find(this.element, part), !isFound);
     show(this.#found, isFound);
     this.#found.textContent = "to find";
     const wanted = this.element.dataset["findUnit"] ?? "";

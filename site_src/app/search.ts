@@ -63,8 +63,8 @@ function draw(text: string, hits: HTMLElement): void {
 
 function drawHit(entry: Entry): HTMLLIElement {
   const item = make("li");
-  const link = make("a", entry.title, { href: `${root}${entry.href}` });
-  link.append(make("span", entry.part));
+  const link = make("a", "", { href: `${root}${entry.href}` });
+  link.append(make("b", entry.title), make("span", entry.part));
   item.append(link);
   return item;
 }
