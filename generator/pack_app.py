@@ -19,7 +19,7 @@ _BUNDLE = ("--bundle", "--minify", "--format=iife", "--charset=utf8", "--legal-c
 
 
 def pack_table(version: str, payloads: Sequence[Payload], lock: Mapping[str, object]) -> str:
-    """JSON of the type ``Pack`` of app/protocol.ts: which payload scripts there are, with their digests, and the lock."""
+    """JSON of the type ``Pack`` of app/protocol.ts: the payload scripts with their digests, and the lock."""
     table = [{"name": each.name, "file": each.file, "sha256": each.sha256} for each in payloads]
     return json.dumps({"version": version, "payloads": table, "lock": lock}, indent=1, sort_keys=True)
 

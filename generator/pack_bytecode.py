@@ -23,7 +23,7 @@ def compile_sources(files: Mapping[str, bytes], folder: str) -> Mapping[str, byt
     """
     command = [sys.executable, "-B", "-S", "-P", str(_SCRIPT), folder]
     sources = write_zip(files, compressed=False)
-    done = subprocess.run(command, input=sources, stdout=subprocess.PIPE, check=True, env={"PYTHONHASHSEED": "0"})  # noqa: S603 - our own script
+    done = subprocess.run(command, input=sources, stdout=subprocess.PIPE, check=True, env={"PYTHONHASHSEED": "0"})
     return read_zip(done.stdout)
 
 

@@ -40,7 +40,7 @@ def run_node(arguments: Sequence[str | Path], folder: Path) -> str:
         SpecError: the program fails; its last words are in the message.
     """
     command = [str(find_node()), *map(str, arguments)]
-    done = subprocess.run(command, cwd=folder, capture_output=True, text=True, encoding="utf-8", check=False)  # noqa: S603 - arguments are ours
+    done = subprocess.run(command, cwd=folder, capture_output=True, text=True, encoding="utf-8", check=False)
     if done.returncode == 0:
         return done.stdout
     said = (done.stderr or done.stdout).strip()[-2000:]

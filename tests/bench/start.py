@@ -14,9 +14,11 @@ from collections.abc import Mapping
 from dataclasses import dataclass
 from pathlib import Path
 
-from generator.browsers import find_chromium
-from generator.pack import Entries, make_packed
 from playwright.sync_api import Playwright, sync_playwright
+
+from generator.browsers import find_chromium
+from generator.pack import make_packed
+from generator.pack_app import Entries
 
 HERE = Path(__file__).resolve().parent
 ROOT = HERE.parents[1]

@@ -7,13 +7,16 @@ test_start.py opens them.
 import shutil
 from pathlib import Path
 
-from generator.pack import Entries, make_packed
-
+from generator.pack import make_packed
+from generator.pack_app import Entries
 from tests.browser.support.tiny_site import POLICY
 
 ROOT = Path(__file__).parents[2]
 PAGES = Path(__file__).with_name("start_pages")
-BODY = """<body><p id="state"></p><p id="states"></p><p id="reason"></p><p id="early"></p>
+PAGE = """<!doctype html><html lang="en"><head><meta charset="utf-8"><title>Start</title>
+<link rel="icon" href="data:,"><meta http-equiv="Content-Security-Policy" content="{policy}">
+<script src="{script}" defer></script></head><body>
+<p id="state"></p><p id="states"></p><p id="reason"></p><p id="early"></p>
 <label>Reading <input id="typed"></label><p id="late"></p>
 <button id="ask-burst">Burst</button><p id="burst"></p><button id="ask-broken">Broken</button><p id="broken"></p>
 <button id="ask-about">About</button><p id="about"></p></body></html>
@@ -45,9 +48,7 @@ def make_site_files(work: Path) -> dict[str, bytes]:
 
 def _write_page(file: Path, script: str, policy: str) -> None:
     file.parent.mkdir(parents=True, exist_ok=True)
-    head = f'<!doctype html><html lang="en"><head><meta charset="utf-8"><title>Start</title><link rel="icon" href="data:,">\
-<meta http-equiv="Content-Security-Policy" content="{policy}"><script src="{script}" defer></script></head>'
-    file.write_text(head + BODY, encoding="utf-8")
+    file.write_text(PAGE.format(policy=policy, script=script), encoding="utf-8")
 
 
 def _write_damaged(whole: Path, folder: Path) -> None:

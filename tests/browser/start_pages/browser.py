@@ -2,6 +2,11 @@
 
 import json
 import sys
+from collections.abc import Callable
+from typing import Any
+
+type Handler = Callable[[Request], object]
+type Request = dict[str, Any]
 
 COUNTS: dict[str, list[int]] = {}
 
@@ -13,27 +18,27 @@ def answer(text: str) -> str:
     return json.dumps({"id": request["id"], "says": says})
 
 
-def echo(request: dict[str, str]) -> str:
+def echo(request: Request) -> str:
     """What was asked."""
     return f"engine read {request['text']}"
 
 
-def count(request: dict[str, int]) -> list[int]:
+def count(request: Request) -> list[int]:
     """The numbers of the requests of this slot that came through, in order."""
     COUNTS.setdefault("burst", []).append(request["number"])
     return COUNTS["burst"]
 
 
-def about(request: dict[str, str]) -> list[str]:
+def about(request: Request) -> list[str]:
     """Python's version and platform, where this module and one of the standard library were read from."""
     version = ".".join(map(str, sys.version_info[:2]))
     return [version, sys.platform, __file__, str(json.__file__), str(request["id"])]
 
 
-def fail(request: dict[str, str]) -> str:
+def fail(request: Request) -> str:
     """Break."""
     message = f"broken on purpose by request {request['id']}"
     raise RuntimeError(message)
 
 
-HANDLERS = {"echo": echo, "count": count, "about": about, "raise": fail}
+HANDLERS: dict[str, Handler] = {"echo": echo, "count": count, "about": about, "raise": fail}
