@@ -77,7 +77,9 @@ def draw_bodies(view: SiteView) -> Iterator[Body]:
             html = env.get_template("law.html").render(root="../", law=law)
             yield Body(f"laws/{law.key}.md", "laws", law.title, html)
     for gas in view.gases:
-        yield Body(f"gases/{gas.key}.md", "gases", gas.title, env.get_template("gas.html").render(root="../", gas=gas))
+        yield Body(
+            f"gases/{gas.key}.md", "gases", gas.title, env.get_template("gas.html").render(root="../", gas=gas)
+        )
 
 
 def group_sheets(view: SiteView) -> dict[str, list[SheetView]]:
@@ -91,12 +93,15 @@ def group_sheets(view: SiteView) -> dict[str, list[SheetView]]:
 def make_environment() -> Environment:
     """Templates of the page bodies: every text escaped, a name that is not there is an error."""
     return Environment(
-        loader=FileSystemLoader(TEMPLATES), autoescape=True, undefined=StrictUndefined, trim_blocks=True,
+        loader=FileSystemLoader(TEMPLATES),
+        autoescape=True,
+        undefined=StrictUndefined,
+        trim_blocks=True,
         lstrip_blocks=True,
     )
 
 
-class PagesPlugin(BasePlugin[MkDocsConfig]):
+class PagesPlugin(BasePlugin[MkDocsConfig]):  # type: ignore[no-untyped-call]  # mkdocs leaves it untyped
     """Hands the generated pages to mkdocs, and keeps out of the site what carries a date."""
 
     def __init__(self, bodies: tuple[Body, ...], entries: str) -> None:

@@ -34,4 +34,9 @@ def list_entries(view: SiteView) -> Iterator[Entry]:
         href = f"tables.html#table-{number}"
         yield {"href": href, "title": table.caption, "part": "table", "words": " ".join((*table.head, table.note))}
     yield {"href": "sheets.html#site", "title": "Site conditions", "part": "sheet", "words": "barometer weather"}
-    yield {"href": "sheets.html#instruments", "title": "Instruments", "part": "sheet", "words": "gauge class due date"}
+    yield {
+        "href": "sheets.html#instruments",
+        "title": "Instruments",
+        "part": "sheet",
+        "words": "gauge class due date",
+    }

@@ -10,7 +10,7 @@ const WORDS: Record<ShownState, [string, string]> = {
   empty: ["Empty", "Nothing read yet."],
   incomplete: ["Incomplete", ""],
   answer: ["Answer", ""],
-  warning: ["Answer, with a warning", "Read the warning before the figure."],
+  warning: ["Warning", "Read this before the figure."],
   refused: ["Refused", "No figure can be given."],
   stale: ["Stale", "The site conditions are older than one shift (12 h). Signing waits until they are read again."],
   signed: ["Signed", "The readings are locked."],
