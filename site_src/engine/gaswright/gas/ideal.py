@@ -20,7 +20,7 @@ class IdealGas(Gas):
 
     def __init__(self, gas: Gas) -> None:
         """Take the identity and molar mass of `gas`."""
-        super().__init__(gas.identity, gas._equation)  # noqa: SLF001 - the same class's own part
+        super().__init__(gas.identity, gas.coefficients)
         self.R = MOLAR_GAS_CONSTANT
         self.equation = "ideal gas law"
 
@@ -54,7 +54,7 @@ class IdealGas(Gas):
     def properties(self, p: float, T: float) -> Caloric:
         """Return heat capacities, speed of sound and their kin of the ideal gas at p [Pa] and T [K]."""
         rho = self.molar_density(p, T)
-        equation = self._equation
+        equation = self.coefficients
         ideal = ideal_part(equation, rho / equation.RHO_REDUCING, equation.T_REDUCING / T)
         return caloric(self.R, self.molar_mass, T, rho, NO_RESIDUAL, ideal)
 

@@ -37,7 +37,7 @@ class Gas:
     def __init__(self, identity: Identity, equation: Equation) -> None:
         """Join who the gas is and its equation."""
         self.identity = identity
-        self._equation = equation
+        self.coefficients = equation
         self._isotherm: Isotherm | None = None
         self.key, self.title, self.formula = identity.key, identity.title, identity.formula
         self.equation = identity.citation
@@ -57,7 +57,7 @@ class Gas:
     def molar_density(self, p: float, T: float, *, check_phase: bool = True) -> float:
         """Return the density [mol/m3] at p [Pa] and T [K]; unchecked, the gas branch also beyond its dew line."""
         isotherm = self._at(T)
-        demand_pressure_limit(self.identity, self._equation, p)
+        demand_pressure_limit(self.identity, self.coefficients, p)
         if check_phase:
             demand_gas(self.identity, isotherm, p)
         rho = gas_root(isotherm, p)
@@ -84,10 +84,10 @@ class Gas:
         demand_number(self.title, "density", molar_density, "mol/m³")
         if check_phase:
             demand_gas_density(self.identity, isotherm, molar_density)
-        x = molar_density / self._equation.RHO_REDUCING
+        x = molar_density / self.coefficients.RHO_REDUCING
         p = molar_density * self.R * T * (1.0 + isotherm.slopes(x)[1])
         if check_phase:
-            demand_pressure_limit(self.identity, self._equation, p)
+            demand_pressure_limit(self.identity, self.coefficients, p)
             demand_gas(self.identity, isotherm, p) if T >= self.T_c else None
         return p
 
@@ -105,10 +105,10 @@ class Gas:
 
     def temperature(self, p: float, rho: float) -> float:
         """Return the temperature [K] at which the gas of density rho [kg/m3] has the pressure p [Pa]."""
-        demand_pressure_limit(self.identity, self._equation, p)
+        demand_pressure_limit(self.identity, self.coefficients, p)
         demand_number(self.title, "density", rho, "kg/m³")
         molar = rho / self.molar_mass
-        low = coldest_gas(self._equation, molar)
+        low = coldest_gas(self.coefficients, molar)
         T = solve_temperature(self._at, p, molar, low, self.T_max)
         if abs(self.pressure(rho, T) / p - 1.0) > 1e-9:  # noqa: PLR2004 - the solver stopped at an end of the range
             raise self._no_temperature(p, rho, low)
@@ -126,14 +126,14 @@ class Gas:
     def saturation(self, T: float) -> Saturation | None:
         """Return saturation pressure [Pa] and densities [mol/m3] at T [K]; None where there is none, and for air."""
         isotherm = self._at(T)
-        return None if self.T_c <= T or self._equation.PSEUDO_PURE else saturation(isotherm)
+        return None if self.T_c <= T or self.coefficients.PSEUDO_PURE else saturation(isotherm)
 
     def properties(self, p: float, T: float) -> Caloric:
         """Return heat capacities, speed of sound and their kin at p [Pa] and T [K]."""
         rho = self.molar_density(p, T)
         isotherm = self._at(T)
-        x = rho / self._equation.RHO_REDUCING
-        ideal = ideal_part(self._equation, x, isotherm.tau)
+        x = rho / self.coefficients.RHO_REDUCING
+        ideal = ideal_part(self.coefficients, x, isotherm.tau)
         return caloric(self.R, self.molar_mass, T, rho, isotherm.full(x), ideal)
 
     def uncertainty(self, p: float, T: float) -> Uncertainty:
@@ -152,12 +152,12 @@ class Gas:
         kept = self._isotherm
         if kept is not None and kept.T == T:
             return kept
-        demand_temperature(self.identity, self._equation, T)
-        self._isotherm = kept = Isotherm(self._equation, T)
+        demand_temperature(self.identity, self.coefficients, T)
+        self._isotherm = kept = Isotherm(self.coefficients, T)
         return kept
 
     def _reduced(self, rho: float) -> float:
-        return rho / self.molar_mass / self._equation.RHO_REDUCING
+        return rho / self.molar_mass / self.coefficients.RHO_REDUCING
 
     def _no_root(self, p: float, T: float) -> OutsideRangeError:
         return OutsideRangeError(
