@@ -11,13 +11,13 @@ from __future__ import annotations
 
 import json
 from collections.abc import Mapping, Sequence
-from dataclasses import dataclass
-from typing import TYPE_CHECKING, Protocol
+from typing import TYPE_CHECKING
 
-import CoolProp.CoolProp as coolprop
+from CoolProp import CoolProp
 
 from generator.errors import SpecError
-from generator.gas_slopes import Shape, slopes_text
+from generator.gas_slopes import slopes_text
+from generator.gas_terms import Row, columns, number, read_ideal, read_terms
 
 if TYPE_CHECKING:
     from spec.gas_model import Gas
@@ -25,28 +25,6 @@ if TYPE_CHECKING:
 COOLPROP_VERSION = "8.0.0"
 HEADER = "Generated at build time; do not edit. Coefficients: CoolProp 8.0.0 (MIT licence), fluid {fluid}."
 TOP = "gaswright/gas"
-
-type Json = Mapping[str, "Json"] | Sequence["Json"] | str | float
-type Row = tuple[float, ...]
-
-
-class Block(Protocol):
-    """One block of terms as the library stores it: equal-length columns by name."""
-
-    def __getitem__(self, name: str, /) -> Sequence[float]:
-        """Return one column."""
-
-
-@dataclass(frozen=True, slots=True, kw_only=True)
-class Term:
-    """One separable term: n·tau^t times a temperature shape, delta^d times a density shape."""
-
-    n: float
-    t: float
-    d: int
-    shape: Shape
-    bell: tuple[float, float] | None = None
-    peak: tuple[float, float, float] | None = None
 
 
 def emit_gas_modules(gases: Sequence[Gas]) -> dict[str, str]:
@@ -56,7 +34,9 @@ def emit_gas_modules(gases: Sequence[Gas]) -> dict[str, str]:
         SpecError: the installed library is not the pinned one, or an equation has a term nobody can evaluate.
     """
     _demand_version()
-    texts = {f"{TOP}/equations/__init__.py": '"""Generated: coefficients of the reference equations, one gas each."""\n'}
+    texts = {
+        f"{TOP}/equations/__init__.py": '"""Generated: coefficients of the reference equations, one gas each."""\n'
+    }
     for gas in sorted(gases, key=lambda one: one.key):
         texts[f"{TOP}/equations/{gas.key}.py"] = equation_text(gas)
     texts[f"{TOP}/identity.py"] = identity_text(gases)
@@ -64,7 +44,7 @@ def emit_gas_modules(gases: Sequence[Gas]) -> dict[str, str]:
 
 
 def _demand_version() -> None:
-    found = coolprop.get_global_param_string("version")
+    found = CoolProp.get_global_param_string("version")
     if found != COOLPROP_VERSION:
         raise SpecError(
             where="generator/gas_equations.py",
@@ -74,123 +54,9 @@ def _demand_version() -> None:
         )
 
 
-def read_terms(key: str, blocks: Sequence[Mapping[str, object]]) -> tuple[list[Term], list[Row]]:
-    """Return the separable terms and the non-analytic rows (n, a, b, beta, A, B, C, D).
-
-    Raises:
-        SpecError: a block has a type or an exponent nobody can evaluate.
-    """
-    terms: list[Term] = []
-    rows: list[Row] = []
-    for block in blocks:
-        kind = str(block["type"])
-        if kind == "ResidualHelmholtzNonAnalytic":
-            rows += _columns(block, "n a b beta A B C D")
-        elif kind in READERS:
-            terms += READERS[kind](key, block)
-        else:
-            raise SpecError(
-                where=f"gas {key}",
-                found=f"residual term type {kind}",
-                expected="one of " + ", ".join(sorted([*READERS, "ResidualHelmholtzNonAnalytic"])),
-                todo="Add a reader for it in generator/gas_equations.py and its case, or choose another equation.",
-            )
-    return terms, rows
-
-
-def _columns(block: Mapping[str, object], names: str) -> list[Row]:
-    columns = [block[name] for name in names.split()]
-    return [tuple(float(value) for value in row) for row in zip(*columns, strict=True)]  # type: ignore[call-overload]  # columns of a JSON block
-
-
-def _whole(key: str, name: str, value: float) -> int:
-    if value != int(value) or value < 0:
-        raise SpecError(
-            where=f"gas {key}",
-            found=f"exponent {name} = {value!r} of the density",
-            expected="a whole number, zero or more",
-            todo="Extend generator/gas_slopes.py to broken powers, or choose another equation.",
-        )
-    return int(value)
-
-
-def _power(key: str, block: Mapping[str, object]) -> list[Term]:
-    return [
-        Term(n=n, t=t, d=_whole(key, "d", d), shape=Shape(power=_whole(key, "l", power)))
-        for n, t, d, power in _columns(block, "n t d l")
-    ]
-
-
-def _exponential(key: str, block: Mapping[str, object]) -> list[Term]:
-    return [
-        Term(n=n, t=t, d=_whole(key, "d", d), shape=Shape(power=_whole(key, "l", power), factor=factor))
-        for n, t, d, factor, power in _columns(block, "n t d g l")
-    ]
-
-
-def _gaussian(key: str, block: Mapping[str, object]) -> list[Term]:
-    return [
-        Term(n=n, t=t, d=_whole(key, "d", d), shape=Shape(width=eta, centre=epsilon), bell=(beta, gamma))
-        for n, t, d, eta, epsilon, beta, gamma in _columns(block, "n t d eta epsilon beta gamma")
-    ]
-
-
-def _gao(key: str, block: Mapping[str, object]) -> list[Term]:
-    return [
-        Term(n=n, t=t, d=_whole(key, "d", d), shape=Shape(width=-eta, centre=epsilon), peak=(beta, gamma, b))
-        for n, t, d, eta, epsilon, beta, gamma, b in _columns(block, "n t d eta epsilon beta gamma b")
-    ]
-
-
-READERS = {
-    "ResidualHelmholtzPower": _power,
-    "ResidualHelmholtzExponential": _exponential,
-    "ResidualHelmholtzGaussian": _gaussian,
-    "ResidualHelmholtzGaoB": _gao,
-}
-
-
-def read_ideal(key: str, blocks: Sequence[Mapping[str, object]]) -> tuple[list[Row], float, list[Row]]:
-    """Return powers (n, t), the factor of ln(tau), and Planck–Einstein rows (n, theta, c, d): n·ln(c + d·e^(theta tau)).
-
-    Raises:
-        SpecError: a block has a type nobody can evaluate.
-    """
-    powers: list[Row] = []
-    planck: list[Row] = []
-    log_tau = 0.0
-    for block in blocks:
-        match str(block["type"]):
-            case "IdealGasHelmholtzLead" | "IdealGasHelmholtzEnthalpyEntropyOffset":
-                powers += [(_number(block["a1"]), 0.0), (_number(block["a2"]), 1.0)]
-            case "IdealGasHelmholtzLogTau":
-                log_tau += _number(block["a"])
-            case "IdealGasHelmholtzPower":
-                powers += _columns(block, "n t")
-            case "IdealGasHelmholtzPlanckEinstein":
-                planck += [(n, -t, 1.0, -1.0) for n, t in _columns(block, "n t")]
-            case "IdealGasHelmholtzPlanckEinsteinFunctionT":
-                scale = _number(block["Tcrit"])
-                planck += [(n, -v / scale, 1.0, -1.0) for n, v in _columns(block, "n v")]
-            case "IdealGasHelmholtzPlanckEinsteinGeneralized":
-                planck += _columns(block, "n t c d")
-            case kind:
-                raise SpecError(
-                    where=f"gas {key}",
-                    found=f"ideal-gas term type {kind}",
-                    expected="lead, log tau, power, Planck–Einstein or enthalpy–entropy offset terms",
-                    todo="Add it to read_ideal in generator/gas_equations.py, or choose another equation.",
-                )
-    return powers, log_tau, planck
-
-
-def _number(value: object) -> float:
-    return float(value)  # type: ignore[arg-type]  # a number of a JSON block
-
-
 def equation_text(gas: Gas) -> str:
     """Return the text of one equation module, in units mol, m3, K, Pa, J."""
-    data = json.loads(coolprop.get_fluid_param_string(gas.fluid, "JSON"))[0]
+    data = json.loads(CoolProp.get_fluid_param_string(gas.fluid, "JSON"))[0]
     equation = data["EOS"][0]
     terms, rows = read_terms(gas.key, equation["alphar"])
     powers, log_tau, planck = read_ideal(gas.key, equation["alpha0"])
@@ -223,17 +89,17 @@ def equation_text(gas: Gas) -> str:
 def _facts(fluid: str, equation: Mapping[str, object]) -> list[str]:
     reducing = equation["STATES"]["reducing"]  # type: ignore[index]  # nested JSON
     return [
-        f"R = {_number(equation['gas_constant'])!r}",
-        f"MOLAR_MASS = {_number(equation['molar_mass'])!r}",
-        f"T_REDUCING = {_number(reducing['T'])!r}",
-        f"RHO_REDUCING = {_number(reducing['rhomolar'])!r}",
-        f"T_CRITICAL = {coolprop.PropsSI('Tcrit', fluid)!r}",
-        f"P_CRITICAL = {coolprop.PropsSI('pcrit', fluid)!r}",
-        f"RHO_CRITICAL = {coolprop.PropsSI('rhomolar_critical', fluid)!r}",
-        f"ACENTRIC = {_number(equation['acentric'])!r}",
-        f"T_MIN = {coolprop.PropsSI('Tmin', fluid)!r}",
-        f"T_MAX = {_number(equation['T_max'])!r}",
-        f"P_MAX = {_number(equation['p_max'])!r}",
+        f"R = {number(equation['gas_constant'])!r}",
+        f"MOLAR_MASS = {number(equation['molar_mass'])!r}",
+        f"T_REDUCING = {number(reducing['T'])!r}",
+        f"RHO_REDUCING = {number(reducing['rhomolar'])!r}",
+        f"T_CRITICAL = {CoolProp.PropsSI('Tcrit', fluid)!r}",
+        f"P_CRITICAL = {CoolProp.PropsSI('pcrit', fluid)!r}",
+        f"RHO_CRITICAL = {CoolProp.PropsSI('rhomolar_critical', fluid)!r}",
+        f"ACENTRIC = {number(equation['acentric'])!r}",
+        f"T_MIN = {CoolProp.PropsSI('Tmin', fluid)!r}",
+        f"T_MAX = {number(equation['T_max'])!r}",
+        f"P_MAX = {number(equation['p_max'])!r}",
         f"PSEUDO_PURE = {bool(equation['pseudo_pure'])!r}",
     ]
 
@@ -259,11 +125,11 @@ def _saturation(ancillaries: Mapping[str, Mapping[str, object]]) -> list[str]:
 
 def _ancillary(block: Mapping[str, object]) -> tuple[float, float, bool, bool, tuple[Row, ...]]:
     return (
-        _number(block["T_r"]),
-        _number(block["reducing_value"]),
+        number(block["T_r"]),
+        number(block["reducing_value"]),
         bool(block["using_tau_r"]),
         block["type"] != "rhoLnoexp",
-        tuple(_columns(block, "n t")),
+        tuple(columns(block, "n t")),
     )
 
 
@@ -276,10 +142,10 @@ def _melting(line: Mapping[str, object] | None) -> list[str]:
 
 
 def _melting_part(kind: str, part: Mapping[str, object]) -> tuple[float, float, float, float, float, tuple[Row, ...]]:
-    ends = (_number(part["T_min"]), _number(part["T_max"]), _number(part["p_0"]), _number(part["T_0"]))
+    ends = (number(part["T_min"]), number(part["T_max"]), number(part["p_0"]), number(part["T_0"]))
     match kind:
         case "Simon":
-            return (*ends, 0.0, ((_number(part["a"]), _number(part["c"])),))
+            return (*ends, 0.0, ((number(part["a"]), number(part["c"])),))
         case "polynomial_in_Tr":
             return (*ends, 0.0, _scaled(part))
         case "polynomial_in_Theta":
@@ -293,8 +159,8 @@ def _melting_part(kind: str, part: Mapping[str, object]) -> tuple[float, float, 
 
 
 def _scaled(part: Mapping[str, object]) -> tuple[Row, ...]:
-    p_0 = _number(part["p_0"])
-    return tuple((a * p_0, t) for a, t in _columns(part, "a t"))
+    p_0 = number(part["p_0"])
+    return tuple((a * p_0, t) for a, t in columns(part, "a t"))
 
 
 def identity_text(gases: Sequence[Gas]) -> str:
@@ -322,7 +188,10 @@ def _identity(gas: Gas) -> list[str]:
         "    Identity(",
         *(f"        {name}={getattr(gas, name)!r}," for name in plain),
         "        uncertainties=(",
-        *(f"            Uncertainty({band.T_to!r}, {band.p_to!r}, {band.relative!r}, {band.says!r})," for band in gas.bands),
+        *(
+            f"            Uncertainty({band.T_to!r}, {band.p_to!r}, {band.relative!r}, {band.says!r}),"
+            for band in gas.bands
+        ),
         "        ),",
         "    ),",
     ]

@@ -54,7 +54,9 @@ def _gather(places: Sequence[tuple[Shape, int]], groups: Sequence[Group]) -> lis
 def _slopes(groups: Sequence[Group]) -> list[str]:
     names = ", ".join(_name(place, d) for place, (_, powers) in enumerate(groups) for d in powers)
     lines = [
-        "def slopes(x: float, k: tuple[float, ...], exp: Callable[[float], float] = exp) -> tuple[float, float, float]:",
+        "def slopes(",
+        "    x: float, k: tuple[float, ...], exp: Callable[[float], float] = exp",
+        ") -> tuple[float, float, float]:",
         '    """Return the residual part, its slope times x and its second slope times x^2, in reduced density x."""',
         f"    ({names},) = k",
         *_powers(groups),
@@ -83,7 +85,7 @@ def _is_used(power: int, needed: set[int]) -> bool:
 
 
 def _chain(power: int) -> set[int]:
-    if power < 2:  # noqa: PLR2004 - the first two powers need no product
+    if power < 2:
         return set()
     return {power} | _chain(power // 2) | _chain(power - power // 2)
 

@@ -9,7 +9,7 @@ from __future__ import annotations
 from collections.abc import Iterator
 from random import Random
 
-import CoolProp.CoolProp as coolprop
+from CoolProp import CoolProp
 from gaswright.gas import Gas, find
 
 from spec.gases import GASES
@@ -17,18 +17,18 @@ from spec.gases import GASES
 FLUIDS = {gas.key: gas.fluid for gas in GASES}
 KEYS = tuple(FLUIDS)
 PURE = tuple(key for key in KEYS if key != "air")
-GAS_PHASES = {coolprop.iphase_gas, coolprop.iphase_supercritical, coolprop.iphase_supercritical_gas}
+GAS_PHASES = {CoolProp.iphase_gas, CoolProp.iphase_supercritical, CoolProp.iphase_supercritical_gas}
 TOP = 100e6
 
 
-def judge(key: str) -> coolprop.AbstractState:
+def judge(key: str) -> CoolProp.AbstractState:
     """Return a fresh state of the independent library."""
-    return coolprop.AbstractState("HEOS", FLUIDS[key])
+    return CoolProp.AbstractState("HEOS", FLUIDS[key])
 
 
 def states(gas: Gas, count: int, seed: str) -> Iterator[tuple[float, float]]:
-    """Yield `count` pairs p [Pa], T [K]: over the whole range up to 100 MPa, the cold part, and around the critical point."""
-    random = Random(f"{seed} {gas.key}")
+    """Yield `count` pairs p [Pa], T [K]: over the whole range up to 100 MPa, the cold part, near the critical point."""
+    random = Random(f"{seed} {gas.key}")  # noqa: S311 - the same states each time, no secret
     top = min(gas.p_max, TOP)
     for place in range(count):
         kind = place % 3
@@ -40,22 +40,22 @@ def states(gas: Gas, count: int, seed: str) -> Iterator[tuple[float, float]]:
             yield gas.p_c * random.uniform(0.5, 1.5), gas.T_c * random.uniform(0.9, 1.1)
 
 
-def phase(state: coolprop.AbstractState, p: float, T: float) -> str:
+def phase(state: CoolProp.AbstractState, p: float, T: float) -> str:
     """Return "gas" where the library calls the state a gas or supercritical above T_c, else why it is none.
 
     Below the pressure of its triple point the library calls air a gas even where its own dew line says otherwise.
     """
     try:
-        state.update(coolprop.PT_INPUTS, p, T)
+        state.update(CoolProp.PT_INPUTS, p, T)
     except ValueError as error:
         return str(error)
-    is_low_air = state.name() == "Air" and p < state.trivial_keyed_output(coolprop.iP_triple) and T < state.T_critical()
-    if is_low_air and p > coolprop.PropsSI("P", "T", T, "Q", 1, "Air"):
+    is_low_air = state.name() == "Air" and p < state.trivial_keyed_output(CoolProp.iP_triple) and state.T_critical() > T
+    if is_low_air and p > CoolProp.PropsSI("P", "T", T, "Q", 1, "Air"):
         return "two-phase"
     return "gas" if state.phase() in GAS_PHASES else str(state.phase())
 
 
-def gas_states(key: str, count: int, seed: str) -> Iterator[tuple[Gas, coolprop.AbstractState, float, float]]:
+def gas_states(key: str, count: int, seed: str) -> Iterator[tuple[Gas, CoolProp.AbstractState, float, float]]:
     """Yield `count` states that the library calls a gas: the gas, the library at that state, p [Pa], T [K]."""
     gas, state = find(key), judge(key)
     found = 0
@@ -69,10 +69,10 @@ def gas_states(key: str, count: int, seed: str) -> Iterator[tuple[Gas, coolprop.
     raise AssertionError(message)
 
 
-def at_density(state: coolprop.AbstractState, T: float) -> None:
+def at_density(state: CoolProp.AbstractState, T: float) -> None:
     """Set the library again at the density it has found and T [K], as a gas."""
-    state.specify_phase(coolprop.iphase_gas)
-    state.update(coolprop.DmolarT_INPUTS, state.rhomolar(), T)
+    state.specify_phase(CoolProp.iphase_gas)
+    state.update(CoolProp.DmolarT_INPUTS, state.rhomolar(), T)
     state.unspecify_phase()
 
 

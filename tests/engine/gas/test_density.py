@@ -2,6 +2,8 @@
 
 from __future__ import annotations
 
+from collections.abc import Callable
+
 import pytest
 from gaswright.gas import find
 
@@ -13,7 +15,7 @@ DEFAULT, FULL = 250, 2500
 
 
 @pytest.mark.parametrize("key", KEYS)
-def test_density_equals_the_library(key: str, full: bool, record_property: pytest.RecordProperty) -> None:  # noqa: FBT001 - a fixture
+def test_density_equals_the_library(key: str, full: bool, record_property: Callable[[str, object], None]) -> None:  # noqa: FBT001 - a fixture
     worst = near = 0.0
     for gas, state, p, T in gas_states(key, FULL if full else DEFAULT, "density"):
         error = abs(gas.density(p, T) / state.rhomass() - 1)

@@ -5,8 +5,9 @@ from __future__ import annotations
 import pytest
 
 from generator.errors import SpecError
-from generator.gas_equations import emit_gas_modules, read_ideal, read_terms
+from generator.gas_equations import emit_gas_modules
 from generator.gas_slopes import Shape, slopes_text
+from generator.gas_terms import read_ideal, read_terms
 from spec.gases import GASES
 
 
@@ -17,7 +18,7 @@ def test_unknown_residual_term_stops_the_build() -> None:
         "gas argon: found residual term type ResidualHelmholtzAssociating; expected one of "
         "ResidualHelmholtzExponential, ResidualHelmholtzGaoB, ResidualHelmholtzGaussian, ResidualHelmholtzNonAnalytic, "
         "ResidualHelmholtzPower. "
-        "Add a reader for it in generator/gas_equations.py and its case, or choose another equation."
+        "Add a reader for it in generator/gas_terms.py and its case, or choose another equation."
     )
 
 
@@ -34,14 +35,23 @@ def test_broken_exponent_of_density_stops_the_build() -> None:
 
 def test_same_input_same_bytes() -> None:
     texts = emit_gas_modules(GASES)
-    assert texts == emit_gas_modules(tuple(reversed(GASES))) | {"gaswright/gas/identity.py": texts["gaswright/gas/identity.py"]}
+    assert texts == emit_gas_modules(tuple(reversed(GASES))) | {
+        "gaswright/gas/identity.py": texts["gaswright/gas/identity.py"]
+    }
     assert len(texts) == len(GASES) + 2
     assert all(text.endswith("\n") for text in texts.values())
 
 
 @pytest.mark.parametrize(
     "shape",
-    [Shape(), Shape(power=1), Shape(power=3), Shape(power=2, factor=0.7), Shape(width=20.0, centre=1.0), Shape(width=-2.8, centre=0.4)],
+    [
+        Shape(),
+        Shape(power=1),
+        Shape(power=3),
+        Shape(power=2, factor=0.7),
+        Shape(width=20.0, centre=1.0),
+        Shape(width=-2.8, centre=0.4),
+    ],
 )
 @pytest.mark.parametrize("powers", [(0,), (1,), (4,), (1, 2, 7), (0, 3)])
 def test_straight_lines_equal_differences(shape: Shape, powers: tuple[int, ...]) -> None:

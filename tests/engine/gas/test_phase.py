@@ -64,14 +64,19 @@ def test_solid_helium_is_refused() -> None:
         find("helium").density(100e6, 13.0)
 
 
-@pytest.mark.parametrize(("p", "T", "word"), [(1e5, 50.0, "temperature"), (1e5, 2500.0, "temperature"), (3e9, 300.0, "pressure")])
+@pytest.mark.parametrize(
+    ("p", "T", "word"), [(1e5, 50.0, "temperature"), (1e5, 2500.0, "temperature"), (3e9, 300.0, "pressure")]
+)
 def test_outside_the_limits_of_the_equation(p: float, T: float, word: str) -> None:
     with pytest.raises(OutsideRangeError, match=f"{word} of Nitrogen") as told:
         find("nitrogen").density(p, T)
     assert told.value.todo.startswith("Check the")
 
 
-@pytest.mark.parametrize(("p", "T"), [(-1e5, 300.0), (0.0, 300.0), (float("nan"), 300.0), (1e5, float("nan")), (float("inf"), 300.0), (1e5, -5.0)])
+@pytest.mark.parametrize(
+    ("p", "T"),
+    [(-1e5, 300.0), (0.0, 300.0), (float("nan"), 300.0), (1e5, float("nan")), (float("inf"), 300.0), (1e5, -5.0)],
+)
 def test_numbers_that_are_none_are_named(p: float, T: float) -> None:
     with pytest.raises(ReadingError, match="of Nitrogen"):
         find("nitrogen").density(p, T)

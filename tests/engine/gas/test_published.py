@@ -52,7 +52,12 @@ SATURATED = [
 ]
 
 # T [K], bubble, dew [MPa]: Lemmon et al. (2000), table A1
-AIR_LINES = [(70.0, "0.03191", "0.01943"), (80.0, "0.11462", "0.08232"), (100.0, "0.66313", "0.56742"), (130.0, "3.42947", "3.30835")]
+AIR_LINES = [
+    (70.0, "0.03191", "0.01943"),
+    (80.0, "0.11462", "0.08232"),
+    (100.0, "0.66313", "0.56742"),
+    (130.0, "3.42947", "3.30835"),
+]
 
 
 def _half(printed: str) -> float:
@@ -73,7 +78,9 @@ def test_density_as_printed(key: str, T: float, p: float, printed: str, unit: st
 
 
 @pytest.mark.parametrize(("key", "T", "p", "cv", "cp", "speed", "unit"), CALORIC)
-def test_heat_capacities_and_speed_as_printed(key: str, T: float, p: float, cv: str, cp: str, speed: str, unit: str) -> None:  # noqa: PLR0913, PLR0917
+def test_heat_capacities_and_speed_as_printed(  # noqa: PLR0917 - the columns of the table
+    key: str, T: float, p: float, cv: str, cp: str, speed: str, unit: str
+) -> None:
     gas = find(key)
     found = gas.properties(p * 1e6, T)
     scale = 1.0 if unit == "J/(mol K)" else gas.molar_mass * 1000
@@ -83,7 +90,7 @@ def test_heat_capacities_and_speed_as_printed(key: str, T: float, p: float, cv: 
 
 
 @pytest.mark.parametrize(("key", "T", "p", "liquid", "vapour", "unit"), SATURATED)
-def test_saturation_as_printed(key: str, T: float, p: str, liquid: str, vapour: str, unit: str) -> None:  # noqa: PLR0913, PLR0917
+def test_saturation_as_printed(key: str, T: float, p: str, liquid: str, vapour: str, unit: str) -> None:  # noqa: PLR0917
     gas = find(key)
     found = gas.saturation(T)
     assert found is not None

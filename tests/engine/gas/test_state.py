@@ -2,8 +2,8 @@
 
 from __future__ import annotations
 
-import CoolProp.CoolProp as coolprop
 import pytest
+from CoolProp import CoolProp
 from gaswright.errors import OutsideRangeError, ReadingError
 from gaswright.gas import IdealGas, find, gas_state
 
@@ -14,9 +14,13 @@ R = 8.31446261815324  # J/(mol K), SI Brochure, 9th edition: k·N_A
 
 def test_state_from_pressure() -> None:
     state = gas_state("nitrogen", T=288.15, p=20e6)
-    assert state.mass_density == pytest.approx(coolprop.PropsSI("D", "P", 20e6, "T", 288.15, "Nitrogen"), rel=1e-13)
-    assert state.molar_density == pytest.approx(coolprop.PropsSI("Dmolar", "P", 20e6, "T", 288.15, "Nitrogen"), rel=1e-13)
-    assert state.Z == pytest.approx(20e6 / (state.molar_density * 8.31451 * 288.15), rel=1e-14)  # R of Span et al. (2000)
+    assert state.mass_density == pytest.approx(CoolProp.PropsSI("D", "P", 20e6, "T", 288.15, "Nitrogen"), rel=1e-13)
+    assert state.molar_density == pytest.approx(
+        CoolProp.PropsSI("Dmolar", "P", 20e6, "T", 288.15, "Nitrogen"), rel=1e-13
+    )
+    assert (
+        pytest.approx(20e6 / (state.molar_density * 8.31451 * 288.15), rel=1e-14) == state.Z
+    )  # R of Span et al. (2000)
     assert (state.p, state.T, state.uncertainty) == (20e6, 288.15, 2e-4)
     assert "Span" in state.method
 
@@ -31,10 +35,10 @@ def test_state_from_molar_density_is_the_way_back() -> None:
 def test_unchecked_density_of_a_liquid_gives_the_pressure_of_the_equation(key: str) -> None:
     gas = find(key)
     T = 0.8 * gas.T_c
-    liquid = coolprop.PropsSI("Dmolar", "T", T, "Q", 0, FLUIDS[key]) * 1.05
+    liquid = CoolProp.PropsSI("Dmolar", "T", T, "Q", 0, FLUIDS[key]) * 1.05
     with pytest.raises(OutsideRangeError, match="liquid"):
         gas_state(key, T=T, molar_density=liquid)
-    expected = coolprop.PropsSI("P", "T", T, "Dmolar", liquid, FLUIDS[key])
+    expected = CoolProp.PropsSI("P", "T", T, "Dmolar", liquid, FLUIDS[key])
     assert gas_state(key, T=T, molar_density=liquid, check_phase=False).p == pytest.approx(expected, rel=1e-9)
 
 
@@ -77,7 +81,10 @@ def test_ideal_law_behind_the_same_interface(key: str) -> None:
     assert ideal.properties(p, T).joule_thomson == 0.0
 
 
-@pytest.mark.parametrize(("key", "limit"), [("nitrogen", 21), ("air", 13), ("helium", 10), ("hydrogen", 8.4), ("oxygen", 6.8), ("methane", 2.6)])
+@pytest.mark.parametrize(
+    ("key", "limit"),
+    [("nitrogen", 21), ("air", 13), ("helium", 10), ("hydrogen", 8.4), ("oxygen", 6.8), ("methane", 2.6)],
+)
 def test_where_the_ideal_law_keeps_half_a_per_cent(key: str, limit: float) -> None:
     """At 15 °C, bar (common practice, no source)."""
     real = find(key)

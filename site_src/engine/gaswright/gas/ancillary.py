@@ -4,7 +4,7 @@ Takes emitted coefficients; gives start values for the saturation solver, the bu
 and the melting pressure. The saturation solver and the phase decision come next.
 """
 
-from math import exp
+from math import exp, fsum
 
 from gaswright.gas.record import Ancillary, Equation
 
@@ -25,5 +25,5 @@ def melting_pressure(equation: Equation, T: float) -> float | None:
     """Return the melting pressure [Pa] at T [K]; None where the melting line of the gas is not known."""
     for T_from, T_to, p_0, T_0, shift, terms in equation.MELTING:
         if T_from <= T <= T_to:
-            return p_0 + sum(a * ((T / T_0 - shift) ** t - 1.0 + shift) for a, t in terms)
+            return p_0 + fsum(a * ((T / T_0 - shift) ** t - 1.0 + shift) for a, t in terms)
     return None

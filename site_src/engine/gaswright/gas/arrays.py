@@ -48,7 +48,9 @@ def _chunk(gas: Gas, p: "Numbers", T: "Numbers") -> "Numbers":
 
     found = np.full(p.shape, np.nan)
     if not gas.is_ideal and not gas.coefficients.NON_ANALYTIC:
-        plain = np.fromiter((_is_plain(gas, *state) for state in zip(p.tolist(), T.tolist(), strict=True)), bool, p.size)
+        plain = np.fromiter(
+            (_is_plain(gas, *state) for state in zip(p.tolist(), T.tolist(), strict=True)), bool, p.size
+        )
         found[plain] = _newton(gas, p[plain], T[plain]) * gas.molar_mass
     for place in np.flatnonzero(np.isnan(found)).tolist():
         found[place] = gas.density(float(p[place]), float(T[place]))
@@ -85,7 +87,7 @@ def _newton(gas: Gas, p: "Numbers", T: "Numbers") -> "Numbers":
         x = np.where(is_sound, x - step, x)
         if settled[is_sound].all():
             break
-    is_sound &= settled & ((T >= gas.T_c) | (x * scale < equation.RHO_CRITICAL))
+    is_sound &= settled & ((gas.T_c <= T) | (x * scale < equation.RHO_CRITICAL))
     return cast("Numbers", np.where(is_sound, x * scale, np.nan))
 
 

@@ -30,7 +30,7 @@ class Caloric(NamedTuple):
     entropy: float
 
 
-def caloric(  # noqa: PLR0913 - a state and its gas constant, molar mass and two parts
+def caloric(  # noqa: PLR0913, PLR0917 - a state and its gas constant, molar mass and two parts
     R: float, molar_mass: float, T: float, rho: float, part: Residual, ideal: tuple[float, float, float]
 ) -> Caloric:
     """Return the properties at T [K] and rho [mol/m3]; `ideal` is the ideal part and its two scaled slopes."""

@@ -60,4 +60,6 @@ class IdealGas(Gas):
 
     def uncertainty(self, p: float, T: float) -> Uncertainty:  # noqa: ARG002 - the same everywhere
         """Return zero: the law's own value; how far it is from the real gas is told by the real gas."""
-        return Uncertainty(float("inf"), float("inf"), 0.0, "the ideal gas law as it stands, without its departure from the real gas")
+        return Uncertainty(
+            float("inf"), float("inf"), 0.0, "the ideal gas law as it stands, without its departure from the real gas"
+        )

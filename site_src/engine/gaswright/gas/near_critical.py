@@ -67,7 +67,9 @@ def near_critical_full(rows: tuple[Row, ...], x: float, t: float) -> tuple[float
     return total, first, second, warm, warmer, mixed
 
 
-def _distance(a: float, beta: float, size: float, share: float, z: float, t: float) -> _Bend:
+def _distance(  # noqa: PLR0913, PLR0917 - four figures of a term and the state
+    a: float, beta: float, size: float, share: float, z: float, t: float
+) -> _Bend:
     y = z * z
     half = 0.5 / beta
     root = size * y ** (half - 1.0)

@@ -88,7 +88,7 @@ class Gas:
         p = molar_density * self.R * T * (1.0 + isotherm.slopes(x)[1])
         if check_phase:
             demand_pressure_limit(self.identity, self.coefficients, p)
-            demand_gas(self.identity, isotherm, p) if T >= self.T_c else None
+            demand_gas(self.identity, isotherm, p) if self.T_c <= T else None
         return p
 
     def pressure_drho(self, rho: float, T: float) -> float:
@@ -110,7 +110,7 @@ class Gas:
         molar = rho / self.molar_mass
         low = coldest_gas(self.coefficients, molar)
         T = solve_temperature(self._at, p, molar, low, self.T_max)
-        if abs(self.pressure(rho, T) / p - 1.0) > 1e-9:  # noqa: PLR2004 - the solver stopped at an end of the range
+        if abs(self.pressure(rho, T) / p - 1.0) > 1e-9:
             raise self._no_temperature(p, rho, low)
         return T
 
@@ -119,7 +119,7 @@ class Gas:
         return p / (self.molar_density(p, T) * self.R * T)
 
     def saturation_pressure(self, T: float) -> float | None:
-        """Return the pressure [Pa] above which the gas condenses at T [K]; None at and above the critical temperature."""
+        """Return the pressure [Pa] above which the gas condenses at T [K]; None from the critical temperature up."""
         isotherm = self._at(T)
         return None if self.T_c <= T else dew_pressure(isotherm)
 

@@ -30,7 +30,7 @@ class Saturation(NamedTuple):
 def saturation(isotherm: Isotherm) -> Saturation:
     """Return the saturation of a pure gas between its lowest and its critical temperature."""
     found = _from_curves(isotherm) or _from_spinodals(isotherm)
-    return found if found else _critical(isotherm)
+    return found or _critical(isotherm)
 
 
 def _from_curves(isotherm: Isotherm) -> Saturation | None:
