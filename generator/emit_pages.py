@@ -66,6 +66,7 @@ def draw_bodies(view: SiteView) -> Iterator[Body]:
     env = make_environment()
     env.globals["site"] = view
     env.globals["groups"] = group_sheets(view)
+    env.globals["formulas"] = {law.key: law.text for family in view.families for law in family.relations}
     env.globals["laws"] = frozenset(law.key for family in view.families for law in family.relations)
     yield Body("index.md", "home", "Gaswright", env.get_template("home.html").render(root=""))
     yield Body("sheets.md", "sheets", "Sheets", env.get_template("sheets.html").render(root=""))

@@ -33,6 +33,7 @@ class RowView:
     is_gas: bool = False
     is_found: bool = False
     is_text: bool = False
+    is_optional: bool = False
     choices: tuple[tuple[str, str], ...] = ()
 
 

@@ -112,7 +112,8 @@ function drawWorking(calculator: Calculator): HTMLElement[] {
   const plot = calculator.answer?.plot;
   const figure = make("figure", "", { class: "plot" });
   if (plot) figure.append(drawCurve(plot, 0));
-  return lines.length > 0 ? [make("h2", "Working"), steps, rule, ...(plot ? [figure] : [])] : [rule];
+  const formulas = make("p", `Formulas: ${calculator.section.dataset["formulas"] ?? ""}.`);
+  return lines.length > 0 ? [make("h2", "Working"), steps, formulas, rule, ...(plot ? [figure] : [])] : [formulas, rule];
 }
 
 function drawLines(facts: PaperFacts): HTMLElement {
