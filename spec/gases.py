@@ -239,7 +239,7 @@ SULFUR_HEXAFLUORIDE = Gas(
     ),
 )
 
-GASES = (
+ALL = (
     NITROGEN,
     OXYGEN,
     ARGON,

@@ -15,7 +15,7 @@ from CoolProp import CoolProp
 from gaswright.gas import Gas, find
 from gaswright.gas.arrays import density_array
 
-from spec.gases import GASES
+from spec.gases import ALL as GASES
 
 COUNT, ROUNDS = 1500, 5
 

@@ -21,7 +21,7 @@ def _stage() -> None:
     if find_spec("gaswright") is not None and find_spec("gaswright.gas") is not None:
         return
     from generator.gas_equations import emit_gas_modules  # noqa: PLC0415 - only where nothing is built
-    from spec.gases import GASES  # noqa: PLC0415 - only where nothing is built
+    from spec.gases import ALL as GASES  # noqa: PLC0415 - only where nothing is built
 
     folder = Path(tempfile.mkdtemp(prefix="gaswright-gas-"))
     package = folder / "gaswright"

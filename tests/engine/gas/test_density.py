@@ -23,8 +23,7 @@ def test_density_equals_the_library(key: str, full: bool, record_property: Calla
             near = max(near, error)
         else:
             worst = max(worst, error)
-    record_property("worst", worst)
-    record_property("near_critical", near)
+    record_property("figure", f"density of {key}: worst {worst:.1e}, within 1 % of the critical point {near:.1e}")
     assert worst <= EXACT
     assert near <= NEAR_CRITICAL
 

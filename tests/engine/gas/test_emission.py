@@ -8,7 +8,7 @@ from generator.errors import SpecError
 from generator.gas_equations import emit_gas_modules
 from generator.gas_slopes import Shape, slopes_text
 from generator.gas_terms import read_ideal, read_terms
-from spec.gases import GASES
+from spec.gases import ALL as GASES
 
 
 def test_unknown_residual_term_stops_the_build() -> None:

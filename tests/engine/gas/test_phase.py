@@ -2,6 +2,11 @@
 
 from __future__ import annotations
 
+import math
+from collections.abc import Callable
+from contextlib import suppress
+from random import Random
+
 import pytest
 from gaswright.errors import OutsideRangeError, ReadingError
 from gaswright.gas import Gas, find
@@ -9,11 +14,15 @@ from gaswright.gas import Gas, find
 from tests.engine.gas.support import KEYS, PURE, judge, phase, states
 
 
+def _given(call: Callable[[float, float], float], p: float, T: float) -> float | None:
+    """Return what the call gives, or None where it refuses by a named error."""
+    with suppress(OutsideRangeError, ReadingError):
+        return call(p, T)
+    return None
+
+
 def _is_given(gas: Gas, p: float, T: float) -> bool:
-    try:
-        return gas.density(p, T) > 0.0
-    except OutsideRangeError:
-        return False
+    return _given(gas.density, p, T) is not None
 
 
 @pytest.mark.parametrize("key", KEYS)
@@ -80,6 +89,22 @@ def test_outside_the_limits_of_the_equation(p: float, T: float, word: str) -> No
 def test_numbers_that_are_none_are_named(p: float, T: float) -> None:
     with pytest.raises(ReadingError, match="of Nitrogen"):
         find("nitrogen").density(p, T)
+
+
+@pytest.mark.parametrize("key", KEYS)
+def test_any_numbers_give_a_figure_or_a_named_error(key: str, full: bool) -> None:  # noqa: FBT001 - a fixture
+    gas = find(key)
+    random = Random(f"any {key}")  # noqa: S311 - the same numbers each time, no secret
+    edges = [gas.T_min, gas.T_c, gas.T_max, -1.0, 0.0, 5e-324, 1e308, float("nan"), float("inf"), gas.p_c, gas.p_max]
+    calls = [gas.density, gas.density_dT, gas.compressibility, gas.pressure, gas.pressure_dT, gas.temperature]
+    calls += [lambda p, T: gas.properties(p, T).joule_thomson, lambda p, _: gas.saturation_pressure(p) or 0.0]
+    for _ in range(10_000 if full else 1_000):
+        near = gas.p_c * (1 + random.choice([-1, 1]) * 10 ** random.uniform(-14, -1))
+        p = random.choice([random.choice(edges), near, 10 ** random.uniform(-3, 9.5)])
+        near = gas.T_c * (1 + random.choice([-1, 1]) * 10 ** random.uniform(-14, -1))
+        T = random.choice([random.choice(edges), near, random.uniform(0.9 * gas.T_min, 1.1 * gas.T_max)])
+        found = _given(random.choice(calls), p, T)
+        assert found is None or math.isfinite(found), (key, p, T)
 
 
 def test_temperature_of_a_liquid_density_is_refused() -> None:

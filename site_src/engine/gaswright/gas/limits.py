@@ -14,6 +14,7 @@ from gaswright.gas.solve_density import gas_root
 FAR_PRESSURE = 0.97
 FAR_DENSITY = 0.93
 ROUNDING = 1.0 + 1e-10
+LEAST, MOST = 1e-100, 1e100
 
 
 def celsius(T: float) -> str:
@@ -28,8 +29,8 @@ def bar(p: float) -> str:
 
 
 def demand_number(name: str, quantity: str, value: float, unit: str) -> None:
-    """Raise ReadingError unless `value` is a positive finite number."""
-    if not 0.0 < value < float("inf"):
+    """Raise ReadingError unless `value` is a positive number, neither so small nor so large that floats give out."""
+    if not LEAST < value < MOST:
         raise ReadingError(
             f"{quantity} of {name}",
             f"{value!r} {unit}",

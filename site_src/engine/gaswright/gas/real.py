@@ -5,6 +5,8 @@ exact derivatives, in SI, and refuses states where it is no gas.
 Relations, sheets and pages come next.
 """
 
+from math import isfinite
+
 from gaswright.errors import OutsideRangeError
 from gaswright.gas.caloric import Caloric, caloric
 from gaswright.gas.helmholtz import Isotherm
@@ -23,6 +25,8 @@ from gaswright.gas.record import Equation, Identity, Uncertainty
 from gaswright.gas.saturation import Saturation, saturation
 from gaswright.gas.solve_density import gas_root
 from gaswright.gas.temperature import coldest_gas, solve_temperature
+
+FLAT = 1e-12
 
 
 class Gas:
@@ -67,12 +71,12 @@ class Gas:
 
     def density_dp(self, p: float, T: float) -> float:
         """Return the slope of density with pressure at constant temperature [kg/(m3 Pa)]."""
-        return 1.0 / self.pressure_drho(self.density(p, T), T)
+        return 1.0 / self._stiffness(self.density(p, T), T)
 
     def density_dT(self, p: float, T: float) -> float:
         """Return the slope of density with temperature at constant pressure [kg/(m3 K)]."""
         rho = self.density(p, T)
-        return -self.pressure_dT(rho, T) / self.pressure_drho(rho, T)
+        return -self.pressure_dT(rho, T) / self._stiffness(rho, T)
 
     def pressure(self, rho: float, T: float) -> float:
         """Return the pressure [Pa] of the gas at density rho [kg/m3] and T [K]."""
@@ -86,6 +90,8 @@ class Gas:
             demand_gas_density(self.identity, isotherm, molar_density)
         x = molar_density / self.coefficients.RHO_REDUCING
         p = molar_density * self.R * T * (1.0 + isotherm.slopes(x)[1])
+        if not isfinite(p):
+            raise self._no_pressure(molar_density, T)
         if check_phase:
             demand_pressure_limit(self.identity, self.coefficients, p)
             demand_gas(self.identity, isotherm, p) if self.T_c <= T else None
@@ -131,6 +137,7 @@ class Gas:
     def properties(self, p: float, T: float) -> Caloric:
         """Return heat capacities, speed of sound and their kin at p [Pa] and T [K]."""
         rho = self.molar_density(p, T)
+        self._stiffness(rho * self.molar_mass, T)
         isotherm = self._at(T)
         x = rho / self.coefficients.RHO_REDUCING
         ideal = ideal_part(self.coefficients, x, isotherm.tau)
@@ -156,6 +163,18 @@ class Gas:
         self._isotherm = kept = Isotherm(self.coefficients, T)
         return kept
 
+    def _stiffness(self, rho: float, T: float) -> float:
+        """Return the slope of pressure with density [Pa m3/kg], refused where it is lost in rounding."""
+        slope = self.pressure_drho(rho, T)
+        if slope * self.molar_mass < FLAT * self.R * T:
+            raise OutsideRangeError(
+                self.title,
+                f"{celsius(T)} and {rho:,.6g} kg/m³, the critical point",
+                "a state away from the critical point, where a small change of pressure has a bounded effect",
+                "Enter a pressure or temperature a little different.",
+            )
+        return slope
+
     def _reduced(self, rho: float) -> float:
         return rho / self.molar_mass / self.coefficients.RHO_REDUCING
 
@@ -165,6 +184,14 @@ class Gas:
             f"{bar(p)} at {celsius(T)}, where the equation has no gas state",
             "a pressure at which a gas exists",
             "Enter a lower pressure or a higher temperature.",
+        )
+
+    def _no_pressure(self, molar_density: float, T: float) -> OutsideRangeError:
+        return OutsideRangeError(
+            self.title,
+            f"{molar_density * self.molar_mass:,.6g} kg/m³ at {celsius(T)}, far denser than any fluid",
+            "a density that the equation of state reaches",
+            "Check the density and its unit.",
         )
 
     def _no_temperature(self, p: float, rho: float, low: float) -> OutsideRangeError:
