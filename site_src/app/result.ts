@@ -32,8 +32,8 @@ export function drawAnswer(section: HTMLElement, answer: Answer): void {
   fill(slot("figure"), [figure.text, figure.unit].filter(Boolean).join(" "));
   fill(slot("best"), answer.best);
   drawVerdict(slot("verdict"), answer.verdict);
-  drawList(slot("warnings"), answer.warnings ?? [], "li");
-  if (answer.cautions) drawList(slot("cautions"), answer.cautions, "p");
+  drawWarnings(slot("warnings"), answer.warnings ?? []);
+  if (answer.cautions) drawCautions(slot("cautions"), answer.cautions);
   drawPairs(slot("extra"), answer.extra ?? []);
   drawPairs(slot("versus"), answer.versus ?? []);
   drawShares(slot("shares"), answer.shares ?? []);
@@ -48,8 +48,21 @@ function drawVerdict(place: HTMLElement, verdict: Answer["verdict"]): void {
   show(place, Boolean(verdict));
 }
 
-function drawList(place: HTMLElement, texts: readonly string[], tag: "li" | "p"): void {
-  place.replaceChildren(...texts.map((text) => make(tag, text)));
+function drawWarnings(place: HTMLElement, texts: readonly string[]): void {
+  place.replaceChildren(...texts.map((text) => make("li", text)));
+  show(place, texts.length > 0);
+}
+
+/** The first sentence, which says what can hurt, in bold. */
+function drawCautions(place: HTMLElement, texts: readonly string[]): void {
+  place.replaceChildren(
+    ...texts.map((text) => {
+      const end = text.indexOf(". ") + 1 || text.length;
+      const caution = make("p");
+      caution.append(make("b", text.slice(0, end)), text.slice(end));
+      return caution;
+    }),
+  );
   show(place, texts.length > 0);
 }
 
