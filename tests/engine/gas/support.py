@@ -75,10 +75,10 @@ def gas_states(key: str, count: int, seed: str) -> Iterator[tuple[Gas, CoolProp.
     raise AssertionError(message)
 
 
-def at_density(state: CoolProp.AbstractState, T: float) -> None:
-    """Set the library again at the density it has found and T [K], as a gas."""
+def at_density(state: CoolProp.AbstractState, T: float, molar_density: float | None = None) -> None:
+    """Set the library, as a gas, at T [K] and a density [mol/m3]; without one, at the density it has found."""
     state.specify_phase(CoolProp.iphase_gas)
-    state.update(CoolProp.DmolarT_INPUTS, state.rhomolar(), T)
+    state.update(CoolProp.DmolarT_INPUTS, state.rhomolar() if molar_density is None else molar_density, T)
     state.unspecify_phase()
 
 

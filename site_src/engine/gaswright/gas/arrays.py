@@ -12,6 +12,7 @@ from typing import TYPE_CHECKING, Any, cast
 from gaswright.gas.ancillary import along_saturation, melting_pressure
 from gaswright.gas.cubic import peng_robinson_density
 from gaswright.gas.limits import FAR_PRESSURE
+from gaswright.gas.near_critical import near_critical
 from gaswright.gas.real import Gas
 from gaswright.gas.record import Equation, Row
 
@@ -47,7 +48,7 @@ def _chunk(gas: Gas, p: "Numbers", T: "Numbers") -> "Numbers":
     import numpy as np  # noqa: PLC0415 - the engine starts without it
 
     found = np.full(p.shape, np.nan)
-    if not gas.is_ideal and not gas.coefficients.NON_ANALYTIC:
+    if not gas.is_ideal:
         plain = np.fromiter(
             (_is_plain(gas, *state) for state in zip(p.tolist(), T.tolist(), strict=True)), bool, p.size
         )
@@ -75,13 +76,14 @@ def _newton(gas: Gas, p: "Numbers", T: "Numbers") -> "Numbers":
 
     equation = gas.coefficients
     scale = equation.RHO_REDUCING
-    k = equation.gather(cast("list[float]", _temperature_parts(equation, equation.T_REDUCING / T)))
+    tau = equation.T_REDUCING / T
+    k = equation.gather(cast("list[float]", _temperature_parts(equation, tau)))
     target = p / (scale * equation.R * T)
     starts = (peng_robinson_density(equation, *state) for state in zip(p.tolist(), T.tolist(), strict=True))
     x = np.fromiter(starts, float, p.size) / scale
     is_sound, settled = np.ones(p.shape, bool), np.zeros(p.shape, bool)
     for _ in range(STEPS):
-        step, rise = _step(equation, x, k, target)
+        step, rise = _step(equation, x, tau, k, target)
         is_sound &= rise > 0.0
         settled = np.abs(step) < CLOSE * x
         x = np.where(is_sound, x - step, x)
@@ -91,12 +93,16 @@ def _newton(gas: Gas, p: "Numbers", T: "Numbers") -> "Numbers":
     return cast("Numbers", np.where(is_sound, x * scale, np.nan))
 
 
-def _step(equation: Equation, x: "Numbers", k: Row, target: "Numbers") -> "tuple[Numbers, Numbers]":
+def _step(equation: Equation, x: "Numbers", tau: "Numbers", k: Row, target: "Numbers") -> "tuple[Numbers, Numbers]":
+    """Return Newton's step of the reduced density and the slope of the reduced pressure."""
     import numpy as np  # noqa: PLC0415 - the engine starts without it
 
-    slopes = cast("Any", equation.slopes)
+    slopes, near = cast("Any", equation.slopes), cast("Any", near_critical)
     with np.errstate(all="ignore"):
         _, b, c = slopes(x, k, np.exp)
+        if equation.NON_ANALYTIC:
+            _, first, second = near(equation.NON_ANALYTIC, x, tau, np.exp)
+            b, c = b + first, c + second
         rise = 1.0 + b + b + c
         return (x * (1.0 + b) - target) / rise, rise
 

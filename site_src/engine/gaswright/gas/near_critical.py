@@ -8,6 +8,7 @@ y = (x - 1)^2 (R. Span and W. Wagner, J. Phys. Chem. Ref. Data 25 (1996) 1509, t
 so that nothing divides by x - 1.
 """
 
+from collections.abc import Callable
 from math import exp
 from typing import NamedTuple
 
@@ -26,8 +27,8 @@ class _Bend(NamedTuple):
     theta_x: float
 
 
-def near_critical(rows: tuple[Row, ...], x: float, t: float) -> Slopes:
-    """Return the sum of the terms, x times its slope and x^2 times its second slope."""
+def near_critical(rows: tuple[Row, ...], x: float, t: float, exp: Callable[[float], float] = exp) -> Slopes:
+    """Return the sum of the terms, x times its slope and x^2 times its second slope; arrays with their own exp."""
     total = first = second = 0.0
     z = x - 1.0
     for n, a, b, beta, size, share, width, height in rows:
@@ -75,7 +76,7 @@ def _distance(  # noqa: PLR0913, PLR0917 - four figures of a term and the state
     root = size * y ** (half - 1.0)
     theta = (1.0 - t) + root * y
     hill = share * y ** (a - 1.0)
-    value = max(theta * theta + hill * y, LEAST)
+    value = theta * theta + hill * y + LEAST
     over = 2.0 * theta * (2.0 * half * root) + 2.0 * a * hill
     inner = 2.0 * (2.0 * half * root) ** 2 * y + 2.0 * theta * 4.0 * half * (half - 1.0) * root
     return _Bend(value, z * over, over + inner + 4.0 * a * (a - 1.0) * hill, theta, 2.0 * half * root * z)

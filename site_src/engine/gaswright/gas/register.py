@@ -5,7 +5,6 @@ Readings, sheets and the command line come next. An equation is imported when it
 """
 
 import re
-from difflib import get_close_matches
 from functools import cache
 from importlib import import_module
 from typing import cast
@@ -53,6 +52,8 @@ def _named(rest: str) -> set[str]:
 
 
 def _unknown(name: str, rest: str) -> ReadingError:
+    from difflib import get_close_matches  # noqa: PLC0415 - only where a name is wrong
+
     owners = {spelling: who.title for who in IDENTITIES for spelling in sorted(_spellings(who))}
     near = get_close_matches(rest, owners, n=6, cutoff=0.5)
     offers = tuple(dict.fromkeys(owners[spelling] for spelling in near))[:3]
