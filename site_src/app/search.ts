@@ -24,8 +24,11 @@ const root = document.documentElement.dataset["root"] ?? "";
 export function startSearch(): void {
   const field = find<HTMLInputElement>(document, "#search");
   const hits = find<HTMLElement>(document, "#search-hits");
-  field.addEventListener("focus", loadEntries, { once: true });
-  field.addEventListener("input", () => draw(field.value, hits));
+  field.addEventListener("focus", loadEntries);
+  field.addEventListener("input", () => {
+    loadEntries();
+    draw(field.value, hits);
+  });
   for (const element of [field, hits]) {
     element.addEventListener("keydown", (event) => {
       if (event.key === "Escape") close(field, hits);
@@ -37,10 +40,14 @@ export function startSearch(): void {
   });
 }
 
+let isLoading = false;
 let index: MiniSearch<Entry> | undefined;
 let redraw: () => void = () => undefined;
 
+/** Once; a field may be typed into without ever being told that it has the focus. */
 function loadEntries(): void {
+  if (isLoading) return;
+  isLoading = true;
   const script = make("script", "", { src: `${root}search/entries.js` });
   script.addEventListener("load", () => {
     index = new MiniSearch<Entry>({

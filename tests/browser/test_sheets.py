@@ -131,6 +131,7 @@ def test_first_own_reading_clears_the_example(tab: Tab) -> None:
     open_view(tab, ADDRESS)
     assert tab.value(KEY + "-pg_start") != ""
     tab.type(KEY + "-count", "3")
+    tab.type(KEY + "-V_each", "50")
     assert tab.value(KEY + "-pg_start") == ""
     assert tab.value(KEY + "-pg_start-unit") == "bar"
     assert tab.value(KEY + "-gas") == ""
