@@ -13,7 +13,8 @@ const ASK_MS = 120;
 export interface Surroundings {
   site(): Site | null;
   instruments(): Record<string, Instrument>;
-  decimal(): string;
+  /** The decimal mark of the page; nothing while none was chosen, and an ambiguous number is asked about. */
+  decimal(): string | null;
 }
 
 export class Calculator {
@@ -144,8 +145,10 @@ export class Calculator {
     const isKept = row.text !== "" && (row.from !== "preset" || row.confirmed);
     if (!answer?.figure || isKept) return;
     const exact = answer.figure?.exact;
-    if (exact) row.put(exact.text, exact.unit, exact.reference ?? "");
-    else if (typeof answer.value === "number" && row.offersUnit(answer.unit ?? "")) row.put(String(answer.value), answer.unit ?? "", "");
+    const mark = this.#around.decimal() ?? ".";
+    const unit = answer.unit ?? "";
+    if (exact) row.put(exact.text.replace(".", mark), exact.unit, exact.reference ?? "");
+    else if (typeof answer.value === "number" && row.offersUnit(unit)) row.put(String(answer.value).replace(".", mark), unit, "");
     else return;
     row.from = "preset";
     row.confirmed = false;

@@ -7,7 +7,8 @@ import { find } from "./dom";
 /** The page stays as drawn, with its worked example, until something is typed or chosen. */
 export function startLaw(section: HTMLElement): void {
   const decimal = find<HTMLSelectElement>(section, "#decimal");
-  const calculator = new Calculator(section, { site: () => null, instruments: () => ({}), decimal: () => decimal.value });
+  const around = { site: () => null, instruments: () => ({}), decimal: () => decimal.value || null };
+  const calculator = new Calculator(section, around);
   let isTouched = false;
   calculator.takeDrawn();
   calculator.overlay = (state) => (isTouched ? state : "example");

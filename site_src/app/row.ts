@@ -2,7 +2,8 @@
 // calculator.ts comes next.
 
 import { all, fill, find, make, maybe, show, turnSign } from "./dom";
-import type { Figure, Reading, RowAnswer } from "./shapes";
+import { drawOffers } from "./offers";
+import type { Figure, Offer, Reading, RowAnswer } from "./shapes";
 
 export type From = "" | "read" | "site" | "preset";
 
@@ -202,13 +203,13 @@ export class Row {
     if (this.#found.textContent !== text) this.#found.textContent = text;
   }
 
-  /** Draws what the engine says about this row; `onOffer` takes the text of an offer that was pressed. */
-  say(answer: RowAnswer, onOffer?: (text: string) => void): void {
+  /** Draws what the engine says about this row. */
+  say(answer: RowAnswer): void {
     this.said = answer;
     this.element.dataset["rowState"] = answer.state ?? "";
     this.#field.setAttribute("aria-invalid", String(answer.state === "error"));
     fill(find(this.element, ".says"), answer.says);
-    this.#offer(answer.offers ?? [], onOffer);
+    drawOffers(find(this.element, ".offers"), answer.offers ?? [], (offer) => this.#take(offer));
     this.showWhere();
   }
 
@@ -231,23 +232,10 @@ export class Row {
     return this.said.by || this.#plainBy;
   }
 
-  #offer(offers: { text: string }[], onOffer?: (text: string) => void): void {
-    const place = find(this.element, ".offers");
-    place.replaceChildren(
-      ...offers.map(({ text }) => {
-        const button = make("button", text, { type: "button" });
-        button.addEventListener("click", () => this.#take(text, onOffer));
-        return button;
-      }),
-    );
-    show(place, offers.length > 0);
-  }
-
-  #take(text: string, onOffer?: (text: string) => void): void {
-    this.#field.value = text;
+  #take({ text, unit = "", reference = "" }: Offer): void {
+    this.put(text, unit, reference);
     this.#field.focus();
     this.#announce();
-    onOffer?.(text);
   }
 
   #turn(): void {

@@ -35,11 +35,18 @@ export interface Site {
 
 export type SiteQuantity = "station_pressure" | "air_temperature" | "reference_temperature" | "reference_pressure";
 
+/** A reading that may have been meant; what it does not name stays as it is. */
+export interface Offer {
+  text: string;
+  unit?: string;
+  reference?: string;
+}
+
 export interface RowAnswer {
   state?: "ok" | "empty" | "error" | "question" | "default" | "find";
   says?: string;
   si?: string;
-  offers?: { text: string }[];
+  offers?: Offer[];
   by?: string;
 }
 

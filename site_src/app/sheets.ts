@@ -18,8 +18,8 @@ export async function startSheets(): Promise<void> {
   const site = new SiteForm(store);
   const instruments = new Instruments(store);
   const decimal = find<HTMLSelectElement>(document, "#decimal");
-  site.decimal = () => decimal.value;
-  const around: Surroundings = { site: () => site.get(), instruments: () => instruments.get(), decimal: () => decimal.value };
+  site.decimal = () => decimal.value || null;
+  const around: Surroundings = { site: () => site.get(), instruments: () => instruments.get(), decimal: () => decimal.value || null };
   const sections = all<HTMLElement>(document, ".calculator");
   const sheets = sections.map((section) => new Sheet(section, around, store, site, instruments));
   const day = new Day(sheets, site, instruments);
@@ -46,7 +46,7 @@ export async function startSheets(): Promise<void> {
   });
   addEventListener("hashchange", () => day.open(true));
   addEventListener("beforeprint", () => (day.current ? day.current.print() : emptyPaper()));
-  addEventListener("pagehide", () => sheets.forEach((sheet) => void sheet.save()));
+  for (const leaving of ["pagehide", "visibilitychange"]) addEventListener(leaving, () => sheets.forEach((sheet) => void sheet.save()), true);
   setInterval(() => day.tick(), MINUTE_MS);
   day.open(false);
   document.documentElement.dataset["ready"] = "";

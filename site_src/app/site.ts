@@ -2,8 +2,9 @@
 // sheets.ts comes next.
 
 import { endOfShift, hours, isOld, stamp, toStandard } from "./clock";
-import { all, fill, find, make, maybe, settle, show, turnSign } from "./dom";
+import { all, fill, find, settle, turnSign } from "./dom";
 import { ask } from "./engine";
+import { drawOffers } from "./offers";
 import { drawState } from "./result";
 import type { Reading, RowAnswer, Site, SiteQuantity } from "./shapes";
 import type { SiteFields, Store } from "./store";
@@ -21,7 +22,7 @@ type Field = HTMLInputElement | HTMLSelectElement;
 
 export class SiteForm {
   onChange: () => void = () => undefined;
-  decimal: () => string = () => ".";
+  decimal: () => string | null = () => null;
   readonly #section = find<HTMLElement>(document, "#sheet-site");
   readonly #store: Store;
   readonly #fields: Field[];
@@ -157,19 +158,7 @@ export class SiteForm {
     const isTrouble = answer.state === "error" || answer.state === "question";
     row.dataset["rowState"] = answer.state ?? "";
     fill(find(row, ".says"), isTrouble ? answer.says : "");
-    this.#offer(row, name, isTrouble ? (answer.offers ?? []) : []);
-  }
-
-  #offer(row: HTMLElement, name: SiteQuantity, offers: { text: string }[]): void {
-    const place = maybe<HTMLElement>(row, ".offers");
-    place?.replaceChildren(
-      ...offers.map(({ text }) => {
-        const button = make("button", text, { type: "button" });
-        button.addEventListener("click", () => this.#take(name, text));
-        return button;
-      }),
-    );
-    show(place, offers.length > 0);
+    drawOffers(find(row, ".offers"), isTrouble ? (answer.offers ?? []) : [], ({ text }) => this.#take(name, text));
   }
 
   #take(name: SiteQuantity, text: string): void {
