@@ -278,6 +278,32 @@ def test_search_leads_to_a_sheet_from_a_page_below(tab: Tab) -> None:
     tab.wait_text("#bank_endurance h1", "Time to changeover")
 
 
+def test_refused_store_is_said_and_calculating_goes_on(site: Path, playwright: Playwright) -> None:
+    """Where the browser keeps nothing, the page says so instead of losing readings in silence."""
+    browser = playwright.chromium.launch(executable_path=str(find_chromium()), args=list(FLAGS))
+    page = browser.new_page()
+    page.add_init_script("IDBFactory.prototype.open = () => { throw new DOMException('switched off') }")
+    page.goto(f"{(site / 'sheets.html').as_uri()}#bank_endurance")
+    page.locator("#store-trouble:visible").wait_for()
+    said = page.locator("#store-trouble").inner_text()
+    page.locator(KEY + "-count").fill("3")
+    page.locator(f'{SHEET}[data-state="empty"], {SHEET}[data-state="incomplete"]').wait_for(timeout=START_S * 1000)
+    browser.close()
+    assert "keeps nothing" in said
+    assert "switched off" in said
+
+
+def test_without_scripts_the_page_says_so_and_shows_its_example(site: Path, playwright: Playwright) -> None:
+    """In a zip preview nothing runs; the sheet that the address names is shown all the same."""
+    browser = playwright.chromium.launch(executable_path=str(find_chromium()), args=list(FLAGS))
+    page = browser.new_page(java_script_enabled=False)
+    page.goto(f"{(site / 'sheets.html').as_uri()}#bank_endurance")
+    assert page.get_by_text("Scripts are switched off here.").is_visible()
+    assert page.locator(f"{SHEET} [data-figure]").is_visible()
+    assert not page.locator("#sheet-locked_in").is_visible()
+    browser.close()
+
+
 @pytest.mark.parametrize("key", ["bank_endurance", "cylinder_receipt", "locked_in"])
 def test_sheet_prints_on_one_page(site: Path, playwright: Playwright, tmp_path: Path, key: str) -> None:
     """Readings as typed and in SI, figure, rule, version, time with offset and two lines to sign, on one A4 page."""
