@@ -298,7 +298,7 @@ def test_without_scripts_the_page_says_so_and_shows_its_example(site: Path, play
     browser = playwright.chromium.launch(executable_path=str(find_chromium()), args=list(FLAGS))
     page = browser.new_page(java_script_enabled=False)
     page.goto(f"{(site / 'sheets.html').as_uri()}#bank_endurance")
-    assert page.get_by_text("Scripts are switched off here.").is_visible()
+    assert page.locator("noscript p").is_visible()
     assert page.locator(f"{SHEET} [data-figure]").is_visible()
     assert not page.locator("#sheet-locked_in").is_visible()
     browser.close()
