@@ -7,6 +7,7 @@ Takes the ``SiteView`` and the folder ``site_src``; gives a folder of HTML, CSS 
 import json
 import logging
 from collections.abc import Iterator
+from contextlib import contextmanager
 from pathlib import Path
 from typing import NamedTuple
 
@@ -14,10 +15,12 @@ from jinja2 import Environment, FileSystemLoader, StrictUndefined
 from mkdocs.commands.build import build
 from mkdocs.config import load_config
 from mkdocs.config.defaults import MkDocsConfig
+from mkdocs.exceptions import Abort
 from mkdocs.plugins import BasePlugin
 from mkdocs.structure.files import File, Files
 from mkdocs.structure.pages import Page
 
+from generator.errors import SpecError
 from generator.search_entries import write_entries
 from generator.views import SheetView, SiteView
 
@@ -48,12 +51,48 @@ def emit_pages(view: SiteView, site_src: Path, out: Path) -> None:
     """Write all pages and their styles to ``out``, which is emptied first.
 
     Raises:
-        mkdocs.exceptions.Abort: a page links to nothing, or a template names a value that is not there.
+        ExceptionGroup of SpecError: one for each warning of mkdocs, such as a page that links to nothing.
     """
     config = load_config(str(site_src / "mkdocs.yml"), site_dir=str(out), extra=frame_values(view))
     config.plugins["pages"] = PagesPlugin(tuple(draw_bodies(view)), write_entries(view))
-    logging.getLogger("mkdocs").setLevel(logging.WARNING)
-    build(config)
+    with collect_warnings() as warnings:
+        try:
+            build(config)
+        except Abort as stopped:
+            raise ExceptionGroup("pages", [tell_warning(text) for text in warnings or [str(stopped)]]) from None
+
+
+class WarningKeeper(logging.Handler):
+    """Keeps the texts of what is logged."""
+
+    def __init__(self, level: int) -> None:
+        """Start with nothing kept."""
+        super().__init__(level)
+        self.texts: list[str] = []
+
+    def emit(self, record: logging.LogRecord) -> None:
+        """Keep one text."""
+        self.texts.append(record.getMessage())
+
+
+@contextmanager
+def collect_warnings() -> Iterator[list[str]]:
+    """Give the warnings of mkdocs as they come, and keep them and its chatter off the terminal."""
+    keeper = WarningKeeper(logging.WARNING)
+    logger = logging.getLogger("mkdocs")
+    logger.addHandler(keeper)
+    propagate, logger.propagate = logger.propagate, False
+    try:
+        yield keeper.texts
+    finally:
+        logger.removeHandler(keeper)
+        logger.propagate = propagate
+
+
+def tell_warning(text: str) -> SpecError:
+    """A warning of mkdocs as an error in four parts."""
+    todo = "Correct the page in site_src/pages, or the template in generator/templates."
+    return SpecError("pages", text, "pages that mkdocs writes without a warning", todo)
 
 
 def frame_values(view: SiteView) -> dict[str, object]:
