@@ -41,6 +41,7 @@ export class Calculator {
     section.addEventListener("input", (event) => this.#changed(event.target));
     section.addEventListener("confirmed", () => this.#changed(null));
     maybe(section, "[data-foot]")?.addEventListener("click", () => this.#jump());
+    new IntersectionObserver((seen) => this.#watchBox(seen)).observe(find(section, ".stamp"));
   }
 
   get find(): string {
@@ -160,6 +161,11 @@ export class Calculator {
     const sorted = [...this.rows].sort((one, two) => Number(one.isFound) - Number(two.isFound) || one.order - two.order);
     const place = find(this.section, ".rows");
     place.append(...sorted.map((row) => row.element));
+  }
+
+  /** The bar at the foot stands in for the box while that is out of sight. */
+  #watchBox(seen: IntersectionObserverEntry[]): void {
+    this.section.toggleAttribute("data-away", !seen.at(-1)?.isIntersecting);
   }
 
   #jump(): void {

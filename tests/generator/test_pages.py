@@ -24,7 +24,7 @@ FIXED_POLICY = (
     "script-src 'self' 'wasm-unsafe-eval' blob:; worker-src blob:; connect-src blob:"
 )
 LOADING = {"src", "href", "srcset", "poster", "data", "action", "formaction"}
-ADDED_BY_PACK = {"app/page.js"}
+ADDED_BY_PACK = {"app/page.js", "notices.txt"}
 
 
 @pytest.fixture(scope="module")
