@@ -3,11 +3,12 @@
 
 import { all, find, maybe, settle } from "./dom";
 import { ask } from "./engine";
-import { drawAnswer, drawState } from "./result";
+import { drawAnswer, drawSi, drawState } from "./result";
 import { Row } from "./row";
 import type { Answer, Instrument, Reading, ShownState, Site } from "./shapes";
 
 const ASK_MS = 120;
+const PATIENCE_MS = 400;
 
 /** What a calculator takes from its surroundings. */
 export interface Surroundings {
@@ -31,6 +32,8 @@ export class Calculator {
   readonly #around: Surroundings;
   readonly #askSoon = settle(() => void this.ask(), ASK_MS);
   #turn = 0;
+  #isWaiting = false;
+  #patience: ReturnType<typeof setTimeout> | undefined;
 
   constructor(section: HTMLElement, around: Surroundings) {
     this.section = section;
@@ -52,10 +55,10 @@ export class Calculator {
     return this.rows.find((row) => row.isFound);
   }
 
-  /** Takes the answer that the page was drawn with. */
+  /** Takes the answer that the page was drawn with, and adds what only a script can draw. */
   takeDrawn(): void {
     const drawn = this.section.dataset["answer"];
-    if (drawn) this.answer = JSON.parse(drawn) as Answer;
+    if (drawn) this.draw(JSON.parse(drawn) as Answer);
   }
 
   row(name: string): Row | undefined {
@@ -75,11 +78,18 @@ export class Calculator {
     this.#sort();
   }
 
+  /** Whether the figure shown is not that of the readings shown, because the engine still works. */
+  get isWaiting(): boolean {
+    return this.#isWaiting;
+  }
+
   askSoon(): void {
+    this.#wait();
     this.#askSoon();
   }
 
   async ask(): Promise<void> {
+    this.#wait();
     const turn = ++this.#turn;
     const asked = this.#request();
     try {
@@ -94,9 +104,13 @@ export class Calculator {
 
   draw(answer: Answer): void {
     this.answer = answer;
+    this.#isWaiting = false;
+    clearTimeout(this.#patience);
+    this.section.removeAttribute("data-waiting");
     drawAnswer(this.section, answer);
     for (const row of this.rows) row.say(answer.rows?.[row.name] ?? {});
     this.foundRow?.showFigure(answer.figure);
+    drawSi(this.section, this.rows);
     this.showState();
     this.onAnswer();
   }
@@ -106,6 +120,17 @@ export class Calculator {
     if (!this.answer) return;
     const state = this.overlay(this.answer.state);
     drawState(this.section, state, state === "incomplete" ? this.#missing() : "");
+  }
+
+  /** An old figure is not left standing beside new readings; a quick answer does not make it blink. */
+  #wait(): void {
+    this.#isWaiting = true;
+    clearTimeout(this.#patience);
+    this.#patience = setTimeout(() => {
+      this.section.setAttribute("data-waiting", "");
+      find(this.section, "[data-state-word]").textContent = "Calculating";
+      find(this.section, "[data-state-says]").textContent = "The figure follows; readings are kept.";
+    }, PATIENCE_MS);
   }
 
   #missing(): string {
@@ -136,8 +161,8 @@ export class Calculator {
     const row = this.rows.find((each) => each.owns(target));
     row?.takeTyped();
     this.rows.forEach((each) => each.showWhere());
-    this.onChange(row);
     this.askSoon();
+    this.onChange(row);
   }
 
   /** The row that was found becomes a reading that holds the figure at full precision, unless something stands there. */

@@ -10,8 +10,8 @@ export function startLaw(section: HTMLElement): void {
   const around = { site: () => null, instruments: () => ({}), decimal: () => decimal.value || null };
   const calculator = new Calculator(section, around);
   let isTouched = false;
-  calculator.takeDrawn();
   calculator.overlay = (state) => (isTouched ? state : "example");
+  calculator.takeDrawn();
   calculator.onChange = () => {
     isTouched = true;
   };

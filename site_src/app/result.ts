@@ -3,7 +3,7 @@
 
 import { all, draw, fill, find, make, maybe, show } from "./dom";
 import { drawPlot } from "./plot";
-import type { Answer, ShownState, WorkingLine } from "./shapes";
+import type { Answer, RowAnswer, ShownState, WorkingLine } from "./shapes";
 
 const WORDS: Record<ShownState, [string, string]> = {
   example: ["Worked example", "Invented readings of the demo works."],
@@ -108,6 +108,20 @@ function drawLine(line: WorkingLine): HTMLLIElement {
   const isKnown = line.relation !== undefined && known.includes(line.relation);
   item.append(isKnown ? make("a", line.title, { href: `${root}laws/${line.relation}.html` }) : make("em", line.title));
   return item;
+}
+
+/** The readings in SI, folded away until someone wants them. */
+export function drawSi(section: HTMLElement, rows: readonly { title: string; typed: string; said: RowAnswer }[]): void {
+  const place = find(section, "[data-si]");
+  const known = rows.filter(({ said }) => said.si);
+  find(place, "tbody").replaceChildren(
+    ...known.map(({ title, typed, said }) => {
+      const row = make("tr");
+      row.append(make("th", title, { scope: "row" }), make("td", typed), make("td", said.si));
+      return row;
+    }),
+  );
+  show(place, known.length > 0);
 }
 
 function drawFoot(section: HTMLElement, answer: Answer): void {

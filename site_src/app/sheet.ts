@@ -32,8 +32,8 @@ export class Sheet {
     this.#site = site;
     this.#instruments = instruments;
     this.calculator = new Calculator(section, around);
-    this.calculator.takeDrawn();
     this.calculator.overlay = (state) => this.#overlay(state);
+    this.calculator.takeDrawn();
     this.calculator.onChange = (row) => this.#changed(row !== undefined, row?.name);
     this.calculator.onAnswer = () => this.#answered();
     this.#listen();
@@ -214,6 +214,7 @@ export class Sheet {
   #obstacle(): string {
     const state = this.calculator.answer?.state;
     if (this.#isExample) return "An example is not signed.";
+    if (this.calculator.isWaiting) return "Still calculating.";
     if (!this.calculator.asked || (state !== "answer" && state !== "warning")) return "There is no figure to sign yet.";
     if (this.#site.isStale()) return "The site conditions are older than 12 h: read them again before signing.";
     const waiting = this.calculator.rows.filter((row) => row.waitsForConfirmation).map((row) => row.title);

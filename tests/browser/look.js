@@ -39,7 +39,7 @@
     if (size < leastText - 0.01) found.small.push(`${name(element)} ${size}px`);
     if (ratio < leastContrast) found.faint.push(`${name(element)} ${ratio.toFixed(2)}:1`);
   }
-  for (const element of document.querySelectorAll("a[href], button, input:not([type=hidden]), select")) {
+  for (const element of document.querySelectorAll("a[href], button, summary, input:not([type=hidden]), select")) {
     if (!seen(element)) continue;
     const target = element.type === "radio" ? element.closest("label") : element;
     const {width, height} = target.getBoundingClientRect();
