@@ -22,11 +22,11 @@ WIDTH = 110
 
 def emit_relations(families: tuple[Family, ...], python: Mapping[str, str]) -> Mapping[str, str]:
     """Give the text of every relations module by path, from the Python text of each relation by key."""
-    modules = {f"gaswright/relations/{family.key}.py": _family(family, python) for family in families}
+    modules = {f"gaswright/laws/{family.key}.py": _family(family, python) for family in families}
     return {
         **modules,
-        "gaswright/relations/__init__.py": '"""The relations of the trade, one module per family. Generated."""\n',
-        "gaswright/relations/index.py": _index(families),
+        "gaswright/laws/__init__.py": '"""The relations of the trade, one module per family. Generated."""\n',
+        "gaswright/laws/index.py": _index(families),
     }
 
 

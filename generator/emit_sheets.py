@@ -12,12 +12,12 @@ from spec.model import Find, Row, Sheet
 def emit_sheets(routed: Routed) -> Mapping[str, str]:
     """Give the text of every sheet module and of their index, by path."""
     sheets = routed.checked.loaded.sheets
-    modules = {f"gaswright/sheets/{sheet.key}.py": _module(sheet, routed.routes[sheet.key]) for sheet in sheets}
+    modules = {f"gaswright/jobs/{sheet.key}.py": _module(sheet, routed.routes[sheet.key]) for sheet in sheets}
     titles = "\n".join(f"    {sheet.key!r}: {sheet.title!r}," for sheet in sheets)
     return {
         **modules,
-        "gaswright/sheets/__init__.py": '"""The job sheets, one module each. Generated."""\n',
-        "gaswright/sheets/index.py": f'"""The sheets and their titles, in the order of a day. Generated."""\n\nTITLE_OF = {{\n{titles}\n}}\n',
+        "gaswright/jobs/__init__.py": '"""The job sheets, one module each. Generated."""\n',
+        "gaswright/jobs/index.py": f'"""The sheets and their titles, in the order of a day. Generated."""\n\nTITLE_OF = {{\n{titles}\n}}\n',
     }
 
 

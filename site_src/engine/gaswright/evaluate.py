@@ -1,7 +1,7 @@
 """Work out one unknown of one relation from SI values, and refuse what is not an answer.
 
 Takes a relation, an unknown and SI values; gives a finite SI value of the right sign, or a named error.
-gaswright.solve and gaswright.network both go through here.
+gaswright.law and gaswright.network both go through here.
 """
 
 import math

@@ -7,8 +7,8 @@ from importlib import import_module
 
 from gaswright.errors import ReadingError
 from gaswright.model import Relation, Sheet
-from gaswright.relations.index import FAMILY_OF
-from gaswright.sheets.index import TITLE_OF as SHEET_TITLES
+from gaswright.laws.index import FAMILY_OF
+from gaswright.jobs.index import TITLE_OF as SHEET_TITLES
 
 _relations: dict[str, Relation] = {}
 
@@ -18,7 +18,7 @@ def relation(key: str) -> Relation:
     if key not in _relations:
         if key not in FAMILY_OF:
             raise _unknown("law", key, tuple(FAMILY_OF))
-        _relations.update(import_module(f"gaswright.relations.{FAMILY_OF[key]}").RELATIONS)
+        _relations.update(import_module(f"gaswright.laws.{FAMILY_OF[key]}").RELATIONS)
     return _relations[key]
 
 
@@ -26,7 +26,7 @@ def sheet(key: str) -> Sheet:
     """Give the sheet with this key; ReadingError names the nearest keys where there is none."""
     if key not in SHEET_TITLES:
         raise _unknown("sheet", key, tuple(SHEET_TITLES))
-    found: Sheet = import_module(f"gaswright.sheets.{key}").SHEET
+    found: Sheet = import_module(f"gaswright.jobs.{key}").SHEET
     return found
 
 

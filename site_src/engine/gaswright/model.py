@@ -1,6 +1,6 @@
 """The shapes of what the spec became: variables, forms, relations, sheets.
 
-Emitted modules build these; gaswright.solve and gaswright.network work with them. NamedTuples, because they are made
+Emitted modules build these; gaswright.law and gaswright.network work with them. NamedTuples, because they are made
 at start-up in the browser, where each class costs time.
 """
 

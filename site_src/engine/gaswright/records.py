@@ -1,0 +1,30 @@
+"""The shapes of the unit and kind tables.
+
+Emitted gaswright.tables builds these.
+"""
+
+from typing import NamedTuple
+
+
+class Unit(NamedTuple):
+    """A unit: ``SI value = (reading + zero) * factor``; exponents of kg, m, s, K, mol; its UCUM code."""
+
+    key: str
+    factor: float
+    zero: float
+    exponents: tuple[float, ...]
+    ucum: str
+
+
+class Kind(NamedTuple):
+    """A kind of quantity: SI unit, units offered, range in SI, how a pressure is counted, what a reading needs."""
+
+    key: str
+    title: str
+    si: str
+    units: tuple[str, ...]
+    low: float
+    high: float
+    reference: str
+    note: str
+    exponents: tuple[float, ...]

@@ -1,0 +1,114 @@
+"""Show numbers as a figure to sign: no finer than the uncertainty, rounded to the safe side.
+
+Takes values in the unit shown; gives text. gaswright.answer comes next.
+"""
+
+import math
+
+THIN = "\u202f"
+MINUS = "−"
+SUPERSCRIPTS = str.maketrans("0123456789-", "⁰¹²³⁴⁵⁶⁷⁸⁹⁻")
+GUARD = 1e-9
+PLAIN_LOW, PLAIN_HIGH = 1e-4, 1e9
+
+
+def number(value: float, decimals: int, mark: str = ".") -> str:
+    """Give ``value`` with ``decimals`` places, digits before the mark in threes from 10 000 on."""
+    text = f"{abs(value):.{max(decimals, 0)}f}"
+    whole, _, rest = text.partition(".")
+    if len(whole) > 4:  # noqa: PLR2004 - four digits read well without a gap
+        whole = f"{int(whole):,}".replace(",", THIN)
+    sign = MINUS if value < 0 and float(text) else ""
+    return sign + whole + (mark + rest if rest else "")
+
+
+def significant(value: float, digits: int, mark: str = ".") -> str:
+    """Give ``value`` with so many significant digits; in powers of ten where it is very small or large."""
+    if value == 0:
+        return "0"
+    power = _power(value, digits)
+    if not PLAIN_LOW <= abs(value) < PLAIN_HIGH:
+        return f"{number(value / 10.0**power, digits - 1, mark)} × 10{str(power).translate(SUPERSCRIPTS)}"
+    rounded = round(value, digits - 1 - power)
+    return number(rounded, digits - 1 - power, mark)
+
+
+def tidy(value: float, digits: int = 6, mark: str = ".") -> str:
+    """Give ``value`` with at most so many significant digits and no idle zeros."""
+    text = significant(value, digits, mark)
+    head, times, tail = text.partition(" × ")
+    if mark in head:
+        head = head.rstrip("0").rstrip(mark)
+    return head + times + tail
+
+
+def _power(value: float, digits: int) -> int:
+    power = math.floor(math.log10(abs(value)))
+    return power + 1 if round(abs(value) / 10.0**power, digits - 1) >= 10 else power  # noqa: PLR2004 - carried into the next power
+
+
+def step_for(expanded: float) -> float | None:
+    """Give the step a figure is rounded to: the smallest 1, 2 or 5 times a power of ten that is no finer than U/10."""
+    if expanded <= 0 or not math.isfinite(expanded):
+        return None
+    least = expanded / 10
+    power = 10.0 ** math.floor(math.log10(least))
+    return next(head * power for head in (1, 2, 5, 10) if head * power >= least * (1 - GUARD))
+
+
+def places_of(step: float) -> int:
+    """Give the places after the mark that a step needs."""
+    return max(0, -math.floor(math.log10(step) + GUARD))
+
+
+def safe_low(value: float, expanded: float, mark: str = ".") -> str:
+    """Give ``value`` - ``expanded`` rounded down to the step."""
+    return _safe(value - expanded, expanded, mark, down=True)
+
+
+def safe_high(value: float, expanded: float, mark: str = ".") -> str:
+    """Give ``value`` + ``expanded`` rounded up to the step."""
+    return _safe(value + expanded, expanded, mark, down=False)
+
+
+def _safe(end: float, expanded: float, mark: str, *, down: bool) -> str:
+    step = step_for(expanded)
+    if step is None:
+        return tidy(end, 7, mark)
+    return scaled(rounded_to(end, step, down=down), step, mark)
+
+
+def rounded_to(end: float, step: float, *, down: bool) -> float:
+    """Round ``end`` down or up to a multiple of ``step``; a whole multiple but for representation stays."""
+    steps = end / step
+    guard = GUARD * max(1.0, abs(steps))
+    whole = math.floor(steps + guard) if down else math.ceil(steps - guard)
+    return whole * step
+
+
+def scaled(value: float, step: float, mark: str = ".") -> str:
+    """Give a rounded value with the places of its step, in powers of ten where it is very small or large."""
+    if value and not PLAIN_LOW <= abs(value) < PLAIN_HIGH:
+        power = math.floor(math.log10(abs(value)))
+        return significant(value, max(1, power - math.floor(math.log10(step) + GUARD) + 1), mark)
+    return number(value, places_of(step), mark)
+
+
+def plus_minus(value: float, expanded: float, mark: str = ".") -> tuple[str, str]:
+    """Give the best estimate and its ± as text, both to the step; the ± rounded up."""
+    step = step_for(expanded)
+    if step is None:
+        return tidy(value, 7, mark), "0"
+    return scaled(round(value / step) * step, step, mark), scaled(rounded_to(expanded, step, down=False), step, mark)
+
+
+def duration(seconds: float, *, down: bool) -> str:
+    """Give a time as hours and minutes, rounded down or up to a minute (to a second below an hour)."""
+    guard = GUARD * max(1.0, abs(seconds))
+    if abs(seconds) < 3600:  # noqa: PLR2004 - one hour
+        whole = math.floor(seconds + guard) if down else math.ceil(seconds - guard)
+        minutes, rest = divmod(whole, 60)
+        return f"{minutes} min {rest:02d} s" if minutes else f"{rest} s"
+    minutes = math.floor((seconds + guard) / 60) if down else math.ceil((seconds - guard) / 60)
+    hours, rest = divmod(minutes, 60)
+    return f"{number(hours, 0)} h {rest:02d} min"
