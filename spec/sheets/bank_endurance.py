@@ -21,9 +21,9 @@ ROWS = {
     "gas": GAS,
     "count": COUNT,
     "V_each": CAPACITY_EACH,
-    "pg_start": Row(title="Pressure now", kind=kinds.GAUGE_PRESSURE, low=-1e5, high=1e8),
+    "pg_start": Row(title="Pressure now", kind=kinds.GAUGE_PRESSURE, low=-2e6, high=1e8),
     "pg_end": Row(
-        title="Changeover pressure", kind=kinds.GAUGE_PRESSURE, low=-1e5, high=1e8,
+        title="Changeover pressure", kind=kinds.GAUGE_PRESSURE, low=-2e6, high=1e8,
         note="not below the regulator’s least inlet pressure",
     ),
     "T_gas": GAS_TEMPERATURE,

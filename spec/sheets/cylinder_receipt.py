@@ -28,7 +28,7 @@ CYLINDER_RECEIPT = Sheet(
         "gas": GAS,
         "count": COUNT,
         "V_each": CAPACITY_EACH,
-        "pg": Row(title="Pressure", kind=kinds.GAUGE_PRESSURE, low=-1e5, high=1e8),
+        "pg": Row(title="Pressure", kind=kinds.GAUGE_PRESSURE, low=-2e6, high=1e8),
         "T_gas": GAS_TEMPERATURE,
         "t_since": Row(
             title="Hours since filling", kind=kinds.TIME, optional=True, accuracy="exact", low=0.0, high=1e9,

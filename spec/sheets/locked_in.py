@@ -14,7 +14,7 @@ LOCKED_IN = Sheet(
     group="Before pressure",
     rows={
         "gas": GAS,
-        "pg_1": Row(title="Pressure at closing", kind=kinds.GAUGE_PRESSURE, low=-1e5, high=1e8),
+        "pg_1": Row(title="Pressure at closing", kind=kinds.GAUGE_PRESSURE, low=-2e6, high=1e8),
         "T_1": Row(
             title="Gas temperature at closing", kind=kinds.ABSOLUTE_TEMPERATURE, low=100.0, high=600.0,
             site="air_temperature",
@@ -25,7 +25,7 @@ LOCKED_IN = Sheet(
         ),
         "p_atm": STATION,
         "pg_2": Row(
-            title="Pressure at the hottest", kind=kinds.GAUGE_PRESSURE, low=-1e5, high=1e8,
+            title="Pressure at the hottest", kind=kinds.GAUGE_PRESSURE, low=-2e6, high=1e8,
             note="give the weakest rating here to ask for a closing pressure or a temperature",
         ),
         "pg_rating": Row(

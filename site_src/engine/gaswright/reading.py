@@ -63,13 +63,13 @@ def read(where: str, raw: Raw, kind: Kind, decimal: str | None = None, instrumen
     match = TEXT.fullmatch(text)
     if not match:
         raise ReadingError(where, repr(text[:40]), "a number", "Type digits with a decimal comma or point, such as 12.5.")
-    typed = number.parse(match[1], where, decimal)
+    typed = _number(match[1], match[2].strip(), where, decimal)
     found = _unit(match[2].strip(), str(record.get("unit") or ""), where, kind, match[1].strip())
     reference = _reference(found, record, kind)
     value = _to_si(typed.value, found, kind)
     if not math.isfinite(value):
         raise ReadingError(where, repr(text[:40]), "a finite value", "Check the number and its unit.")
-    _refuse_impossible(where, value, kind, reference, f"{match[1].strip()} {found.text}")
+    _refuse_impossible(where, value, kind, reference, f"{match[1].strip()} {found.text}", found)
     half = typed.step / 2 * found.factor
     good = _accuracy(where, record, accuracy, value, half, kind, instruments or {})
     return Reading(
@@ -80,10 +80,20 @@ def read(where: str, raw: Raw, kind: Kind, decimal: str | None = None, instrumen
     )
 
 
+def _number(digits: str, unit_text: str, where: str, decimal: str | None) -> number.Number:
+    """Read the digits; where they have two meanings, offer both with the unit typed behind them."""
+    try:
+        return number.parse(digits, where, decimal)
+    except ReadingError as error:
+        error.offers = tuple(f"{offer} {unit_text}".strip() for offer in error.offers)
+        raise
+
+
 def _of_number(where: str, value: float, kind: Kind) -> Reading:
     if not math.isfinite(value):
         raise ReadingError(where, repr(value), "a finite value", "Give the SI value.")
-    _refuse_impossible(where, value, kind, kind.reference, f"{value:g} {kind.si}")
+    own = unit.UnitReading(kind.si, 1.0, 273.15 if kind.si == "Cel" else 0.0, None, None)
+    _refuse_impossible(where, value, kind, kind.reference, f"{value:g} {kind.si}", own)
     return Reading(where, f"{value:g} {kind.si}", value, kind.si, value, kind.reference, 0.0, 0.0, 0.0, math.inf,
                    "given as an exact SI value", "", 0.0, "read", None, ())
 
@@ -150,14 +160,24 @@ def _to_si(typed: float, found: unit.UnitReading, kind: Kind) -> float:
     return value - ZERO_CELSIUS if kind.si == "Cel" else value
 
 
-def _refuse_impossible(where: str, value: float, kind: Kind, reference: str, said: str) -> None:
+def _refuse_impossible(where: str, value: float, kind: Kind, reference: str, said: str, found: unit.UnitReading) -> None:
+    """Refuse what no instrument of the field can read; a gauge reading is held against the station pressure later."""
     low, high = kind.low, kind.high
-    if reference and reference != kind.reference:
-        low, high = (-2e5 if reference == "gauge" else 0.0), max(high, 2e5)
-    if low <= value <= high or (value == 0 and low > 0 and low < 1e-6):  # noqa: PLR2004 - zero stands where the range starts at a trifle
+    if reference != kind.reference:
+        low, high = 0.0, max(high, kind.high)
+    if reference == "gauge":
+        low = -math.inf
+    if low <= value <= high or (value == 0 and low < 1e-6):  # noqa: PLR2004 - zero stands where the range starts at a trifle
         return
-    shown = "absolute zero, −273.15 °C" if "temperature" in kind.key and value < low else f"{low:g} {kind.si}"
-    raise ReadingError(where, said, f"{kind.title} between {shown} and {high:g} {kind.si}", "Check the number and its unit.")
+    is_cold = "temperature" in kind.key and value < low
+    least = "absolute zero, −273.15 °C," if is_cold else f"{_in(found, low, kind)}"
+    expected = f"{kind.title} between {least} and {_in(found, high, kind)}"
+    raise ReadingError(where, said, expected, "Check the number and its unit.")
+
+
+def _in(found: unit.UnitReading, value: float, kind: Kind) -> str:
+    absolute = value + ZERO_CELSIUS if kind.si == "Cel" else value
+    return f"{absolute / found.factor - found.zero:.6g} {found.text}".removesuffix(" 1")
 
 
 def _accuracy(  # noqa: PLR0913 - all that says how good a reading is

@@ -1,0 +1,126 @@
+"""Views of the laws: formula, solved forms, outside checks, worked example.
+
+Takes a relation, its texts and its cases; gives its RelationView. Next: generator.make_views.
+"""
+
+from gaswright.answer import answer_relation
+from gaswright.find import relation as find_law
+from gaswright.gas import find as find_gas
+from gaswright.gas import keys as gas_keys
+from gaswright.law import solve
+from gaswright.quantity import in_unit, with_unit
+from gaswright.reading import read
+from gaswright.show import significant
+from gaswright.tables import KINDS
+from generator.check import constants_of, variables_of
+from generator.describe import FormText, RelationText
+from generator.load import Case
+from generator.printers import mathml, symbol_latex, symbol_text
+from generator.row_views import REFERENCES, may_be_negative, split, units_of
+from generator.views import CheckView, FormView, RelationView, RowView
+from spec import scenario
+from spec.kinds import STATION_PRESSURE
+from spec.model import Family, GasName, Relation, Sign, Variable
+
+STATION = "p_station"
+COUNTED = ("absolute_pressure", "gauge_pressure", "vacuum_pressure")
+CHECK_DIGITS = 6
+
+
+def law_view(
+    relation: Relation, family: Family, text: RelationText, cases: tuple[Case, ...], used_by: tuple[tuple[str, str], ...]
+) -> RelationView:
+    """Give the view of one law."""
+    rows = _rows(relation)
+    find = _found(relation)
+    request = {
+        "do": "relation", "key": relation.key, "find": find,
+        "rows": {row.name: {"text": row.text, "unit": row.unit, "reference": row.reference} for row in rows if row.text},
+    }
+    return RelationView(
+        key=relation.key, title=relation.title, family_key=family.key, family=family.title, mathml=text.mathml,
+        text=text.text, assumes=relation.assumes, validity=tuple(dict.fromkeys(item.says for item in relation.valid)),
+        source=str(relation.source), rows=rows,
+        constants=tuple(
+            (constant.title, f"{float(constant.value):.15g} {constant.unit}", str(constant.source))
+            for constant in constants_of(relation).values()
+        ),
+        find=find, forms=tuple(_form(relation, form) for form in text.forms), checks=tuple(map(_check, cases)),
+        answer=answer_relation(request), nature=relation.nature.value, used_by=used_by, words=relation.words,
+    )
+
+
+def _found(relation: Relation) -> str:
+    """Give the unknown of the example: the first variable that it leaves out and that has no default."""
+    return next(symbol.name for symbol, variable in variables_of(relation).items()
+                if symbol.name not in relation.example and variable.default is None)
+
+
+def _rows(relation: Relation) -> tuple[RowView, ...]:
+    found = _found(relation)
+    rows = [_row(symbol.name, variable, relation, found) for symbol, variable in variables_of(relation).items()]
+    if any(isinstance(meaning, GasName) for meaning in relation.where.values()):
+        choices = tuple((key, f"{find_gas(key).title}, {find_gas(key).formula}") for key in gas_keys())
+        rows.insert(0, RowView(name="gas", title="Gas", is_gas=True, text=relation.example["gas"], choices=choices))
+    kinds = {variable.kind.key for variable in variables_of(relation).values()}
+    if kinds & set(COUNTED) and "station_pressure" not in kinds:
+        typed = split(scenario.STATION_PRESSURE, STATION_PRESSURE)
+        rows.append(RowView(
+            name=STATION, title="Station pressure", kind="station_pressure", units=STATION_PRESSURE.units,
+            references=("absolute",), text=typed.text, unit=typed.unit, reference="absolute", is_optional=True,
+            note="for readings in gauge or vacuum",
+        ))
+    return tuple(rows)
+
+
+def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowView:
+    default = "" if variable.default is None else f"{float(variable.default):g}"
+    typed = split(relation.example.get(name, default), variable.kind)
+    unit = typed.unit if name in relation.example else _like(relation, variable) or typed.unit
+    return RowView(
+        name=name, title=f"{variable.text[:1].upper()}{variable.text[1:]}", symbol=symbol_text(name),
+        mathml=mathml(symbol_latex(name), display="inline"), kind=variable.kind.key,
+        units=units_of(variable.kind, unit), references=REFERENCES.get(variable.kind.key, ()), text=typed.text,
+        unit=unit, reference=typed.reference, is_found=name == found,
+        may_be_negative=variable.sign is Sign.ANY or may_be_negative(variable.kind),
+        is_optional=variable.default is not None,
+    )
+
+
+def _like(relation: Relation, variable: Variable) -> str:
+    """Give the unit of an example reading of the same kind."""
+    same = (symbol.name for symbol, other in variables_of(relation).items()
+            if other.kind == variable.kind and symbol.name in relation.example)
+    name = next(same, "")
+    return split(relation.example[name], variable.kind).unit if name else ""
+
+
+def _form(relation: Relation, form: FormText) -> FormView:
+    variables = {symbol.name: variable for symbol, variable in variables_of(relation).items()}
+    own = variables[form.unknown].kind
+    notes = [
+        f"{symbol_text(name)} in {variable.kind.si}" + (f". {variable.kind.note}" if variable.kind.note else "")
+        for name, variable in variables.items()
+        if name != form.unknown and variable.kind.si != "1"
+    ]
+    return FormView(
+        unknown=form.unknown, symbol=form.symbol, mathml=form.mathml, text=form.text,
+        way=f"{form.way}; {form.proof}", unit_note=f"{form.symbol} in {own.si}." if own.si != "1" else "A number.",
+        argument_notes=tuple(notes), sensitivities=form.sensitivities,
+    )
+
+
+def _check(case: Case) -> CheckView:
+    """Show a published number beside what this engine gives from the same readings."""
+    result = solve(case.relation, case.find, dict(case.given), station_pressure=None)
+    kind = KINDS[_kind_of(case)]
+    published = read(case.find, case.expect, kind)
+    here = significant(in_unit(result.value, kind, published.unit), CHECK_DIGITS)
+    given = ", ".join(f"{symbol_text(name)} = {text}" for name, text in case.given.items())
+    return CheckView(
+        given=given, published=case.expect, here=with_unit(here, published.unit), source=case.source, basis=case.basis
+    )
+
+
+def _kind_of(case: Case) -> str:
+    return find_law(case.relation).variable(case.find).kind

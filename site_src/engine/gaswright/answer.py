@@ -1,0 +1,362 @@
+"""Answer a page: every text ready to draw, nothing left to compute.
+
+Takes requests as plain dictionaries; gives responses as plain dictionaries and never raises for bad input.
+gaswright.browser speaks JSON with the page, generator.make_views draws the worked examples with it.
+"""
+
+from datetime import datetime, timedelta
+from typing import Any
+
+from gaswright import find as finder
+from gaswright import quantity, show
+from gaswright.errors import GaswrightError, NoSolutionError, OutsideRangeError, ReadingError
+from gaswright.gas import find as find_gas
+from gaswright.law import Result, finish, like_unit, read_variable
+from gaswright.model import Find, Relation, Sheet
+from gaswright.reading import Reading, read
+from gaswright.records import Kind
+from gaswright.sheet import SheetResult, Taken, question, take, work
+from gaswright.tables import KINDS
+from gaswright.uncertainty import Share
+
+Response = dict[str, Any]
+FEWEST_PERCENT = 0.5
+STATION_ROW = "p_station"
+NO_U = "No uncertainty: every reading is exact."
+
+
+def answer_relation(request: dict[str, Any]) -> Response:
+    """Answer a law's page: rows with their states, the figure, ±, shares, working, warnings."""
+    relation = finder.relation(str(request["key"]))
+    unknown = str(request["find"])
+    raw: dict[str, Any] = request.get("rows") or {}
+    mark = request.get("decimal") or "."
+    taken, rows, warnings = _read_law(relation, unknown, raw, request.get("decimal"))
+    response = _blank(rows, cautions=())
+    try:
+        station = _site_station(request)
+        if STATION_ROW in raw and station is not None:
+            rows[STATION_ROW] = _ok_row(station, KINDS["station_pressure"])
+    except ReadingError as error:
+        rows[STATION_ROW] = _problem_row(error)
+        return _state(response, "incomplete")
+    try:
+        gas_text = request.get("gas") or _text_of(raw.get("gas"))
+        gas = find_gas(gas_text) if relation.uses_gas and gas_text else None
+    except ReadingError as error:
+        rows["gas"] = _problem_row(error)
+        return _state(response, "incomplete")
+    if any(row["state"] in ("empty", "error", "question") for row in rows.values()) or (relation.uses_gas and gas is None):
+        return _state(response, "empty" if not taken else "incomplete")
+    try:
+        result = finish(relation, unknown, taken, station, gas, warnings, _show_unit(request))
+    except ReadingError as error:
+        return _place_error(response, error, taken)
+    except (NoSolutionError, OutsideRangeError) as error:
+        return _state({**response, "refusal": str(error)}, "refused")
+    return _law_figure(response, relation, result, _show_unit(request), mark)
+
+
+def _show_unit(request: dict[str, Any]) -> str:
+    return str((request.get("show") or {}).get("unit") or "")
+
+
+def _text_of(raw: Any) -> str:  # noqa: ANN401 - what a page sends
+    return str(raw.get("text", "") if isinstance(raw, dict) else raw or "").strip()
+
+
+def _read_law(
+    relation: Relation, unknown: str, raw: dict[str, Any], decimal: str | None
+) -> tuple[dict[str, Reading], dict[str, Response], list[str]]:
+    taken: dict[str, Reading] = {}
+    rows: dict[str, Response] = {}
+    warnings: list[str] = []
+    for variable in relation.variables:
+        if variable.name == unknown:
+            rows[variable.name] = {"state": "find", "says": ""}
+            continue
+        entry = raw.get(variable.name)
+        try:
+            if not _text_of(entry) and variable.default is not None:
+                taken[variable.name] = read_variable(variable, variable.default, decimal, None)
+                rows[variable.name] = {"state": "default", "says": f"taken as {variable.default:g}"}
+                warnings.append(f"{variable.symbol} was taken as {variable.default:g}, because none was given.")
+            elif not _text_of(entry):
+                rows[variable.name] = {"state": "empty", "says": ""}
+            else:
+                taken[variable.name] = read_variable(variable, entry, decimal, None)
+                rows[variable.name] = _ok_row(taken[variable.name], KINDS[variable.kind])
+        except ReadingError as error:
+            rows[variable.name] = _problem_row(error)
+    return taken, rows, warnings
+
+
+def _ok_row(reading: Reading, kind: Kind) -> Response:
+    counted = f" {reading.reference}" if reading.reference in ("gauge", "absolute", "vacuum") else ""
+    si = f"{show.tidy(reading.value, 7)} {'°C' if kind.si == 'Cel' else kind.si}".removesuffix(" 1") + counted
+    return {"state": "ok", "says": "", "si": si, "by": reading.by, "typed": reading.text}
+
+
+def _problem_row(error: ReadingError) -> Response:
+    says = f"Found {error.found}; expected {error.expected}. {error.todo}"
+    offers = [{"text": text} for text in error.offers]
+    return {"state": "question" if error.question else "error", "says": says, "offers": offers}
+
+
+def _site_station(request: dict[str, Any]) -> Reading | None:
+    """Give the station pressure a law's page carries in a row of its own, or that of the site conditions."""
+    raw = (request.get("rows") or {}).get(STATION_ROW) or (request.get("site") or {}).get("station_pressure")
+    if not _text_of(raw):
+        return None
+    return read("Station pressure", raw, KINDS["station_pressure"], request.get("decimal"))
+
+
+def _blank(rows: dict[str, Response], cautions: tuple[str, ...]) -> Response:
+    return {
+        "state": "empty", "rows": rows, "figure": None, "best": "", "value": None, "unit": "", "expanded": None,
+        "verdict": None, "versus": [], "shares": [], "working": [], "cautions": list(cautions), "warnings": [],
+        "refusal": None, "extra": [], "plot": None,
+    }
+
+
+def _state(response: Response, state: str) -> Response:
+    response["state"] = state
+    return response
+
+
+def _place_error(response: Response, error: ReadingError, taken: dict[str, Reading]) -> Response:
+    """Put an error that came up while counting beside the row it belongs to."""
+    for name, reading in taken.items():
+        if error.where.startswith(reading.name):
+            response["rows"][name] = _problem_row(error)
+            return _state(response, "incomplete")
+    return _state({**response, "refusal": str(error)}, "refused")
+
+
+def _figure_texts(value: float, expanded: float, kind: Kind, unit: str, mark: str) -> tuple[float, float, str]:
+    """Give the value and U in the unit shown, and the best estimate ± U as text."""
+    shown, width = quantity.in_unit(value, kind, unit), quantity.interval_in_unit(expanded, kind, unit)
+    best, plus = show.plus_minus(shown, width, mark)
+    return shown, width, quantity.with_unit(best, unit) if not width else f"{quantity.with_unit(best, unit)} ± {quantity.with_unit(plus, unit)}"
+
+
+def _law_figure(response: Response, relation: Relation, result: Result, unit: str, mark: str) -> Response:
+    variable = relation.variable(result.unknown)
+    kind = KINDS[variable.kind]
+    unit = unit or like_unit(relation, result.unknown, result.readings)
+    shown, width, best = _figure_texts(result.value, result.expanded, kind, unit, mark)
+    counted = f" {kind.reference}" if kind.reference in ("absolute", "gauge", "vacuum") else ""
+    figure = show.tidy(shown, 7, mark) if not width else show.plus_minus(shown, width, mark)[0]
+    response |= {
+        "figure": {"label": f"{variable.text[:1].upper()}{variable.text[1:]}", "text": quantity.with_unit(figure, unit) + counted,
+                   "unit": unit, "row": repr(shown)},
+        "best": f"{best} ({_factor(result.k)})." if width else NO_U,
+        "value": result.value, "unit": result.unit, "expanded": result.expanded,
+        "shares": _shares(result.shares),
+        "working": [{"text": text.replace(".", mark) if mark == "," else text, "relation": relation.key,
+                     "title": relation.title} for text in result.working],
+        "warnings": list(result.warnings),
+        "sensitivities": result.sensitivities,
+    }
+    return _state(response, "warning" if result.warnings else "answer")
+
+
+def _factor(k: float) -> str:
+    return f"k = {k:.3g}"
+
+
+def _shares(shares: tuple[Share, ...]) -> list[Response]:
+    return [{"label": share.label, "percent": round(share.fraction * 100)} for share in shares
+            if share.fraction * 100 >= FEWEST_PERCENT]
+
+
+def answer_sheet(request: dict[str, Any]) -> Response:
+    """Answer a sheet: rows with their states, the figure to sign, best estimate, verdict, shares, working, warnings."""
+    sheet = finder.sheet(str(request["key"]))
+    find = question(sheet, request.get("find"))
+    raw = _with_site(sheet, request)
+    mark = request.get("decimal") or "."
+    taken = take(sheet, find, raw, request.get("decimal"), request.get("instruments"))
+    rows = _sheet_rows(sheet, find, raw, taken)
+    response = _blank(rows, sheet.cautions)
+    _question_unlikely(sheet, taken, rows)
+    if taken.problems or taken.empty:
+        nothing = not taken.readings and taken.gas is None
+        return _state(response, "empty" if nothing else "incomplete")
+    unit = _show_unit(request) or find.unit
+    try:
+        result = work(sheet, find, taken, unit)
+    except ReadingError as error:
+        return _place_error(response, error, taken.readings)
+    except (NoSolutionError, OutsideRangeError) as error:
+        return _state({**response, "refusal": str(error)}, "refused")
+    return _sheet_figure(response, sheet, find, result, unit, mark, str((request.get("site") or {}).get("time") or ""))
+
+
+def _with_site(sheet: Sheet, request: dict[str, Any]) -> dict[str, Any]:
+    """Fill rows that are still empty from the site conditions, marked as coming from there."""
+    raw: dict[str, Any] = dict(request.get("readings") or {})
+    site = request.get("site") or {}
+    for name, row in sheet.rows.items():
+        entry = site.get(row.site) if row.site else None
+        if not _text_of(raw.get(name)) and _text_of(entry):
+            raw[name] = {**(entry if isinstance(entry, dict) else {"text": entry}), "from": "site"}
+    return raw
+
+
+def _sheet_rows(sheet: Sheet, find: Find, raw: dict[str, Any], taken: Taken) -> dict[str, Response]:
+    rows: dict[str, Response] = {}
+    for name, row in sheet.rows.items():
+        if not row.reading:
+            continue
+        if name == find.row:
+            rows[name] = {"state": "find", "says": ""}
+        elif name in taken.problems:
+            rows[name] = _problem_row(taken.problems[name])
+        elif row.is_gas and taken.gas is not None:
+            rows[name] = {"state": "ok", "says": "", "si": taken.gas.formula, "typed": taken.gas.title}
+        elif name in taken.readings:
+            rows[name] = _ok_row(taken.readings[name], KINDS[row.kind])
+            if taken.readings[name].came_from != "read":
+                rows[name] |= {"state": "default", "says": _default_words(taken.readings[name], raw)}
+        else:
+            rows[name] = {"state": "empty", "says": "" if not row.optional else "may stay empty"}
+    return rows
+
+
+def _default_words(reading: Reading, raw: dict[str, Any]) -> str:
+    del raw
+    where = {"site": "from the site conditions", "found": "worked out here before"}.get(reading.came_from, "a preset")
+    return f"{reading.text}, {where}, not yet confirmed"
+
+
+def _question_unlikely(sheet: Sheet, taken: Taken, rows: dict[str, Response]) -> None:
+    """Question what is possible and unlikely, without stopping."""
+    for name, reading in taken.readings.items():
+        above = sheet.rows[name].unusual_above
+        if above is not None and reading.value > above and rows[name]["state"] == "ok":
+            limit = quantity.text_of(above, KINDS[sheet.rows[name].kind], reading.unit)
+            rows[name]["says"] = f"{reading.text} is unusual (above {limit}): check the number and its unit."
+
+
+def _sheet_figure(  # noqa: PLR0913 - the parts of one answer
+    response: Response, sheet: Sheet, find: Find, result: SheetResult, unit: str, mark: str, start: str
+) -> Response:
+    row = sheet.rows[find.row]
+    kind = KINDS[row.kind]
+    shown, width, best = _figure_texts(result.value, result.expanded, kind, unit, mark)
+    text = _signed(find, row.whole, result, shown, width, unit, mark)
+    counted = f" {kind.reference}" if kind.reference in ("absolute", "gauge", "vacuum") else ""
+    way = "rounded down" if find.safe == "low" else "rounded up"
+    best_line = f"Best estimate {best}{counted} ({_factor(result.k)})." if width else f"Best estimate {best}{counted}. {NO_U}"
+    response |= {
+        "figure": {"label": f"{find.label}, safe end, {way}", "text": text + counted, "unit": unit, "row": repr(shown)},
+        "best": best_line + (f" Unrounded {show.tidy(shown, 10, mark)}." if row.whole else ""),
+        "value": result.value, "unit": result.unit, "expanded": result.expanded, "safe": result.safe,
+        "verdict": _verdict_words(sheet, find, result, text, mark),
+        "versus": _versus(result, kind, unit, mark),
+        "shares": _shares(result.shares),
+        "working": [{"text": line.text, "relation": line.relation, "title": line.title} for line in result.working],
+        "warnings": [*result.warnings, *_assumption(result, kind, unit, mark)],
+        "extra": _extra(sheet, find, result, start, mark),
+        "rule": sheet.rule,
+    }
+    return _state(response, "warning" if result.warnings else "answer")
+
+
+def _signed(  # noqa: PLR0913 - the parts of one figure
+    find: Find, whole: bool, result: SheetResult, shown: float, width: float, unit: str, mark: str  # noqa: FBT001
+) -> str:
+    down = find.safe == "low"
+    if whole:
+        return show.number(show.rounded_to(shown + (-width if down else width), 1.0, down=down), 0, mark)
+    if unit in ("min", "h"):
+        return show.duration(_stepped(result.safe, result.expanded, unit, down=down), down=down)
+    return quantity.with_unit((show.safe_low if down else show.safe_high)(shown, width, mark), unit)
+
+
+def _stepped(seconds: float, expanded: float, unit: str, *, down: bool) -> float:
+    """Round a time to the step its uncertainty allows, in whole minutes at the finest for an hour and more."""
+    scale = {"min": 60.0, "h": 3600.0}[unit]
+    step = show.step_for(expanded / scale)
+    return seconds if step is None else show.rounded_to(seconds / scale, step, down=down) * scale
+
+
+def _verdict_words(sheet: Sheet, find: Find, result: SheetResult, text: str, mark: str) -> Response | None:
+    if result.limit is None:
+        return None
+    row = sheet.rows[find.limit]
+    unit = result.readings[find.limit].unit
+    limit = quantity.text_of(result.limit, KINDS[row.kind], unit, mark)
+    says = {
+        "PASS": f"{find.limit_text} {limit}; the safe end is {text}.",
+        "FAIL": f"{find.limit_text} {limit}; not reached even at the favourable end of the uncertainty.",
+        "CANNOT DECIDE": f"{find.limit_text} {limit}, which lies inside the uncertainty of these instruments. "
+        + _would_decide(result),
+    }[result.verdict]
+    return {"word": result.verdict, "says": says}
+
+
+def _would_decide(result: SheetResult) -> str:
+    """Say what would decide: how small U must be, and which reading to better first."""
+    margin = abs(result.value - (result.limit or 0.0))
+    if not result.shares or margin == 0:
+        return "The best estimate stands on the limit itself: no instrument decides it."
+    worst = result.shares[0]
+    return (f"An uncertainty {result.expanded / margin:.2g} times smaller would decide; "
+            f"{worst.label} contributes {worst.fraction * 100:.0f} % of it, so better that first.")
+
+
+def _versus(result: SheetResult, kind: Kind, unit: str, mark: str) -> list[list[str]]:
+    """Give real and ideal side by side, with the difference in per cent."""
+    def shown(value: float) -> str:
+        return quantity.with_unit(show.tidy(quantity.in_unit(value, kind, unit), 5, mark), unit)
+
+    rows = [[f"Real {result.gas.lower()}", shown(result.value)]]
+    if result.ideal is None:
+        return [*rows, ["Ideal law", "no answer"]]
+    base = result.value if kind.reference != "gauge" else result.value
+    off = (result.ideal / base - 1) * 100 if base else 0.0
+    side = "more" if off > 0 else "less"
+    difference = f", {abs(off):.2g} % {side}".replace(".", mark) if kind.si not in ("K", "Cel") else ""
+    return [*rows, ["Ideal law", shown(result.ideal) + difference]]
+
+
+def _assumption(result: SheetResult, kind: Kind, unit: str, mark: str) -> list[str]:
+    """Say which assumption on shared instrument error was used, and what the other would give."""
+    if not any(reading.instrument for reading in result.readings.values()) or result.other_u == result.u:
+        return []
+    other = quantity.with_unit(
+        show.significant(quantity.interval_in_unit(result.k * result.other_u, kind, unit), 2, mark), unit
+    )
+    used = "shared fully, because the readings are close together" if result.shared else "independent between readings"
+    return [f"The error of an instrument used more than once is taken as {used}; the other assumption gives U = {other}."]
+
+
+def _extra(sheet: Sheet, find: Find, result: SheetResult, start: str, mark: str) -> list[list[str]]:
+    """Give what else is read off the answer: clock time of a changeover, mass and amount of a content."""
+    lines: list[list[str]] = []
+    if find.row == "t" and start:
+        lines += _clock(start, result.safe)
+    for name in ("m", "n"):
+        if find.row == "V_ref" and name in sheet.rows:
+            kind = KINDS[sheet.rows[name].kind]
+            value = result.values[name] * result.safe / result.value
+            lines.append([f"{sheet.rows[name].title}, safe end", quantity.with_unit(show.significant(value, 4, mark), kind.units[0])])
+    pair = [result.readings[name] for name in ("T_ref", "p_ref") if name in result.readings]
+    if len(pair) == 2:  # noqa: PLR2004 - a pair is a temperature and a pressure
+        lines.append(["Reference conditions", ", ".join(reading.text for reading in pair)])
+    return lines
+
+
+def _clock(start: str, seconds: float) -> list[list[str]]:
+    try:
+        at = datetime.fromisoformat(start) + timedelta(seconds=max(0.0, seconds))
+    except (ValueError, OverflowError):
+        return []
+    return [["Change over by", at.strftime("%H:%M on %Y-%m-%d")]]
+
+
+def refused(error: GaswrightError) -> Response:
+    """Answer a request that cannot be read at all."""
+    return {**_blank({}, ()), "state": "refused", "refusal": str(error)}
