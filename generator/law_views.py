@@ -98,15 +98,14 @@ def _like(relation: Relation, variable: Variable) -> str:
 def _form(relation: Relation, form: FormText) -> FormView:
     variables = {symbol.name: variable for symbol, variable in variables_of(relation).items()}
     own = variables[form.unknown].kind
-    notes = [
-        f"{symbol_text(name)} in {variable.kind.si}" + (f". {variable.kind.note}" if variable.kind.note else "")
-        for name, variable in variables.items()
-        if name != form.unknown and variable.kind.si != "1"
-    ]
+    notes: dict[str, list[str]] = {}
+    for name, variable in variables.items():
+        if name != form.unknown and variable.kind.si != "1":
+            notes.setdefault(f"in {variable.kind.si}. {variable.kind.note}".strip(), []).append(symbol_text(name))
     return FormView(
         unknown=form.unknown, symbol=form.symbol, mathml=form.mathml, text=form.text,
         way=f"{form.way}; {form.proof}", unit_note=f"{form.symbol} in {own.si}." if own.si != "1" else "A number.",
-        argument_notes=tuple(notes), sensitivities=form.sensitivities,
+        argument_notes=tuple(f"{', '.join(names)} {note}" for note, names in notes.items()), sensitivities=form.sensitivities,
     )
 
 

@@ -22,6 +22,7 @@ GREEK = {
     "omega": "ω", "phi": "φ", "psi": "ψ", "rho": "ρ", "eps": "ε", "pi": "π",
 }
 LATEX = {"lam": r"\lambda", "eps": r"\varepsilon"}
+LOW_DIGITS = str.maketrans("0123456789", "₀₁₂₃₄₅₆₇₈₉")
 DIGITS = str.maketrans("0123456789+-/", "⁰¹²³⁴⁵⁶⁷⁸⁹⁺⁻ᐟ")
 
 
@@ -219,15 +220,18 @@ class TextWriter(LineWriter):
 
 
 def symbol_text(name: str) -> str:
-    """Give a symbol's name with its Greek letter: ``rho_0`` becomes ``ρ_0``."""
+    """Give a symbol's name with its Greek letter and digits set low: ``rho_0`` becomes ``ρ₀``."""
     head, _, tail = name.partition("_")
-    return GREEK.get(head, head) + (f"_{tail}" if tail else "")
+    if head.startswith("d") and len(head) > 1 and head[1:] in ("p", "T", "p2"):
+        head = "Δ" + head[1:]
+    low = tail.translate(LOW_DIGITS) if tail.isdigit() else f"_{tail}"
+    return GREEK.get(head, head) + (low if tail else "")
 
 
 def symbol_latex(name: str) -> str:
     """Give a symbol in LaTeX: letters alone in italics, long subscripts upright."""
     head, _, tail = name.partition("_")
-    if head.startswith("d") and len(head) > 1 and head not in ("dot",):
+    if head.startswith("d") and len(head) > 1:
         body = r"\Delta " + head[1:]
     elif head in GREEK:
         body = LATEX.get(head, "\\" + head)

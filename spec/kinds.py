@@ -47,7 +47,7 @@ TEMPERATURE_CONSTANT = Kind(
 )
 VOLUME = Kind(
     key="volume", title="volume", dimension=dim.VOLUME, si="m³", units=("L", "m³", "mL", "cm³", "ft³", "in³"),
-    low=1e-12, high=1e9, note="Actual volume, at the pressure and temperature named.",
+    low=1e-12, high=1e9,
 )
 REFERENCE_VOLUME = Kind(
     key="reference_volume", title="volume at reference conditions", dimension=dim.VOLUME, si="m³",

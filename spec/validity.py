@@ -17,7 +17,7 @@ def ideal_at(pressure: sympy.Symbol) -> Validity:
     return Validity(
         holds=sympy.Le(pressure, IDEAL_LIMIT, evaluate=False),
         says=(
-            f"{pressure.name} is above 10 bar absolute, where the ideal law is more than half a per cent off for "
-            "many gases (5 to 30 % at 200 bar). Use the real-gas form or a job sheet."
+            "Above 10 bar absolute the ideal law is more than half a per cent off for many gases, 5 to 30 % at "
+            "200 bar. Use the real-gas form or a job sheet there."
         ),
     )

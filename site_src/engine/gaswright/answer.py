@@ -21,6 +21,7 @@ from gaswright.uncertainty import Share
 
 Response = dict[str, Any]
 FEWEST_PERCENT = 0.5
+ROW_DIGITS = 7
 STATION_ROW = "p_station"
 NO_U = "No uncertainty: every reading is exact."
 
@@ -148,8 +149,10 @@ def _law_figure(response: Response, relation: Relation, result: Result, unit: st
     counted = f" {kind.reference}" if kind.reference in ("absolute", "gauge", "vacuum") else ""
     figure = show.tidy(shown, 7, mark) if not width else show.plus_minus(shown, width, mark)[0]
     response |= {
-        "figure": {"label": f"{variable.text[:1].upper()}{variable.text[1:]}", "text": quantity.with_unit(figure, unit) + counted,
-                   "unit": unit, "row": repr(shown)},
+        "figure": {
+            "label": f"{variable.text[:1].upper()}{variable.text[1:]}", "text": quantity.with_unit(figure, unit) + counted,
+            "unit": "", "row": show.tidy(shown, ROW_DIGITS, mark), "exact": _exact(shown, unit, kind),
+        },
         "best": f"{best} ({_factor(result.k)})." if width else NO_U,
         "value": result.value, "unit": result.unit, "expanded": result.expanded,
         "shares": _shares(result.shares),
@@ -159,6 +162,12 @@ def _law_figure(response: Response, relation: Relation, result: Result, unit: st
         "sensitivities": result.sensitivities,
     }
     return _state(response, "warning" if result.warnings else "answer")
+
+
+def _exact(shown: float, unit: str, kind: Kind) -> Response:
+    """Give the unrounded value in the unit shown, for the row that takes it over as a reading."""
+    reference = kind.reference if kind.reference in ("absolute", "gauge", "vacuum") else ""
+    return {"text": repr(shown), "unit": unit, "reference": reference}
 
 
 def _factor(k: float) -> str:
@@ -250,7 +259,10 @@ def _sheet_figure(  # noqa: PLR0913 - the parts of one answer
     way = "rounded down" if find.safe == "low" else "rounded up"
     best_line = f"Best estimate {best}{counted} ({_factor(result.k)})." if width else f"Best estimate {best}{counted}. {NO_U}"
     response |= {
-        "figure": {"label": f"{find.label}, safe end, {way}", "text": text + counted, "unit": unit, "row": repr(shown)},
+        "figure": {
+            "label": f"{find.label}, safe end, {way}", "text": text + counted, "unit": "",
+            "row": show.tidy(shown, ROW_DIGITS, mark), "exact": _exact(shown, unit, kind),
+        },
         "best": best_line + (f" Unrounded {show.tidy(shown, 10, mark)}." if row.whole else ""),
         "value": result.value, "unit": result.unit, "expanded": result.expanded, "safe": result.safe,
         "verdict": _verdict_words(sheet, find, result, text, mark),

@@ -200,7 +200,7 @@ def _accuracy(  # noqa: PLR0913 - all that says how good a reading is
         by = accuracy.says
     else:
         accuracy = instruments_of.Accuracy(0.0, 0.0, "")
-        by = "half of the last digit typed; no instrument chosen"
+        by = "± half the last digit"
     u_systematic = accuracy.limit / ROOT_3
     return {
         "u": math.hypot(u_systematic, u_random), "u_systematic": u_systematic, "u_random": u_random,

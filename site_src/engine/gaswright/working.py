@@ -9,7 +9,7 @@ from gaswright import quantity
 from gaswright.model import Relation
 from gaswright.tables import KINDS
 
-TOKEN = re.compile(r"[A-Za-zα-ωΑ-Ω]+(?:_[A-Za-z0-9]+)*(?![A-Za-z0-9_(])")
+TOKEN = re.compile(r"[A-Za-zα-ωΑ-Ω]+[₀-₉]*(?:_[A-Za-z0-9]+)*(?![A-Za-z0-9₀-₉_(])")
 
 
 def line(relation: Relation, unknown: str, values: dict[str, float], units: dict[str, str], mark: str = ".") -> str:
