@@ -22,6 +22,7 @@ from mkdocs.structure.pages import Page
 
 from generator.errors import SpecError
 from generator.search_entries import write_entries
+from generator.symbol_html import write_chemical, write_symbols
 from generator.views import SheetView, SiteView
 
 TEMPLATES = Path(__file__).parent / "templates"
@@ -132,13 +133,16 @@ def group_sheets(view: SiteView) -> dict[str, list[SheetView]]:
 
 def make_environment() -> Environment:
     """Templates of the page bodies: every text escaped, a name that is not there is an error."""
-    return Environment(
+    env = Environment(
         loader=FileSystemLoader(TEMPLATES),
         autoescape=True,
         undefined=StrictUndefined,
         trim_blocks=True,
         lstrip_blocks=True,
     )
+    env.filters["symbols"] = write_symbols
+    env.filters["chemical"] = write_chemical
+    return env
 
 
 class PagesPlugin(BasePlugin[MkDocsConfig]):  # type: ignore[no-untyped-call]  # mkdocs leaves it untyped

@@ -7,8 +7,9 @@ import { drawCurve } from "./plot";
 import type { Calculator } from "./calculator";
 import type { Signature } from "./store";
 
-/** Readings and working lines that fill a page in the usual size; beyond them the print is smaller and the plot left out. */
-const MANY_LINES = 24;
+/** What is free on a sheet of A4 or Letter inside our margins, in CSS pixels at 96 to the inch. */
+const PAGE_HEIGHT = (250 / 25.4) * 96;
+const SIZES_PT = [9.5, 9, 8.5, 8, 7.5, 7];
 
 export interface PaperFacts {
   job: string;
@@ -26,8 +27,21 @@ export function fillPaper(calculator: Calculator, facts: PaperFacts): void {
     ...drawWorking(calculator), drawLines(facts),
   );
   paper.classList.add("is-filled");
-  const lines = calculator.rows.length + (calculator.answer?.working?.length ?? 0);
-  paper.classList.toggle("is-dense", lines > MANY_LINES);
+  fit(find<HTMLElement>(document, "#paper"));
+}
+
+/** The largest type with which all of it stands on one page; the plot is left out before the type gets small. */
+function fit(paper: HTMLElement): void {
+  paper.classList.add("is-measured");
+  const isTooLong = (size: number): boolean => {
+    paper.style.fontSize = `${size}pt`;
+    return paper.scrollHeight > PAGE_HEIGHT;
+  };
+  const plot = paper.querySelector(".plot");
+  const fits = SIZES_PT.filter((size) => size >= 8.5).some((size) => !isTooLong(size));
+  if (!fits && plot) plot.remove();
+  if (!fits) SIZES_PT.some((size) => !isTooLong(size));
+  paper.classList.remove("is-measured");
 }
 
 /** Leaves printing to the page as it stands, as for the day page. */
@@ -94,7 +108,7 @@ function drawBox(calculator: Calculator): HTMLElement {
   add("p", (answer?.cautions ?? []).join(" "), "cautions");
   add("p", answer?.refusal, "refusal");
   add("p", figure?.label);
-  add("p", [figure?.text, figure?.unit].filter(Boolean).join(" "), "figure");
+  add("p", figure?.text, "figure");
   add("p", answer?.best);
   add("p", answer?.verdict && `${answer.verdict.word}: ${answer.verdict.says}`);
   for (const text of answer?.warnings ?? []) add("p", `Warning: ${text}`);
@@ -107,7 +121,7 @@ function drawBox(calculator: Calculator): HTMLElement {
 function drawWorking(calculator: Calculator): HTMLElement[] {
   const lines = calculator.answer?.working ?? [];
   const steps = make("ol", "", { class: "steps" });
-  steps.append(...lines.map((line) => make("li", line.title ? `${line.text}   [${line.title}]` : line.text)));
+  steps.append(...lines.map((line) => make("li", line.text)));
   const rule = make("p", `Rule: ${calculator.section.dataset["rule"] ?? ""}`);
   const plot = calculator.answer?.plot;
   const figure = make("figure", "", { class: "plot" });

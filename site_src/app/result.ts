@@ -3,6 +3,7 @@
 
 import { all, draw, fill, find, make, maybe, show } from "./dom";
 import { drawPlot } from "./plot";
+import { symbolNodes } from "./symbols";
 import type { Answer, RowAnswer, ShownState, WorkingLine } from "./shapes";
 
 const WORDS: Record<ShownState, [string, string]> = {
@@ -29,7 +30,7 @@ export function drawAnswer(section: HTMLElement, answer: Answer): void {
   const slot = (name: string): HTMLElement => find(section, `[data-${name}]`);
   fill(slot("refusal"), answer.refusal);
   fill(slot("label"), figure.label);
-  fill(slot("figure"), [figure.text, figure.unit].filter(Boolean).join(" "));
+  fill(slot("figure"), figure.text);
   fill(slot("best"), answer.best);
   drawVerdict(slot("verdict"), answer.verdict);
   drawWarnings(slot("warnings"), answer.warnings ?? []);
@@ -85,7 +86,9 @@ function drawShares(place: HTMLElement, shares: { label: string; percent: number
       bar.append(draw("rect", { width: percent, height: 10 }));
       const cell = make("td", "", { class: "bar" });
       cell.append(bar);
-      row.append(make("th", label, { scope: "row" }), cell, make("td", `${percent} %`));
+      const name = make("th", "", { scope: "row" });
+      name.append(...symbolNodes(label));
+      row.append(name, cell, make("td", `${percent} %`));
       return row;
     }),
   );
@@ -101,7 +104,9 @@ function drawWorking(section: HTMLElement, answer: Answer): void {
 
 function drawLine(line: WorkingLine): HTMLLIElement {
   const item = make("li");
-  item.append(make("span", line.text));
+  const words = make("span");
+  words.append(...symbolNodes(line.text));
+  item.append(words);
   if (!line.title) return item;
   const known = all<HTMLElement>(document, "[data-laws]")[0]?.dataset["laws"]?.split(" ") ?? [];
   const root = document.documentElement.dataset["root"] ?? "";
@@ -127,7 +132,6 @@ export function drawSi(section: HTMLElement, rows: readonly { title: string; typ
 function drawFoot(section: HTMLElement, answer: Answer): void {
   const foot = maybe(section, "[data-foot]");
   if (!foot) return;
-  const figure = [answer.figure?.text, answer.figure?.unit].filter(Boolean).join(" ");
-  const words = answer.state === "refused" ? "No figure: refused" : figure || "No figure yet";
+  const words = answer.state === "refused" ? "No figure: refused" : answer.figure?.text || "No figure yet";
   foot.textContent = [words, answer.verdict?.word, answer.warnings?.length ? "see warning" : ""].filter(Boolean).join(" · ");
 }

@@ -21,6 +21,8 @@ export interface RowDraft {
 type Field = HTMLInputElement | HTMLSelectElement;
 
 const BY_HAND = "limit";
+/** Letters of an origin that fit beside the fields. */
+const SHORT = 12;
 
 export class Row {
   readonly name: string;
@@ -217,7 +219,9 @@ export class Row {
     this.element.dataset["from"] = this.waitsForConfirmation ? this.from : "";
     show(this.confirmButton, this.waitsForConfirmation);
     show(this.#accuracy, this.#instrument?.value === BY_HAND);
-    this.#by.textContent = this.#whereWords();
+    const words = this.#whereWords();
+    this.#by.textContent = words;
+    this.element.classList.toggle("has-short-origin", words.length <= SHORT);
   }
 
   lock(isLocked: boolean): void {

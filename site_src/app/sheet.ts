@@ -61,8 +61,7 @@ export class Sheet {
   }
 
   get figure(): string {
-    const figure = this.calculator.answer?.figure;
-    return this.#isExample ? "" : [figure?.text, figure?.unit].filter(Boolean).join(" ");
+    return this.#isExample ? "" : (this.calculator.answer?.figure?.text ?? "");
   }
 
   get state(): ShownState {
