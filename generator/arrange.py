@@ -32,7 +32,11 @@ def arrange(expression: sympy.Expr, order: Mapping[sympy.Symbol, int]) -> sympy.
     arguments = [arrange(argument, order) for argument in expression.args]
     if isinstance(expression, sympy.Mul):
         arguments = _turned(arguments, order)
-        return arguments[0] if len(arguments) == 1 else sympy.Mul(*sorted(arguments, key=lambda part: _factor_rank(part, order)), evaluate=False)
+        return (
+            arguments[0]
+            if len(arguments) == 1
+            else sympy.Mul(*sorted(arguments, key=lambda part: _factor_rank(part, order)), evaluate=False)
+        )
     if isinstance(expression, sympy.Add):
         return sympy.Add(*sorted(arguments, key=lambda part: _term_rank(part, order)), evaluate=False)
     if isinstance(expression, sympy.Pow):
@@ -46,8 +50,10 @@ def _turned(factors: list[sympy.Expr], order: Mapping[sympy.Symbol, int]) -> lis
         return factors
     for place, factor in enumerate(factors):
         if isinstance(factor, sympy.Add) and any(term.could_extract_minus_sign() for term in factor.args):
-            turned = sympy.Add(*sorted((-term.doit() for term in factor.args), key=lambda part: _term_rank(part, order)),
-                               evaluate=False)
+            turned = sympy.Add(
+                *sorted((-term.doit() for term in factor.args), key=lambda part: _term_rank(part, order)),
+                evaluate=False,
+            )
             rest = [*factors[:place], turned, *factors[place + 1 :]]
             rest.remove(sympy.S.NegativeOne)
             return rest

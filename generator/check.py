@@ -14,7 +14,7 @@ from generator.dimension_of import dimension_of
 from generator.errors import SpecError
 from generator.load import Case, Loaded
 from spec.dimensions import Dimension
-from spec.model import Citation, Constant, GasName, Nature, Relation, Variable
+from spec.model import Constant, GasName, Nature, Relation, Variable
 
 WITHOUT_CASE = (Nature.BALANCE, Nature.DEFINITION, Nature.PROPERTY)
 BASES = ("published", "published, digits from memory", "library", "common practice, no source")
@@ -43,7 +43,9 @@ def _names(loaded: Loaded) -> Iterator[SpecError]:
     for key, count in Counter(keys).items():
         if count > 1:
             yield SpecError(
-                where=f"spec, {key}", found=f"the key {count} times", expected="every key once",
+                where=f"spec, {key}",
+                found=f"the key {count} times",
+                expected="every key once",
                 todo="rename one of them",
             )
 
@@ -53,21 +55,26 @@ def _relation(relation: Relation, cases: tuple[Case, ...]) -> Iterator[SpecError
     unbound = _symbols(relation) - set(relation.where)
     for symbol in sorted(unbound, key=str):
         yield SpecError(
-            where=where, found=f"the symbol {symbol} in the equation and not in where",
-            expected="a Variable or a Constant for every symbol", todo=f"add {symbol} to where",
+            where=where,
+            found=f"the symbol {symbol} in the equation and not in where",
+            expected="a Variable or a Constant for every symbol",
+            todo=f"add {symbol} to where",
         )
     for symbol in [name for name, meaning in relation.where.items() if not isinstance(meaning, GasName)]:
         if symbol not in _symbols(relation):
             yield SpecError(
-                where=where, found=f"{symbol} in where and not in the equation",
-                expected="only symbols of the equation", todo=f"remove {symbol} or use it",
+                where=where,
+                found=f"{symbol} in where and not in the equation",
+                expected="only symbols of the equation",
+                todo=f"remove {symbol} or use it",
             )
     if not unbound:
         yield from _dimensions(relation, where)
     yield from _source(relation, where)
     if relation.nature not in WITHOUT_CASE and not any(_is_outside(case, relation) for case in cases):
         yield SpecError(
-            where=where, found="no case from outside",
+            where=where,
+            found="no case from outside",
             expected="at least one case in spec/cases that is published or computed by an independent library",
             todo="add a case with its source, or mark the relation as a balance or definition if it is one",
         )
@@ -86,9 +93,11 @@ def _source(relation: Relation, where: str) -> Iterator[SpecError]:
         ("the relation", relation.source),
         *((f"the constant {symbol}", constant.source) for symbol, constant in constants_of(relation).items()),
     ]:
-        if not isinstance(citation, Citation) or not citation.source.work or not citation.where:
+        if citation is None or not (citation.source.work and citation.where):
             yield SpecError(
-                where=where, found=f"no source for {what}", expected="a work of spec/sources.py and a place in it",
+                where=where,
+                found=f"no source for {what}",
+                expected="a work of spec/sources.py and a place in it",
                 todo='write source=WORK.at("equation or section")',
             )
 
@@ -103,8 +112,10 @@ def _dimensions(relation: Relation, where: str) -> Iterator[SpecError]:
         return
     if left != right:
         yield SpecError(
-            where=where, found=f"a left side in {left} and a right side in {right}",
-            expected="the same dimension on both sides", todo="correct the equation or the kinds of its variables",
+            where=where,
+            found=f"a left side in {left} and a right side in {right}",
+            expected="the same dimension on both sides",
+            todo="correct the equation or the kinds of its variables",
         )
 
 
@@ -132,19 +143,28 @@ def _cases(loaded: Loaded) -> Iterator[SpecError]:
     for case in loaded.cases:
         if case.relation not in relations:
             yield SpecError(
-                where=case.name, found=f"the relation {case.relation}", expected="a key of the spec",
+                where=case.name,
+                found=f"the relation {case.relation}",
+                expected="a key of the spec",
                 todo="correct the key",
             )
             continue
-        names = {symbol.name for symbol, meaning in relations[case.relation].where.items()
-                 if not isinstance(meaning, Constant)}
+        names = {
+            symbol.name
+            for symbol, meaning in relations[case.relation].where.items()
+            if not isinstance(meaning, Constant)
+        }
         for name in [name for name in (*case.given, case.find) if name not in names]:
             yield SpecError(
-                where=case.name, found=f"the variable {name}", expected=f"one of {', '.join(sorted(names))}",
+                where=case.name,
+                found=f"the variable {name}",
+                expected=f"one of {', '.join(sorted(names))}",
                 todo="correct the name",
             )
         if case.basis not in BASES:
             yield SpecError(
-                where=case.name, found=f"the basis {case.basis!r}", expected=f"one of {'; '.join(BASES)}",
+                where=case.name,
+                found=f"the basis {case.basis!r}",
+                expected=f"one of {'; '.join(BASES)}",
                 todo="say how the number was come by",
             )

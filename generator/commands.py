@@ -70,18 +70,18 @@ def _parser() -> argparse.ArgumentParser:
 
 
 def _build() -> int:
-    from generator import pipeline  # noqa: PLC0415 - loads sympy, which the other commands do without
+    from generator.pipeline import build  # noqa: PLC0415 - loads sympy, which the other commands do without
 
     start = time.monotonic()
-    pipeline.build(ROOT)
+    build(ROOT)
     print(f"Built in {time.monotonic() - start:.0f} s: {SITE / 'index.html'}")
     return 0
 
 
 def _check() -> int:
-    from generator import pipeline  # noqa: PLC0415 - loads sympy, which the other commands do without
+    from generator.pipeline import check  # noqa: PLC0415 - loads sympy, which the other commands do without
 
-    print(pipeline.check(ROOT))
+    print(check(ROOT))
     return 0
 
 

@@ -4,10 +4,11 @@ Takes ``Routed`` with the staged engine importable; raises an ExceptionGroup of 
 reading moved by its own uncertainty must not move the answer by more than the range of its row.
 """
 
-from generator.errors import SpecError
-from generator.route import Routed
 from gaswright.errors import GaswrightError
 from gaswright.sheet import worked_example
+
+from generator.errors import SpecError
+from generator.route import Routed
 
 
 def check_conditioning(routed: Routed) -> None:
@@ -32,7 +33,8 @@ def _question(sheet: str, row: str) -> list[SpecError]:
     width = result.high - result.low
     return [
         SpecError(
-            where, f"an answer that {share.label} alone, moved by its own uncertainty, moves by {share.moves:.3g} (SI)",
+            where,
+            f"an answer that {share.label} alone, moved by its own uncertainty, moves by {share.moves:.3g} (SI)",
             f"less than the row's range of {width:.3g} (SI)",
             "take the row out of finds: the readings cannot determine it",
         )

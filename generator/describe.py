@@ -110,9 +110,10 @@ def _form(solved: SolvedRelation, form: Form) -> FormText:
 
 
 def _sensitivities(relation: Relation, form: Form) -> tuple[tuple[str, str], ...]:
+    expression = sympy.sympify(form.expression)
     found = []
-    for symbol in [symbol for symbol in variables_of(relation) if form.expression.has(symbol)]:
-        slope = arrange(sympy.factor_terms(sympy.diff(form.expression.doit(), symbol)), order_of(relation))
+    for symbol in [symbol for symbol in variables_of(relation) if expression.has(symbol)]:
+        slope = arrange(sympy.factor_terms(sympy.diff(expression.doit(), symbol)), order_of(relation))
         label = f"∂{symbol_text(form.unknown.name)}/∂{symbol_text(symbol.name)}"
         found.append((label, TextWriter().write(slope)))
     return tuple(found)

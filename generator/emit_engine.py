@@ -68,12 +68,13 @@ def relation_python(solved: SolvedRelation, family_key: str) -> str:
     functions = [_form(solved, form) for form in solved.forms.values()]
     functions.append(_residual(solved))
     functions.append(_slopes(solved))
-    functions.extend(_validity_function(solved.relation, place, validity)
-                     for place, validity in enumerate(solved.relation.valid))
+    functions.extend(
+        _validity_function(solved.relation, place, validity) for place, validity in enumerate(solved.relation.valid)
+    )
     return "\n\n\n".join([*functions, _value(solved, family_key)])
 
 
-def _parameters(solved: SolvedRelation, arguments: tuple[sympy.Symbol, ...], *, is_gas: bool) -> str:
+def _parameters(arguments: tuple[sympy.Symbol, ...], *, is_gas: bool) -> str:
     names = [f"{symbol.name}: float" for symbol in arguments]
     return ", ".join([*names, 'gas: "Gas"'] if is_gas else names)
 
@@ -89,7 +90,7 @@ def _form(solved: SolvedRelation, form: Form) -> str:
     variable = variables_of(relation)[form.unknown]
     name = f"{relation.key}_{form.unknown.name}"
     lines = [
-        f"def {name}({_parameters(solved, form.arguments, is_gas=_needs_gas(form))}) -> float:",
+        f"def {name}({_parameters(form.arguments, is_gas=_needs_gas(form))}) -> float:",
         *_docstring(relation, form, variable),
         *_constants(relation, _expressions(relation, form)),
         *_body(relation, form),
@@ -145,12 +146,14 @@ def _residual(solved: SolvedRelation) -> str:
     relation = solved.relation
     variables = tuple(variables_of(relation))
     write = PythonWriter().write
-    return "\n".join([
-        f"def {relation.key}_residual({_parameters(solved, variables, is_gas=solved.uses_gas)}) -> float:",
-        '    """Give left - right of the relation, in SI."""',
-        *_constants(relation, (relation.left, relation.right)),
-        f"    return {write(relation.left)} - ({write(relation.right)})",
-    ])
+    return "\n".join(
+        [
+            f"def {relation.key}_residual({_parameters(variables, is_gas=solved.uses_gas)}) -> float:",
+            '    """Give left - right of the relation, in SI."""',
+            *_constants(relation, (relation.left, relation.right)),
+            f"    return {write(relation.left)} - ({write(relation.right)})",
+        ]
+    )
 
 
 def _slopes(solved: SolvedRelation) -> str:
@@ -159,15 +162,18 @@ def _slopes(solved: SolvedRelation) -> str:
     write = PythonWriter().write
     slopes = [solved.slopes[symbol.name] for symbol in variables]
     lines = [f"        {write(slope)}," for slope in slopes]
+    names = ", ".join(symbol.name for symbol in variables)
     annotation = f"tuple[{', '.join(['float'] * len(variables))}]"
-    return "\n".join([
-        f"def {relation.key}_slopes({_parameters(solved, variables, is_gas=solved.uses_gas)}) -> {annotation}:",
-        f'    """Give the partial derivatives of left - right by {", ".join(symbol.name for symbol in variables)}."""',
-        *_constants(relation, tuple(slopes)),
-        "    return (",
-        *lines,
-        "    )",
-    ])
+    return "\n".join(
+        [
+            f"def {relation.key}_slopes({_parameters(variables, is_gas=solved.uses_gas)}) -> {annotation}:",
+            f'    """Give the partial derivatives of left - right by {names}."""',
+            *_constants(relation, tuple(slopes)),
+            "    return (",
+            *lines,
+            "    )",
+        ]
+    )
 
 
 def _validity_arguments(relation: Relation, validity: Validity) -> list[sympy.Symbol]:
@@ -178,11 +184,13 @@ def _validity_function(relation: Relation, place: int, validity: Validity) -> st
     names = ", ".join(f"{symbol.name}: float" for symbol in _validity_arguments(relation, validity))
     write = PythonWriter().write
     sides = f"{write(evaluated(validity.holds.lhs))} {validity.holds.rel_op} {write(evaluated(validity.holds.rhs))}"
-    return "\n".join([
-        f"def {relation.key}_holds_{place}({names}) -> bool:",
-        '    """Tell whether the relation holds there."""',
-        f"    return {sides}",
-    ])
+    return "\n".join(
+        [
+            f"def {relation.key}_holds_{place}({names}) -> bool:",
+            '    """Tell whether the relation holds there."""',
+            f"    return {sides}",
+        ]
+    )
 
 
 def _value(solved: SolvedRelation, family_key: str) -> str:
@@ -197,25 +205,35 @@ def _value(solved: SolvedRelation, family_key: str) -> str:
         for place, item in enumerate(relation.valid)
     ]
     arguments = tuple(symbol.name for symbol in variables_of(relation)) + (("gas",) if solved.uses_gas else ())
-    return "\n".join([
-        f"{relation.key.upper()} = Relation(",
-        f"    key={relation.key!r},",
-        f"    title={relation.title!r},",
-        f"    family={family_key!r},",
-        f"    text={f'{text(relation.left)} = {text(relation.right)}'!r},",
-        "    variables=(", *variables, "    ),",
-        "    constants=(", *constants, "    ),",
-        "    forms={", *forms, "    },",
-        f"    slopes={relation.key}_slopes,",
-        f"    residual={relation.key}_residual,",
-        f"    arguments={arguments!r},",
-        "    validity=(", *validity, "    ),",
-        f"    assumes={relation.assumes!r},",
-        f"    source={str(relation.source)!r},",
-        f"    example={dict(relation.example)!r},",
-        f"    uses_gas={solved.uses_gas},",
-        ")",
-    ])
+    return "\n".join(
+        [
+            f"{relation.key.upper()} = Relation(",
+            f"    key={relation.key!r},",
+            f"    title={relation.title!r},",
+            f"    family={family_key!r},",
+            f"    text={f'{text(relation.left)} = {text(relation.right)}'!r},",
+            "    variables=(",
+            *variables,
+            "    ),",
+            "    constants=(",
+            *constants,
+            "    ),",
+            "    forms={",
+            *forms,
+            "    },",
+            f"    slopes={relation.key}_slopes,",
+            f"    residual={relation.key}_residual,",
+            f"    arguments={arguments!r},",
+            "    validity=(",
+            *validity,
+            "    ),",
+            f"    assumes={relation.assumes!r},",
+            f"    source={str(relation.source)!r},",
+            f"    example={dict(relation.example)!r},",
+            f"    uses_gas={solved.uses_gas},",
+            ")",
+        ]
+    )
 
 
 def _variable(symbol: sympy.Symbol, meaning: Variable) -> str:
@@ -242,4 +260,3 @@ def form_text(relation: Relation, form: Form) -> str:
     if form.way is Way.CLOSED and form.expression is not None:
         return text(form.expression)
     return f"from {text(relation.left)} = {text(relation.right)}"
-

@@ -118,9 +118,7 @@ def draw_bodies(view: SiteView) -> Iterator[Body]:
             html = env.get_template("law.html").render(root="../", law=law)
             yield Body(f"laws/{law.key}.md", "laws", law.title, html)
     for gas in view.gases:
-        yield Body(
-            f"gases/{gas.key}.md", "gases", gas.title, env.get_template("gas.html").render(root="../", gas=gas)
-        )
+        yield Body(f"gases/{gas.key}.md", "gases", gas.title, env.get_template("gas.html").render(root="../", gas=gas))
 
 
 def group_sheets(view: SiteView) -> dict[str, list[SheetView]]:

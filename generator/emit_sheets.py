@@ -14,10 +14,11 @@ def emit_sheets(routed: Routed) -> Mapping[str, str]:
     sheets = routed.checked.loaded.sheets
     modules = {f"gaswright/jobs/{sheet.key}.py": _module(sheet, routed.routes[sheet.key]) for sheet in sheets}
     titles = "\n".join(f"    {sheet.key!r}: {sheet.title!r}," for sheet in sheets)
+    index = '"""The sheets and their titles, in the order of a day. Generated."""'
     return {
         **modules,
         "gaswright/jobs/__init__.py": '"""The job sheets, one module each. Generated."""\n',
-        "gaswright/jobs/index.py": f'"""The sheets and their titles, in the order of a day. Generated."""\n\nTITLE_OF = {{\n{titles}\n}}\n',
+        "gaswright/jobs/index.py": f"{index}\n\nTITLE_OF = {{\n{titles}\n}}\n",
     }
 
 
@@ -27,35 +28,49 @@ def _module(sheet: Sheet, routes: Mapping[str, Route]) -> str:
     finds = "\n".join(f"        {find.row!r}: {_find(find, routes[find.row])}," for find in sheet.finds)
     plot = (sheet.plot.function, sheet.plot.title) if sheet.plot else None
     names = "Block, Find, Row, Sheet, Step, Use" if "Block(" in finds else "Find, Row, Sheet, Step, Use"
-    return "\n".join([
-        f'"""{sheet.title}: {sheet.lead} Generated from spec/sheets/{sheet.key}.py."""',
-        "",
-        f"from gaswright.model import {names}",
-        "",
-        "SHEET = Sheet(",
-        f"    key={sheet.key!r},",
-        f"    title={sheet.title!r},",
-        f"    lead={sheet.lead!r},",
-        f"    group={sheet.group!r},",
-        f"    rows={{\n{rows}\n    }},",
-        f"    uses=(\n{uses}\n    ),",
-        f"    finds={{\n{finds}\n    }},",
-        f"    cautions={tuple(caution.text for caution in sheet.cautions)!r},",
-        f"    rule={sheet.rule!r},",
-        f"    notes={sheet.notes!r},",
-        f"    example={dict(sheet.example)!r},",
-        f"    plot={plot!r},",
-        ")",
-        "",
-    ])
+    return "\n".join(
+        [
+            f'"""{sheet.title}: {sheet.lead} Generated from spec/sheets/{sheet.key}.py."""',
+            "",
+            f"from gaswright.model import {names}",
+            "",
+            "SHEET = Sheet(",
+            f"    key={sheet.key!r},",
+            f"    title={sheet.title!r},",
+            f"    lead={sheet.lead!r},",
+            f"    group={sheet.group!r},",
+            f"    rows={{\n{rows}\n    }},",
+            f"    uses=(\n{uses}\n    ),",
+            f"    finds={{\n{finds}\n    }},",
+            f"    cautions={tuple(caution.text for caution in sheet.cautions)!r},",
+            f"    rule={sheet.rule!r},",
+            f"    notes={sheet.notes!r},",
+            f"    example={dict(sheet.example)!r},",
+            f"    plot={plot!r},",
+            ")",
+            "",
+        ]
+    )
 
 
 def _row(name: str, row: Row) -> str:
     low = row.kind.low if row.low is None else row.low
     high = row.kind.high if row.high is None else row.high
     values = (
-        name, row.title, row.kind.key, row.note, row.reading, row.site, row.accuracy, low, high, row.unusual_above,
-        row.whole, row.of_gas, row.is_gas, row.optional,
+        name,
+        row.title,
+        row.kind.key,
+        row.note,
+        row.reading,
+        row.site,
+        row.accuracy,
+        low,
+        high,
+        row.unusual_above,
+        row.whole,
+        row.of_gas,
+        row.is_gas,
+        row.optional,
     )
     return f"Row({', '.join(map(repr, values))})"
 

@@ -33,14 +33,21 @@ def emit_tables(units: Iterable[Unit], kinds: Iterable[Kind]) -> str:
 
 
 def _unit(unit: Unit) -> str:
-    zero = unit.zero if unit.zero else Fraction(0)
+    zero = unit.zero or Fraction(0)
     values = (unit.key, float(unit.factor), float(zero), _exponents(unit.dimension), unit.ucum)
     return f"Unit({', '.join(map(repr, values))})"
 
 
 def _kind(kind: Kind) -> str:
     values = (
-        kind.key, kind.title, kind.si, kind.units, kind.low, kind.high, kind.reference, kind.note,
+        kind.key,
+        kind.title,
+        kind.si,
+        kind.units,
+        kind.low,
+        kind.high,
+        kind.reference,
+        kind.note,
         _exponents(kind.dimension),
     )
     return f"Kind({', '.join(map(repr, values))})"

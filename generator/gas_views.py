@@ -8,6 +8,7 @@ from gaswright.gas import Gas, IdealGas
 from gaswright.gas import find as find_gas
 from gaswright.gas import keys as gas_keys
 from gaswright.show import significant
+
 from generator.views import GasView, TableView
 
 PRESSURES_BAR = (1.01325, 10, 50, 100, 150, 200, 300)
@@ -26,12 +27,18 @@ def gas_views() -> tuple[GasView, ...]:
 def _view(gas: Gas) -> GasView:
     identity = gas.identity
     return GasView(
-        key=gas.key, title=gas.title, formula=gas.formula,
+        key=gas.key,
+        title=gas.title,
+        formula=gas.formula,
         identity=(
-            ("Formula", gas.formula), ("Molar mass", f"{significant(gas.molar_mass * 1000, 6)} g/mol"),
-            ("UN number", ", ".join(identity.un)), ("CAS number", identity.cas),
+            ("Formula", gas.formula),
+            ("Molar mass", f"{significant(gas.molar_mass * 1000, 6)} g/mol"),
+            ("UN number", ", ".join(identity.un)),
+            ("CAS number", identity.cas),
         ),
-        hazards=(f"{'; '.join(identity.hazards).capitalize()}. The supplier’s safety data sheet and local rules decide.",),
+        hazards=(
+            f"{'; '.join(identity.hazards).capitalize()}. The supplier’s safety data sheet and local rules decide.",
+        ),
         equation=f"{identity.citation}. DOI {identity.doi}." if identity.doi else f"{identity.citation}.",
         uncertainty=tuple(dict.fromkeys(f"Density: {band.says}." for band in identity.uncertainties)),
         limits=(
@@ -85,7 +92,9 @@ def _content_table(gas: Gas) -> TableView:
         for pressure in PRESSURES_BAR
     )
     return TableView(
-        caption="Content of one litre of water capacity at 15 °C", head=("bar absolute", "real", "ideal law"), rows=rows,
+        caption="Content of one litre of water capacity at 15 °C",
+        head=("bar absolute", "real", "ideal law"),
+        rows=rows,
         note="Litres at 15 °C and 101.325 kPa.",
     )
 

@@ -12,6 +12,7 @@ from gaswright.quantity import in_unit, with_unit
 from gaswright.reading import read
 from gaswright.show import significant
 from gaswright.tables import KINDS
+
 from generator.check import constants_of, variables_of
 from generator.describe import FormText, RelationText
 from generator.load import Case
@@ -28,32 +29,55 @@ CHECK_DIGITS = 6
 
 
 def law_view(
-    relation: Relation, family: Family, text: RelationText, cases: tuple[Case, ...], used_by: tuple[tuple[str, str], ...]
+    relation: Relation,
+    family: Family,
+    text: RelationText,
+    cases: tuple[Case, ...],
+    used_by: tuple[tuple[str, str], ...],
 ) -> RelationView:
     """Give the view of one law."""
     rows = _rows(relation)
     find = _found(relation)
     request = {
-        "do": "relation", "key": relation.key, "find": find,
-        "rows": {row.name: {"text": row.text, "unit": row.unit, "reference": row.reference} for row in rows if row.text},
+        "do": "relation",
+        "key": relation.key,
+        "find": find,
+        "rows": {
+            row.name: {"text": row.text, "unit": row.unit, "reference": row.reference} for row in rows if row.text
+        },
     }
     return RelationView(
-        key=relation.key, title=relation.title, family_key=family.key, family=family.title, mathml=text.mathml,
-        text=text.text, assumes=relation.assumes, validity=tuple(dict.fromkeys(item.says for item in relation.valid)),
-        source=str(relation.source), rows=rows,
+        key=relation.key,
+        title=relation.title,
+        family_key=family.key,
+        family=family.title,
+        mathml=text.mathml,
+        text=text.text,
+        assumes=relation.assumes,
+        validity=tuple(dict.fromkeys(item.says for item in relation.valid)),
+        source=str(relation.source),
+        rows=rows,
         constants=tuple(
             (constant.title, f"{float(constant.value):.15g} {constant.unit}", str(constant.source))
             for constant in constants_of(relation).values()
         ),
-        find=find, forms=tuple(_form(relation, form) for form in text.forms), checks=tuple(map(_check, cases)),
-        answer=answer_relation(request), nature=relation.nature.value, used_by=used_by, words=relation.words,
+        find=find,
+        forms=tuple(_form(relation, form) for form in text.forms),
+        checks=tuple(map(_check, cases)),
+        answer=answer_relation(request),
+        nature=relation.nature.value,
+        used_by=used_by,
+        words=relation.words,
     )
 
 
 def _found(relation: Relation) -> str:
     """Give the unknown of the example: the first variable that it leaves out and that has no default."""
-    return next(symbol.name for symbol, variable in variables_of(relation).items()
-                if symbol.name not in relation.example and variable.default is None)
+    return next(
+        str(symbol.name)
+        for symbol, variable in variables_of(relation).items()
+        if symbol.name not in relation.example and variable.default is None
+    )
 
 
 def _rows(relation: Relation) -> tuple[RowView, ...]:
@@ -65,11 +89,20 @@ def _rows(relation: Relation) -> tuple[RowView, ...]:
     kinds = {variable.kind.key for variable in variables_of(relation).values()}
     if kinds & set(COUNTED) and "station_pressure" not in kinds:
         typed = split(scenario.STATION_PRESSURE, STATION_PRESSURE)
-        rows.append(RowView(
-            name=STATION, title="Station pressure", kind="station_pressure", units=STATION_PRESSURE.units,
-            references=("absolute",), text=typed.text, unit=typed.unit, reference="absolute", is_optional=True,
-            note="for readings in gauge or vacuum",
-        ))
+        rows.append(
+            RowView(
+                name=STATION,
+                title="Station pressure",
+                kind="station_pressure",
+                units=STATION_PRESSURE.units,
+                references=("absolute",),
+                text=typed.text,
+                unit=typed.unit,
+                reference="absolute",
+                is_optional=True,
+                note="for readings in gauge or vacuum",
+            )
+        )
     return tuple(rows)
 
 
@@ -78,10 +111,17 @@ def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowVi
     typed = split(relation.example.get(name, default), variable.kind)
     unit = typed.unit if name in relation.example else _like(relation, variable) or typed.unit
     return RowView(
-        name=name, title=f"{variable.text[:1].upper()}{variable.text[1:]}", symbol=symbol_text(name),
-        mathml=mathml(symbol_latex(name), display="inline"), kind=variable.kind.key,
-        units=units_of(variable.kind, unit), references=REFERENCES.get(variable.kind.key, ()), text=typed.text,
-        unit=unit, reference=typed.reference, is_found=name == found,
+        name=name,
+        title=f"{variable.text[:1].upper()}{variable.text[1:]}",
+        symbol=symbol_text(name),
+        mathml=mathml(symbol_latex(name), display="inline"),
+        kind=variable.kind.key,
+        units=units_of(variable.kind, unit),
+        references=REFERENCES.get(variable.kind.key, ()),
+        text=typed.text,
+        unit=unit,
+        reference=typed.reference,
+        is_found=name == found,
         may_be_negative=variable.sign is Sign.ANY or may_be_negative(variable.kind),
         is_optional=variable.default is not None,
     )
@@ -89,8 +129,11 @@ def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowVi
 
 def _like(relation: Relation, variable: Variable) -> str:
     """Give the unit of an example reading of the same kind."""
-    same = (symbol.name for symbol, other in variables_of(relation).items()
-            if other.kind == variable.kind and symbol.name in relation.example)
+    same = (
+        symbol.name
+        for symbol, other in variables_of(relation).items()
+        if other.kind == variable.kind and symbol.name in relation.example
+    )
     name = next(same, "")
     return split(relation.example[name], variable.kind).unit if name else ""
 
@@ -103,9 +146,14 @@ def _form(relation: Relation, form: FormText) -> FormView:
         if name != form.unknown and variable.kind.si != "1":
             notes.setdefault(f"in {variable.kind.si}. {variable.kind.note}".strip(), []).append(symbol_text(name))
     return FormView(
-        unknown=form.unknown, symbol=form.symbol, mathml=form.mathml, text=form.text,
-        way=f"{form.way}; {form.proof}", unit_note=f"{form.symbol} in {own.si}." if own.si != "1" else "A number.",
-        argument_notes=tuple(f"{', '.join(names)} {note}" for note, names in notes.items()), sensitivities=form.sensitivities,
+        unknown=form.unknown,
+        symbol=form.symbol,
+        mathml=form.mathml,
+        text=form.text,
+        way=f"{form.way}; {form.proof}",
+        unit_note=f"{form.symbol} in {own.si}." if own.si != "1" else "A number.",
+        argument_notes=tuple(f"{', '.join(names)} {note}" for note, names in notes.items()),
+        sensitivities=form.sensitivities,
     )
 
 
@@ -122,4 +170,5 @@ def _check(case: Case) -> CheckView:
 
 
 def _kind_of(case: Case) -> str:
-    return find_law(case.relation).variable(case.find).kind
+    kind: str = find_law(case.relation).variable(case.find).kind
+    return kind

@@ -51,23 +51,39 @@ def _used_by(sheets: tuple[Sheet, ...]) -> dict[str, tuple[tuple[str, str], ...]
 
 def _units_table(routed: Routed) -> TableView:
     rows = tuple(
-        (unit.key, unit.ucum, f"{float(unit.factor):.10g}", f"{float(unit.zero):g}" if unit.zero else "",
-         str(unit.dimension), str(unit.source))
+        (
+            unit.key,
+            unit.ucum,
+            f"{float(unit.factor):.10g}",
+            f"{float(unit.zero):g}" if unit.zero else "",
+            str(unit.dimension),
+            str(unit.source),
+        )
         for unit in routed.checked.loaded.units
     )
     return TableView(
-        caption="Units", head=("Unit", "UCUM code", "Factor to SI", "Added first", "SI base units", "Source"), rows=rows,
+        caption="Units",
+        head=("Unit", "UCUM code", "Factor to SI", "Added first", "SI base units", "Source"),
+        rows=rows,
         note="SI value = (reading + what is added first) × factor. Factors are kept exactly and shown to ten digits.",
     )
 
 
 def _constants_table(routed: Routed) -> TableView:
     found = {
-        constant.title: (constant.title, str(symbol), f"{float(constant.value):.15g}", constant.unit, str(constant.source))
+        constant.title: (
+            constant.title,
+            str(symbol),
+            f"{float(constant.value):.15g}",
+            constant.unit,
+            str(constant.source),
+        )
         for relation in routed.checked.loaded.relations()
         for symbol, constant in constants_of(relation).items()
     }
     return TableView(
-        caption="Constants", head=("Constant", "Symbol", "Value", "Unit", "Source"),
-        rows=tuple(found[title] for title in sorted(found)), note="Exact by definition.",
+        caption="Constants",
+        head=("Constant", "Symbol", "Value", "Unit", "Source"),
+        rows=tuple(found[title] for title in sorted(found)),
+        note="Exact by definition.",
     )

@@ -9,7 +9,8 @@ import tomllib
 from collections.abc import Mapping
 from pathlib import Path
 
-from generator.check import Checked, check as check_spec
+from generator.check import Checked
+from generator.check import check as check_spec
 from generator.describe import RelationText, describe
 from generator.emit_engine import emit_relations
 from generator.emit_pages import emit_pages

@@ -18,8 +18,21 @@ from spec.symbols import GAS_FUNCTIONS
 SUM, PRODUCT, SIGN, POWER, ATOM = range(5)
 FUNCTIONS = {"log": "log", "exp": "exp", "sin": "sin", "cos": "cos", "asin": "asin", "erf": "erf"}
 GREEK = {
-    "alpha": "α", "beta": "β", "gamma": "γ", "eta": "η", "theta": "θ", "kappa": "κ", "lam": "λ", "mu": "μ", "nu": "ν",
-    "omega": "ω", "phi": "φ", "psi": "ψ", "rho": "ρ", "eps": "ε", "pi": "π",
+    "alpha": "α",
+    "beta": "β",
+    "gamma": "γ",
+    "eta": "η",
+    "theta": "θ",
+    "kappa": "κ",
+    "lam": "λ",
+    "mu": "μ",
+    "nu": "ν",
+    "omega": "ω",
+    "phi": "φ",
+    "psi": "ψ",
+    "rho": "ρ",
+    "eps": "ε",
+    "pi": "π",
 }
 LATEX = {"lam": r"\lambda", "eps": r"\varepsilon"}
 LOW_DIGITS = str.maketrans("0123456789", "₀₁₂₃₄₅₆₇₈₉")
@@ -64,20 +77,24 @@ class LineWriter:
         return text if level >= least else f"({text})"
 
     def _walk(self, expression: sympy.Expr) -> tuple[str, int]:
-        if isinstance(expression, sympy.Symbol):
-            return self.symbol(expression.name), ATOM
+        """Give the text of an expression and how tightly it binds."""
         if expression is sympy.pi:
             return self.constant("pi"), ATOM
-        if isinstance(expression, sympy.Rational):
-            level = ATOM if expression.is_integer and expression >= 0 else SIGN if expression < 0 else PRODUCT
-            return self.number(expression), level
-        if isinstance(expression, sympy.Add):
-            return self._sum(expression), SUM
-        if isinstance(expression, sympy.Mul):
-            return self._product(expression)
-        if isinstance(expression, sympy.Pow):
-            return self._power(expression)
-        return self._call(expression), ATOM
+        match expression:
+            case sympy.Symbol():
+                found = self.symbol(expression.name), ATOM
+            case sympy.Rational():
+                level = ATOM if expression.is_integer and expression >= 0 else SIGN if expression < 0 else PRODUCT
+                found = self.number(expression), level
+            case sympy.Add():
+                found = self._sum(expression), SUM
+            case sympy.Mul():
+                found = self._product(expression)
+            case sympy.Pow():
+                found = self._power(expression)
+            case _:
+                found = self._call(expression), ATOM
+        return found
 
     def _sum(self, expression: sympy.Add) -> str:
         text = ""
@@ -249,7 +266,11 @@ def latex(expression: sympy.Expr) -> str:
     """Give an unevaluated expression in LaTeX, in the order it was written."""
     names = {symbol: symbol_latex(symbol.name) for symbol in expression.free_symbols}
     text = sympy.latex(flatten(expression), order="none", symbol_names=names)
-    return str(text).replace(r"\operatorname{rho_{gas}}", r"\rho_{\mathrm{gas}}").replace(r"\rho_{gas}", r"\rho_{\mathrm{gas}}")
+    return (
+        str(text)
+        .replace(r"\operatorname{rho_{gas}}", r"\rho_{\mathrm{gas}}")
+        .replace(r"\rho_{gas}", r"\rho_{\mathrm{gas}}")
+    )
 
 
 def mathml(text: str, *, display: str = "block") -> str:

@@ -19,9 +19,15 @@ DIGITS = 50
 MODEST = 40
 GRID = 24
 USUAL = {
-    "absolute_pressure": (1e4, 3e7), "gauge_pressure": (-5e4, 3e7), "station_pressure": (6e4, 1.1e5),
-    "vacuum_pressure": (1e2, 5e4), "absolute_temperature": (200.0, 400.0), "celsius_temperature": (-60.0, 120.0),
-    "compressibility_factor": (0.5, 1.5), "molar_mass": (2e-3, 0.15), "temperature_constant": (50.0, 300.0),
+    "absolute_pressure": (1e4, 3e7),
+    "gauge_pressure": (-5e4, 3e7),
+    "station_pressure": (6e4, 1.1e5),
+    "vacuum_pressure": (1e2, 5e4),
+    "absolute_temperature": (200.0, 400.0),
+    "celsius_temperature": (-60.0, 120.0),
+    "compressibility_factor": (0.5, 1.5),
+    "molar_mass": (2e-3, 0.15),
+    "temperature_constant": (50.0, 300.0),
 }
 
 
@@ -35,11 +41,14 @@ def usual_range(variable: Variable) -> tuple[float, float]:
 def states(relation: Relation, count: int) -> Iterator[dict[sympy.Symbol, sympy.Float]]:
     """Draw ``count`` states of all variables, with the constants, at 50 digits."""
     source = random.Random(relation.key)  # noqa: S311 - sampling, not secrecy; seeded so that builds repeat
-    fixed = {symbol: sympy.Rational(constant.value.numerator, constant.value.denominator)
-             for symbol, constant in constants_of(relation).items()}
+    fixed = {
+        symbol: sympy.Rational(constant.value.numerator, constant.value.denominator)
+        for symbol, constant in constants_of(relation).items()
+    }
     for _ in range(count):
-        state = {symbol: sympy.Float(_draw(source, variable), DIGITS)
-                 for symbol, variable in variables_of(relation).items()}
+        state = {
+            symbol: sympy.Float(_draw(source, variable), DIGITS) for symbol, variable in variables_of(relation).items()
+        }
         yield {**fixed, **state}
 
 
@@ -59,18 +68,23 @@ def prove_closed(relation: Relation, unknown: sympy.Symbol, form: sympy.Expr, re
         found = sympy.N(form.subs(state).doit(), DIGITS)
         if not found.is_real or (unknown.is_positive and found <= 0) or (unknown.is_nonnegative and found < 0):
             continue
-        left, right = (sympy.N(side.subs({**state, unknown: found}).doit(), DIGITS)
-                       for side in (relation.left, relation.right))
+        left, right = (
+            sympy.N(side.subs({**state, unknown: found}).doit(), DIGITS) for side in (relation.left, relation.right)
+        )
         if abs(left - right) > sympy.Float("1e-35", DIGITS) * max(abs(left), abs(right)):
             raise SpecError(
-                where=f"relation {relation.key}, unknown {unknown}", found=f"a form that misses by {left - right}",
-                expected="a residual of zero when it is put back", todo="correct the branch or the equation",
+                where=f"relation {relation.key}, unknown {unknown}",
+                found=f"a form that misses by {left - right}",
+                expected="a residual of zero when it is put back",
+                todo="correct the branch or the equation",
             )
         sampled += 1
     if not sampled and not is_identity:
         raise SpecError(
-            where=f"relation {relation.key}, unknown {unknown}", found="no sampled state that gives a real value",
-            expected="at least one state of the field's range", todo="widen the ranges or name a branch",
+            where=f"relation {relation.key}, unknown {unknown}",
+            found="no sampled state that gives a real value",
+            expected="at least one state of the field's range",
+            todo="widen the ranges or name a branch",
         )
     return "put back: identically zero" if is_identity else f"put back: zero to 35 digits at {sampled} states"
 

@@ -8,13 +8,11 @@ from collections.abc import Iterator, Mapping
 from dataclasses import dataclass
 from itertools import product
 
-import networkx
+import networkx as nx
 
 from generator.check import Checked
 from generator.errors import SpecError
 from spec.model import Sheet
-
-Graph = networkx.DiGraph
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -68,12 +66,16 @@ def _misbound(sheet: Sheet) -> Iterator[SpecError]:
         names = {symbol.name for symbol in use.relation.where if not hasattr(use.relation.where[symbol], "value")}
         for name in names ^ set(use.rows):
             yield SpecError(
-                f"sheet {sheet.key}, use {place + 1} of {use.relation.key}", f"the variable {name} bound on one side only",
-                f"rows for exactly {', '.join(sorted(names))}", "bind every variable of the relation once",
+                f"sheet {sheet.key}, use {place + 1} of {use.relation.key}",
+                f"the variable {name} bound on one side only",
+                f"rows for exactly {', '.join(sorted(names))}",
+                "bind every variable of the relation once",
             )
         for row in [row for row in use.rows.values() if row not in sheet.rows]:
             yield SpecError(
-                f"sheet {sheet.key}, use {place + 1} of {use.relation.key}", f"the row {row}", "a row of the sheet",
+                f"sheet {sheet.key}, use {place + 1} of {use.relation.key}",
+                f"the row {row}",
+                "a row of the sheet",
                 f"add {row} to rows or correct the name",
             )
 
@@ -84,8 +86,9 @@ def route_sheet(sheet: Sheet, find: str) -> Route:
     matching = _match(sheet, range(len(sheet.uses)), unknowns)
     if matching is None:
         raise SpecError(
-            f"sheet {sheet.key}, row {find}", f"{len(sheet.uses)} uses for {len(unknowns)} rows to work out, "
-            "which do not determine one another", "one use for each row that is worked out and for the row to find",
+            f"sheet {sheet.key}, row {find}",
+            f"{len(sheet.uses)} uses for {len(unknowns)} rows to work out, which do not determine one another",
+            "one use for each row that is worked out and for the row to find",
             f"add the relation that is missing, or take {find} out of finds",
         )
     parts: list[Step | Block] = []
@@ -104,29 +107,33 @@ def _step(sheet: Sheet, use: int, row: str) -> Step:
 
 def _match(sheet: Sheet, uses: range | list[int], rows: list[str]) -> Mapping[int, str] | None:
     """Give each use the row it works out, or None where there is no perfect matching."""
-    graph = networkx.Graph()
+    graph = nx.Graph()
     graph.add_nodes_from(("use", use) for use in uses)
     graph.add_nodes_from(("row", row) for row in rows)
-    graph.add_edges_from((("use", use), ("row", row)) for use in uses for row in rows
-                         if list(sheet.uses[use].rows.values()).count(row) == 1)
+    graph.add_edges_from(
+        (("use", use), ("row", row))
+        for use in uses
+        for row in rows
+        if list(sheet.uses[use].rows.values()).count(row) == 1
+    )
     if len(rows) != len(uses):
         return None
-    found = networkx.bipartite.maximum_matching(graph, top_nodes=[("use", use) for use in uses])
+    found = nx.bipartite.maximum_matching(graph, top_nodes=[("use", use) for use in uses])
     matching = {use: found[("use", use)][1] for use in uses if ("use", use) in found}
     return matching if len(matching) == len(rows) else None
 
 
 def _ordered(sheet: Sheet, matching: Mapping[int, str]) -> Iterator[list[int]]:
     """Give the strongly connected groups of uses, each after those it depends on."""
-    graph: Graph = networkx.DiGraph()
+    graph = nx.DiGraph()
     graph.add_nodes_from(sorted(matching))
     giver = {row: use for use, row in matching.items()}
     for use in sorted(matching):
         for row in sheet.uses[use].rows.values():
             if row in giver and giver[row] != use:
                 graph.add_edge(giver[row], use)
-    groups = networkx.condensation(graph)
-    for group in networkx.lexicographical_topological_sort(groups, key=lambda node: min(groups.nodes[node]["members"])):
+    groups = nx.condensation(graph)
+    for group in nx.lexicographical_topological_sort(groups, key=lambda node: min(groups.nodes[node]["members"])):
         yield sorted(groups.nodes[group]["members"])
 
 
@@ -137,13 +144,15 @@ def _tear(sheet: Sheet, find: str, uses: list[int], rows: list[str]) -> Block:
         rest_uses = [use for use in uses if use != kept]
         rest_rows = [row for row in rows if row != torn]
         matching = _match(sheet, rest_uses, rest_rows)
-        if matching is None or torn not in sheet.uses[kept].rows.values() and not rest_rows:
+        if matching is None or (torn not in sheet.uses[kept].rows.values() and not rest_rows):
             continue
         order = list(_ordered(sheet, matching))
         if all(len(group) == 1 for group in order):
             steps = tuple(_step(sheet, group[0], matching[group[0]]) for group in order)
             return Block(torn=torn, use=kept, steps=steps)
     raise SpecError(
-        f"sheet {sheet.key}, row {find}", f"the rows {', '.join(rows)}, which one guess does not untie",
-        "a block that one guessed row makes explicit", "split the block with a relation that gives one of its rows",
+        f"sheet {sheet.key}, row {find}",
+        f"the rows {', '.join(rows)}, which one guess does not untie",
+        "a block that one guessed row makes explicit",
+        "split the block with a relation that gives one of its rows",
     )

@@ -7,15 +7,23 @@ from typing import NamedTuple
 
 from gaswright.reading import read
 from gaswright.tables import KINDS
+
 from spec.model import Kind
 
 REFERENCES = {
-    "absolute_pressure": ("absolute", "gauge", "vacuum"), "gauge_pressure": ("gauge", "absolute", "vacuum"),
-    "vacuum_pressure": ("vacuum",), "station_pressure": ("absolute",),
+    "absolute_pressure": ("absolute", "gauge", "vacuum"),
+    "gauge_pressure": ("gauge", "absolute", "vacuum"),
+    "vacuum_pressure": ("vacuum",),
+    "station_pressure": ("absolute",),
 }
 MEASURES = (
-    ("pressure", "pressure"), ("temperature_constant", ""), ("temperature", "temperature"), ("flow", "flow"),
-    ("volume", "volume"), ("mass", "mass"), ("time", "time"),
+    ("pressure", "pressure"),
+    ("temperature_constant", ""),
+    ("temperature", "temperature"),
+    ("flow", "flow"),
+    ("volume", "volume"),
+    ("mass", "mass"),
+    ("time", "time"),
 )
 UNMEASURED = ("molar_mass", "molar_volume", "molar_flow")
 

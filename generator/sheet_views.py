@@ -6,6 +6,7 @@ Takes a sheet of the spec; gives its SheetView. Next: generator.make_views.
 from gaswright.answer import answer_sheet
 from gaswright.gas import find as find_gas
 from gaswright.gas import keys as gas_keys
+
 from generator.row_views import REFERENCES, may_be_negative, measures, split, units_of
 from generator.views import FindView, RowView, SheetView
 from spec.model import Find, Row, Sheet
@@ -15,16 +16,25 @@ def sheet_view(sheet: Sheet) -> SheetView:
     """Give the view of one sheet."""
     rows = tuple(_row(name, row, sheet) for name, row in sheet.rows.items() if row.reading)
     request = {
-        "do": "sheet", "key": sheet.key, "find": sheet.finds[0].row,
+        "do": "sheet",
+        "key": sheet.key,
+        "find": sheet.finds[0].row,
         "readings": {row.name: _typed(row) for row in rows if row.text},
         "show": {"unit": sheet.finds[0].unit},
     }
     return SheetView(
-        key=sheet.key, title=sheet.title, lead=sheet.lead, group=sheet.group,
-        finds=tuple(_find(find, sheet) for find in sheet.finds), rows=rows,
-        cautions=tuple(caution.text for caution in sheet.cautions), rule=sheet.rule,
-        answer=answer_sheet(request), request=request,
-        uses=tuple((use.relation.key, use.relation.title) for use in sheet.uses), words=sheet.words,
+        key=sheet.key,
+        title=sheet.title,
+        lead=sheet.lead,
+        group=sheet.group,
+        finds=tuple(_find(find, sheet) for find in sheet.finds),
+        rows=rows,
+        cautions=tuple(caution.text for caution in sheet.cautions),
+        rule=sheet.rule,
+        answer=answer_sheet(request),
+        request=request,
+        uses=tuple((use.relation.key, use.relation.title) for use in sheet.uses),
+        words=sheet.words,
     )
 
 
@@ -41,12 +51,24 @@ def _find(find: Find, sheet: Sheet) -> FindView:
 def _row(name: str, row: Row, sheet: Sheet) -> RowView:
     if row.is_gas:
         choices = tuple((key, f"{find_gas(key).title}, {find_gas(key).formula}") for key in gas_keys())
-        return RowView(name=name, title=row.title, note=row.note, is_gas=True, text=sheet.example[name], choices=choices)
+        return RowView(
+            name=name, title=row.title, note=row.note, is_gas=True, text=sheet.example[name], choices=choices
+        )
     typed = split(sheet.example.get(name, ""), row.kind)
     return RowView(
-        name=name, title=row.title, kind=row.kind.key, units=units_of(row.kind, typed.unit),
-        references=REFERENCES.get(row.kind.key, ()), text=typed.text, unit=typed.unit, reference=typed.reference,
-        note=row.note, site=row.site, accuracy=row.accuracy,
-        measures="" if row.accuracy == "exact" else measures(row.kind), may_be_negative=may_be_negative(row.kind),
-        is_found=name == sheet.finds[0].row, is_optional=row.optional,
+        name=name,
+        title=row.title,
+        kind=row.kind.key,
+        units=units_of(row.kind, typed.unit),
+        references=REFERENCES.get(row.kind.key, ()),
+        text=typed.text,
+        unit=typed.unit,
+        reference=typed.reference,
+        note=row.note,
+        site=row.site,
+        accuracy=row.accuracy,
+        measures="" if row.accuracy == "exact" else measures(row.kind),
+        may_be_negative=may_be_negative(row.kind),
+        is_found=name == sheet.finds[0].row,
+        is_optional=row.optional,
     )

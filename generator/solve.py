@@ -1,9 +1,8 @@
 """Solve every relation for every unknown and prove each form.
 
-Takes a checked relation; gives ``SolvedRelation``: per unknown a closed form, a polynomial with a named root, an inverse of the gas
-model, or a bracketed numeric form; and the slopes of left - right by every variable, from which the sensitivity of
-any unknown to any reading is -F_x/F_y. Next: generator.describe turns them
-into text.
+Takes a checked relation; gives ``SolvedRelation``: per unknown a closed form, a polynomial with a named root, an
+inverse of the gas model, or a bracketed numeric form; and the slopes of left - right by every variable, from which
+the sensitivity of any unknown to any reading is -F_x/F_y. Next: generator.describe turns them into text.
 """
 
 from collections.abc import Mapping
@@ -13,7 +12,7 @@ from enum import Enum
 import sympy
 
 from generator.arrange import arrange, flatten
-from generator.check import constants_of, variables_of
+from generator.check import variables_of
 from generator.errors import SpecError
 from generator.isolate import isolate
 from generator.prove import is_monotonic, prove_closed
@@ -95,7 +94,9 @@ def _form(relation: Relation, unknown: sympy.Symbol, left: sympy.Expr, right: sy
     if closed is not None:
         proof = prove_closed(relation, unknown, closed, left - right)
         return Form(unknown=unknown, way=Way.CLOSED, arguments=arguments, expression=closed, proof=proof)
-    return _polynomial(relation, unknown, left - right, arguments) or _numeric(relation, unknown, left - right, arguments)
+    return _polynomial(relation, unknown, left - right, arguments) or _numeric(
+        relation, unknown, left - right, arguments
+    )
 
 
 def _textbook(relation: Relation, unknown: sympy.Symbol) -> sympy.Expr | None:
@@ -137,8 +138,12 @@ def _gas_form(
             place = call.args.index(unknown)
             inputs = tuple(value if argument == unknown else argument for argument in call.args)
             return Form(
-                unknown=unknown, way=Way.GAS, arguments=arguments, method=GAS_FUNCTIONS[name].inverses[place],
-                method_arguments=inputs, proof="inverse of the gas model, shown by its own tests",
+                unknown=unknown,
+                way=Way.GAS,
+                arguments=arguments,
+                method=GAS_FUNCTIONS[name].inverses[place],
+                method_arguments=inputs,
+                proof="inverse of the gas model, shown by its own tests",
             )
     return None
 
@@ -159,7 +164,11 @@ def _polynomial(
         )
     coefficients = tuple(arrange(part, order_of(relation)) for part in polynomial.all_coeffs())
     return Form(
-        unknown=unknown, way=Way.POLYNOMIAL, arguments=arguments, coefficients=coefficients, root=branch.root,
+        unknown=unknown,
+        way=Way.POLYNOMIAL,
+        arguments=arguments,
+        coefficients=coefficients,
+        root=branch.root,
         proof=f"all real roots bracketed by those of the derivative; the {branch.root.value} taken: {branch.why}",
     )
 
@@ -175,7 +184,8 @@ def _numeric(
             todo=f"add Branch(unknown={unknown}, root=..., why=...) to branches, or narrow the kind's range",
         )
     return Form(
-        unknown=unknown, way=Way.NUMERIC, arguments=arguments,
+        unknown=unknown,
+        way=Way.NUMERIC,
+        arguments=arguments,
         proof="residual monotonic over sampled states of the range: one root at most, bracketed",
     )
-

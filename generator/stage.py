@@ -32,7 +32,8 @@ def spec_digest(texts: Mapping[str, str]) -> str:
 
 def version_text(version: str, digest: str) -> str:
     """Give the module that tells which version and which spec the engine is."""
-    return f'"""The version of the engine and the digest of its spec. Generated."""\n\nVERSION = {version!r}\nDIGEST = {digest!r}\n'
+    head = '"""The version of the engine and the digest of its spec. Generated."""'
+    return f"{head}\n\nVERSION = {version!r}\nDIGEST = {digest!r}\n"
 
 
 def use_engine(folder: Path) -> None:

@@ -1,0 +1,1 @@
+"""What is true: kinds, units, relations, sheets, gases, and numbers from outside. Imports sympy and itself only."""

@@ -10,22 +10,37 @@ from spec.model import Constant
 from spec.sources import CODATA, ISO_80000_4, SI_BROCHURE
 
 BOLTZMANN_CONSTANT = Constant(
-    title="Boltzmann constant", value=Fraction("1.380649e-23"), unit="J/K", dimension=dim.ENERGY / dim.TEMPERATURE,
+    title="Boltzmann constant",
+    value=Fraction("1.380649e-23"),
+    unit="J/K",
+    dimension=dim.ENERGY / dim.TEMPERATURE,
     source=SI_BROCHURE.at("section 2.2, defining constants, exact"),
 )
 AVOGADRO_CONSTANT = Constant(
-    title="Avogadro constant", value=Fraction("6.02214076e23"), unit="1/mol", dimension=dim.NUMBER / dim.AMOUNT,
+    title="Avogadro constant",
+    value=Fraction("6.02214076e23"),
+    unit="1/mol",
+    dimension=dim.NUMBER / dim.AMOUNT,
     source=SI_BROCHURE.at("section 2.2, defining constants, exact"),
 )
 MOLAR_GAS_CONSTANT = Constant(
-    title="molar gas constant", value=Fraction("8.31446261815324"), unit="J/(mol·K)", dimension=dim.MOLAR_HEAT,
+    title="molar gas constant",
+    value=Fraction("8.31446261815324"),
+    unit="J/(mol·K)",
+    dimension=dim.MOLAR_HEAT,
     source=CODATA.at("molar gas constant, exact product of k and N_A"),
 )
 STANDARD_GRAVITY = Constant(
-    title="standard acceleration of free fall", value=Fraction("9.80665"), unit="m/s²", dimension=dim.ACCELERATION,
+    title="standard acceleration of free fall",
+    value=Fraction("9.80665"),
+    unit="m/s²",
+    dimension=dim.ACCELERATION,
     source=ISO_80000_4.at("standard acceleration of free fall, 3rd CGPM 1901, exact"),
 )
 ICE_POINT = Constant(
-    title="zero of the Celsius scale", value=Fraction("273.15"), unit="K", dimension=dim.TEMPERATURE,
+    title="zero of the Celsius scale",
+    value=Fraction("273.15"),
+    unit="K",
+    dimension=dim.TEMPERATURE,
     source=SI_BROCHURE.at("section 2.3.1, definition of Celsius temperature, exact"),
 )

@@ -112,7 +112,7 @@ class Constant:
     value: Fraction
     unit: str
     dimension: Dimension
-    source: Citation
+    source: Citation | None = None
 
 
 @dataclass(frozen=True, slots=True)
@@ -154,7 +154,7 @@ class Branch:
 class Relation:
     """One equation ``left = right``, written once.
 
-    ``where`` maps each symbol to its meaning in textbook order, which labels, signatures and printing follow.
+    ``source`` may only be missing until generator.check has asked for it. ``where`` maps each symbol to its meaning in textbook order, which labels, signatures and printing follow.
     ``example`` holds typed readings of the invented demo scenario; the unknown that is left out is the one found.
     """
 
@@ -164,8 +164,8 @@ class Relation:
     right: sympy.Expr
     where: Mapping[sympy.Symbol, Variable | Constant | GasName]
     assumes: tuple[str, ...]
-    source: Citation
     example: Mapping[str, str]
+    source: Citation | None = None
     valid: tuple[Validity, ...] = ()
     branches: tuple[Branch, ...] = ()
     nature: Nature = Nature.LAW

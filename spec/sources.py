@@ -37,19 +37,23 @@ AVOGADRO_1811 = Source(
     key="avogadro", work="Avogadro, Essai d'une manière de déterminer les masses relatives, J. Phys. 73 (1811) 58"
 )
 GRAHAM_1848 = Source(
-    key="graham", work="Graham, On the motion of gases, Phil. Trans. R. Soc. 136 (1846) 573 and 139 (1849) 349",
+    key="graham",
+    work="Graham, On the motion of gases, Phil. Trans. R. Soc. 136 (1846) 573 and 139 (1849) 349",
     note=FROM_MEMORY,
 )
 MAXWELL_1860 = Source(
-    key="maxwell", work="Maxwell, Illustrations of the dynamical theory of gases, Phil. Mag. 19 (1860) 19",
+    key="maxwell",
+    work="Maxwell, Illustrations of the dynamical theory of gases, Phil. Mag. 19 (1860) 19",
     note=FROM_MEMORY,
 )
 VAN_DER_WAALS_1873 = Source(
-    key="van_der_waals", work="van der Waals, Over de continuiteit van den gas- en vloeistoftoestand, Leiden 1873",
+    key="van_der_waals",
+    work="van der Waals, Over de continuiteit van den gas- en vloeistoftoestand, Leiden 1873",
     note=FROM_MEMORY,
 )
 SUTHERLAND_1893 = Source(
-    key="sutherland", work="Sutherland, The viscosity of gases and molecular force, Phil. Mag. 36 (1893) 507",
+    key="sutherland",
+    work="Sutherland, The viscosity of gases and molecular force, Phil. Mag. 36 (1893) 507",
     note=FROM_MEMORY,
 )
 CFR_1065 = Source(key="cfr1065", work="Code of Federal Regulations, title 40, part 1065, Engine-testing procedures")

@@ -3,12 +3,19 @@
 Takes names; gives sympy symbols and functions. Next: the family files write their relations with them.
 """
 
+from contextlib import AbstractContextManager
 from dataclasses import dataclass
 
 import sympy
 
 from spec import kinds
 from spec.model import Kind
+
+
+def as_printed() -> AbstractContextManager[None]:
+    """Keep what is written inside in the textbook's order: sympy evaluates nothing there."""
+    kept: AbstractContextManager[None] = sympy.evaluate(False)  # noqa: FBT003 - sympy's own signature
+    return kept
 
 
 def positive(names: str) -> tuple[sympy.Symbol, ...]:

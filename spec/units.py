@@ -24,11 +24,21 @@ PSI = POUND * G_N / INCH**2
 
 
 def _unit(  # noqa: PLR0913 - one line for each unit of a long table
-    key: str, dimension: dim.Dimension, factor: Fraction | str | int, ucum: str, source: Citation, *spellings: str,
+    key: str,
+    dimension: dim.Dimension,
+    factor: Fraction | str | int,
+    ucum: str,
+    source: Citation,
+    *spellings: str,
     zero: Fraction | str | int = 0,
 ) -> Unit:
     return Unit(
-        key=key, dimension=dimension, factor=Fraction(factor), ucum=ucum, source=source, zero=Fraction(zero),
+        key=key,
+        dimension=dimension,
+        factor=Fraction(factor),
+        ucum=ucum,
+        source=source,
+        zero=Fraction(zero),
         spellings=spellings,
     )
 
@@ -48,7 +58,9 @@ PRESSURE = (
     _unit("mmHg", dim.PRESSURE, MMHG, "mm[Hg]", B8, "mm Hg", "mmhg"),
     _unit("cmHg", dim.PRESSURE, MMHG * 10, "cm[Hg]", B8, "cm Hg"),
     _unit("inHg", dim.PRESSURE, MERCURY * INCH, "[in_i'Hg]", B8, "in Hg", "in. Hg", "inhg", '"Hg', '" Hg', "in.Hg"),
-    _unit("inH2O", dim.PRESSURE, 1000 * G_N * INCH, "[in_i'H2O]", B8, "inH₂O", "in H2O", "inWC", "in WC", '"wc', "in wg"),
+    _unit(
+        "inH2O", dim.PRESSURE, 1000 * G_N * INCH, "[in_i'H2O]", B8, "inH₂O", "in H2O", "inWC", "in WC", '"wc', "in wg"
+    ),
     _unit("mmH2O", dim.PRESSURE, G_N, "mm[H2O]", B8, "mmH₂O", "mmWC", "mm WC", "mm wg"),
     _unit("inHg(60°F)", dim.PRESSURE, "3376.85", "3376.85 Pa", B8, "inHg(60F)"),
     _unit("inH2O(39.2°F)", dim.PRESSURE, "249.082", "249.082 Pa", B8, "inH2O(4°C)"),

@@ -1,17 +1,15 @@
 """Family A: pressure and columns."""
 
-from sympy import evaluate
-
 from spec import kinds
 from spec.model import Family, Relation, Sign, Validity, Variable
 from spec.sources import EN_837_1, ISO_80000_4, OPENSTAX_PHYSICS_1
-from spec.symbols import nonnegative, positive, real
+from spec.symbols import as_printed, nonnegative, positive, real
 
 p, F, A, dp, rho, g, h, p_atm = positive("p F A dp rho g h p_atm")
 p_abs, p_vac = nonnegative("p_abs p_vac")
 (p_gauge,) = real("p_gauge")
 
-with evaluate(False):
+with as_printed():
     FORCE_PRESSURE = Relation(
         key="force_pressure",
         title="Pressure of a force on an area",

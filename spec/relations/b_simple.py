@@ -1,11 +1,9 @@
 """Family B: simple gas laws."""
 
-from sympy import evaluate
-
 from spec import kinds
 from spec.model import Family, Relation, Sign, Variable
 from spec.sources import AVOGADRO_1811, BOYLE_1662, GAY_LUSSAC_1802, OPENSTAX_CHEMISTRY, OPENSTAX_PHYSICS_2
-from spec.symbols import positive, real
+from spec.symbols import as_printed, positive, real
 from spec.validity import ideal_at
 
 p_1, p_2, V_1, V_2, n_1, n_2, T_1, T_2 = positive("p_1 p_2 V_1 V_2 n_1 n_2 T_1 T_2")
@@ -21,7 +19,7 @@ SECOND_TEMPERATURE = Variable(kinds.ABSOLUTE_TEMPERATURE, "second temperature of
 FIRST_AMOUNT = Variable(kinds.AMOUNT, "first amount of gas")
 SECOND_AMOUNT = Variable(kinds.AMOUNT, "second amount of gas")
 
-with evaluate(False):
+with as_printed():
     BOYLE = Relation(
         key="boyle",
         title="Boyle’s law",

@@ -2,13 +2,11 @@
 
 from fractions import Fraction
 
-from sympy import evaluate
-
 from spec import kinds
 from spec.constants import BOLTZMANN_CONSTANT, MOLAR_GAS_CONSTANT
 from spec.model import Family, Relation, Variable
-from spec.sources import ATKINS, DEFINITION, ISO_6976, OPENSTAX_CHEMISTRY, OPENSTAX_PHYSICS_2
-from spec.symbols import positive
+from spec.sources import ATKINS, ISO_6976, OPENSTAX_CHEMISTRY, OPENSTAX_PHYSICS_2
+from spec.symbols import as_printed, positive
 from spec.validity import ideal_at
 
 p, V, n, R, T, N, k, m, M, rho, Z, V_m, d, rho_air = positive("p V n R T N k m M rho Z V_m d rho_air")
@@ -21,7 +19,7 @@ MASS = Variable(kinds.MASS, "mass of gas")
 MOLAR_MASS = Variable(kinds.MOLAR_MASS, "molar mass of the gas")
 COMPRESSIBILITY = Variable(kinds.COMPRESSIBILITY, "compressibility factor", default=Fraction(1))
 
-with evaluate(False):
+with as_printed():
     IDEAL_GAS = Relation(
         key="ideal_gas",
         title="Ideal gas law",

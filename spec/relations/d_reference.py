@@ -2,12 +2,10 @@
 
 from fractions import Fraction
 
-from sympy import evaluate
-
 from spec import kinds
 from spec.model import Family, Relation, Variable
 from spec.sources import CFR_1066, ISO_13443
-from spec.symbols import positive
+from spec.symbols import as_printed, positive
 
 V_0, V, q_0, q, p, p_0, T, T_0, Z, Z_0 = positive("V_0 V q_0 q p p_0 T T_0 Z Z_0")
 
@@ -20,7 +18,7 @@ STATE = {
     Z: Variable(kinds.COMPRESSIBILITY, "compressibility factor of the gas", default=Fraction(1)),
 }
 
-with evaluate(False):
+with as_printed():
     REFERENCE_VOLUME = Relation(
         key="reference_volume",
         title="Volume at reference conditions",
@@ -48,7 +46,13 @@ with evaluate(False):
         },
         assumes=("steady flow", "wet or dry on both sides alike"),
         source=CFR_1066.at("1066.630, flow at standard conditions"),
-        example={"q": "8.40 m³/h", "p": "3.01 bar absolute", "T": "12.0 °C", "p_0": "101.325 kPa absolute", "T_0": "20 °C"},
+        example={
+            "q": "8.40 m³/h",
+            "p": "3.01 bar absolute",
+            "T": "12.0 °C",
+            "p_0": "101.325 kPa absolute",
+            "T_0": "20 °C",
+        },
         words=("normal flow", "standard flow"),
     )
 

@@ -1,17 +1,19 @@
 """Family F: kinetic theory."""
 
-from sympy import Rational, evaluate, pi, sqrt
+from collections.abc import Mapping
+
+from sympy import Rational, Symbol, pi, sqrt
 
 from spec import kinds
 from spec.constants import MOLAR_GAS_CONSTANT
-from spec.model import Family, Relation, Variable
+from spec.model import Constant, Family, Relation, Variable
 from spec.sources import CFR_1065, GRAHAM_1848, OPENSTAX_PHYSICS_2
-from spec.symbols import positive
+from spec.symbols import as_printed, positive
 
 v, R, T, M, r_1, r_2, M_1, M_2 = positive("v R T M r_1 r_2 M_1 M_2")
 mu, mu_0, T_0, S = positive("mu mu_0 T_0 S")
 
-SPEED_WHERE = {
+SPEED_WHERE: Mapping[Symbol, Variable | Constant] = {
     R: MOLAR_GAS_CONSTANT,
     T: Variable(kinds.ABSOLUTE_TEMPERATURE, "temperature of the gas"),
     M: Variable(kinds.MOLAR_MASS, "molar mass of the gas"),
@@ -19,7 +21,7 @@ SPEED_WHERE = {
 SPEED_ASSUMES = ("speeds follow the Maxwell distribution", "the gas is at rest as a whole")
 SPEED_EXAMPLE = {"T": "12.0 °C", "M": "28.013 g/mol"}
 
-with evaluate(False):
+with as_printed():
     MOST_PROBABLE_SPEED = Relation(
         key="most_probable_speed",
         title="Most probable speed of molecules",

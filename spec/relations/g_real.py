@@ -1,16 +1,14 @@
 """Family G: real gas."""
 
-from sympy import evaluate
-
 from spec import kinds
 from spec.constants import MOLAR_GAS_CONSTANT
 from spec.model import Branch, Family, GasName, Nature, Relation, Root, Validity, Variable
 from spec.sources import DEFINITION, REFERENCE_EQUATION, VAN_DER_WAALS_1873
-from spec.symbols import gas, positive, rho_gas
+from spec.symbols import as_printed, gas, positive, rho_gas
 
 p, a, V_m, b, R, T, rho, m, V = positive("p a V_m b R T rho m V")
 
-with evaluate(False):
+with as_printed():
     VAN_DER_WAALS = Relation(
         key="van_der_waals",
         title="Van der Waals equation",

@@ -2,19 +2,17 @@
 
 from fractions import Fraction
 
-from sympy import evaluate
-
 from spec import kinds
 from spec.model import Family, Relation, Sign, Validity, Variable
 from spec.sources import CONSERVATION
-from spec.symbols import nonnegative, positive
+from spec.symbols import as_printed, nonnegative, positive
 from spec.validity import ideal_at
 
 p, p_1, p_2, V_1, V_2, t, V, p_ref, q_ref, T, T_ref = positive("p p_1 p_2 V_1 V_2 t V p_ref q_ref T T_ref")
 T_1, T_2, Z_1, Z_2 = positive("T_1 T_2 Z_1 Z_2")
 (p_min,) = nonnegative("p_min")
 
-with evaluate(False):
+with as_printed():
     EQUALISE = Relation(
         key="equalise",
         title="Pressure after joining two vessels",

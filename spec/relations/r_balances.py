@@ -1,12 +1,10 @@
 """Family R: balances and definitions that sheets are built from."""
 
-from sympy import evaluate
-
 from spec import kinds
+from spec.constants import ICE_POINT
 from spec.model import Family, Nature, Relation, Sign, Variable
 from spec.sources import CONSERVATION, DEFINITION, SI_BROCHURE
-from spec.constants import ICE_POINT
-from spec.symbols import nonnegative, positive, real
+from spec.symbols import as_printed, nonnegative, positive, real
 
 X, N, x, rho, V, M, rho_0, q, q_m, T = positive("X N x rho V M rho_0 q q_m T")
 t_duration = positive("t")[0]
@@ -15,7 +13,7 @@ n_1, n_2 = nonnegative("n_1 n_2")
 n_difference, t_celsius = real("n t")
 T_0 = positive("T_0")[0]
 
-with evaluate(False):
+with as_printed():
     TOTAL_OF_EQUAL = Relation(
         key="total_of_equal",
         title="Total of equal parts",
