@@ -155,7 +155,8 @@ class Relation:
     """One equation ``left = right``, written once.
 
     ``source`` may only be missing until generator.check has asked for it. ``where`` maps each symbol to its meaning
-    in textbook order, which labels, signatures and printing follow. ``example`` holds typed readings of the invented demo scenario; the unknown that is left out is the one found.
+    in textbook order, which labels, signatures and printing follow. ``example`` holds typed readings of the invented
+    demo scenario; the unknown that is left out is the one found.
     """
 
     key: str
