@@ -71,6 +71,7 @@ def _row(name: str, row: Row) -> str:
         row.of_gas,
         row.is_gas,
         row.optional,
+        row.is_clock,
     )
     return f"Row({', '.join(map(repr, values))})"
 

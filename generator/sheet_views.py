@@ -54,6 +54,15 @@ def _row(name: str, row: Row, sheet: Sheet) -> RowView:
         return RowView(
             name=name, title=row.title, note=row.note, is_gas=True, text=sheet.example[name], choices=choices
         )
+    if row.is_clock:
+        return RowView(
+            name=name,
+            title=row.title,
+            note=row.note,
+            is_text=True,
+            text=sheet.example.get(name, ""),
+            is_optional=row.optional,
+        )
     typed = split(sheet.example.get(name, ""), row.kind)
     return RowView(
         name=name,

@@ -210,7 +210,8 @@ class Row:
     ``reading`` rows stand in the table; the others appear in the working only. ``site`` names the site condition
     that fills the row until someone reads it. ``low`` and ``high`` narrow the kind's range for this row (SI).
     ``accuracy`` is the limit taken when no instrument is chosen, such as ``"± 1 %"`` or ``"exact"``; ``of_gas`` names
-    the property of the gas that fills the row; ``is_gas`` marks the row that names the gas.
+    the property of the gas that fills the row; ``is_gas`` marks the row that names the gas,
+    ``is_clock`` one that holds a time of day.
     """
 
     title: str
@@ -226,6 +227,7 @@ class Row:
     optional: bool = False
     of_gas: str = ""
     is_gas: bool = False
+    is_clock: bool = False
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)

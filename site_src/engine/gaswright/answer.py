@@ -4,7 +4,6 @@ Takes requests as plain dictionaries; gives responses as plain dictionaries and 
 gaswright.browser speaks JSON with the page, generator.make_views draws the worked examples with it.
 """
 
-from datetime import datetime, timedelta
 from typing import Any
 
 from gaswright import find as finder
@@ -199,7 +198,7 @@ def answer_sheet(request: dict[str, Any]) -> Response:
         return _place_error(response, error, taken.readings)
     except (NoSolutionError, OutsideRangeError) as error:
         return _state({**response, "refusal": str(error)}, "refused")
-    return _sheet_figure(response, sheet, find, result, unit, mark, str((request.get("site") or {}).get("time") or ""))
+    return _sheet_figure(response, sheet, find, result, unit, mark)
 
 
 def _with_site(sheet: Sheet, request: dict[str, Any]) -> dict[str, Any]:
@@ -224,6 +223,8 @@ def _sheet_rows(sheet: Sheet, find: Find, raw: dict[str, Any], taken: Taken) -> 
             rows[name] = _problem_row(taken.problems[name])
         elif row.is_gas and taken.gas is not None:
             rows[name] = {"state": "ok", "says": "", "si": taken.gas.formula, "typed": taken.gas.title}
+        elif name in taken.clocks:
+            rows[name] = {"state": "ok", "says": "", "typed": taken.clocks[name]}
         elif name in taken.readings:
             rows[name] = _ok_row(taken.readings[name], KINDS[row.kind])
             if taken.readings[name].came_from != "read":
@@ -249,7 +250,7 @@ def _question_unlikely(sheet: Sheet, taken: Taken, rows: dict[str, Response]) ->
 
 
 def _sheet_figure(  # noqa: PLR0913 - the parts of one answer
-    response: Response, sheet: Sheet, find: Find, result: SheetResult, unit: str, mark: str, start: str
+    response: Response, sheet: Sheet, find: Find, result: SheetResult, unit: str, mark: str
 ) -> Response:
     row = sheet.rows[find.row]
     kind = KINDS[row.kind]
@@ -270,7 +271,7 @@ def _sheet_figure(  # noqa: PLR0913 - the parts of one answer
         "shares": _shares(result.shares),
         "working": [{"text": line.text, "relation": line.relation, "title": line.title} for line in result.working],
         "warnings": [*result.warnings, *_assumption(result, kind, unit, mark)],
-        "extra": _extra(sheet, find, result, start, mark),
+        "extra": _extra(sheet, find, result, mark),
         "rule": sheet.rule,
     }
     return _state(response, "warning" if result.warnings else "answer")
@@ -345,11 +346,11 @@ def _assumption(result: SheetResult, kind: Kind, unit: str, mark: str) -> list[s
     return [f"The error of an instrument used more than once is taken as {used}; the other assumption gives U = {other}."]
 
 
-def _extra(sheet: Sheet, find: Find, result: SheetResult, start: str, mark: str) -> list[list[str]]:
+def _extra(sheet: Sheet, find: Find, result: SheetResult, mark: str) -> list[list[str]]:
     """Give what else is read off the answer: clock time of a changeover, mass and amount of a content."""
     lines: list[list[str]] = []
-    if find.row == "t" and start:
-        lines += _clock(start, result.safe)
+    if result.ends:
+        lines.append(["Change over by", result.ends])
     for name in ("m", "n"):
         if find.row == "V_ref" and name in sheet.rows:
             kind = KINDS[sheet.rows[name].kind]
@@ -359,14 +360,6 @@ def _extra(sheet: Sheet, find: Find, result: SheetResult, start: str, mark: str)
     if len(pair) == 2:  # noqa: PLR2004 - a pair is a temperature and a pressure
         lines.append(["Reference conditions", ", ".join(reading.text for reading in pair)])
     return lines
-
-
-def _clock(start: str, seconds: float) -> list[list[str]]:
-    try:
-        at = datetime.fromisoformat(start) + timedelta(seconds=max(0.0, seconds))
-    except (ValueError, OverflowError):
-        return []
-    return [["Change over by", at.strftime("%H:%M on %Y-%m-%d")]]
 
 
 def refused(error: GaswrightError) -> Response:

@@ -98,6 +98,7 @@ class Row(NamedTuple):
     of_gas: str
     is_gas: bool
     optional: bool
+    is_clock: bool
 
 
 class Use(NamedTuple):

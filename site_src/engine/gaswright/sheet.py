@@ -6,7 +6,7 @@ Takes a sheet's key and the input part of a record; gives a SheetResult. gaswrig
 from typing import Any, NamedTuple
 
 from gaswright import find as finder
-from gaswright import quantity, working
+from gaswright import clock, quantity, working
 from gaswright.errors import GaswrightError, NoSolutionError, OutsideRangeError, ReadingError
 from gaswright.gas import Gas, IdealGas
 from gaswright.gas import find as find_gas
@@ -28,6 +28,7 @@ class Taken(NamedTuple):
     gas: Gas | None
     problems: dict[str, ReadingError]
     empty: tuple[str, ...]
+    clocks: dict[str, str]
 
 
 class Line(NamedTuple):
@@ -64,6 +65,7 @@ class SheetResult(NamedTuple):
     limit: float | None
     low: float
     high: float
+    ends: str
 
 
 def run_sheet(key: str, record: dict[str, Any]) -> SheetResult:
@@ -99,6 +101,7 @@ def take(
     readings: dict[str, Reading] = {}
     problems: dict[str, ReadingError] = {name: _unknown_row(sheet, name) for name in raw if name not in sheet.rows}
     empty: list[str] = []
+    clocks: dict[str, str] = {}
     gas: Gas | None = None
     for name, row in sheet.rows.items():
         if not row.reading or name == find.row:
@@ -109,6 +112,8 @@ def take(
             elif _is_empty(raw.get(name)):
                 if not row.optional:
                     empty.append(name)
+            elif row.is_clock:
+                clocks[name] = clock.check(_text(raw[name]), row.title)
             else:
                 readings[name] = _read_row(row, raw[name], decimal, instruments)
         except ReadingError as problem:
@@ -116,7 +121,7 @@ def take(
     gas_row = next((name for name, row in sheet.rows.items() if row.is_gas), None)
     if gas is None and gas_row and gas_row not in problems:
         empty.append(gas_row)
-    return Taken(readings, gas, problems, tuple(empty))
+    return Taken(readings, gas, problems, tuple(empty), clocks)
 
 
 def _unknown_row(sheet: Sheet, name: str) -> ReadingError:
@@ -125,7 +130,11 @@ def _unknown_row(sheet: Sheet, name: str) -> ReadingError:
 
 
 def _is_empty(raw: Any) -> bool:  # noqa: ANN401 - what a record may hold
-    return raw is None or not str(raw.get("text", "") if isinstance(raw, dict) else raw).strip()
+    return raw is None or not _text(raw).strip()
+
+
+def _text(raw: Any) -> str:  # noqa: ANN401 - what a record may hold
+    return str(raw.get("text", "") if isinstance(raw, dict) else raw)
 
 
 def _gas(raw: Any) -> Gas | None:  # noqa: ANN401 - what a record may hold
@@ -173,7 +182,13 @@ def work(sheet: Sheet, find: Find, taken: Taken, show: str = "") -> SheetResult:
         sheet.key, find.row, value, kind.si, combined.u, combined.expanded, combined.k, combined.freedom, safe,
         combined.shares, combined.shared, combined.other_u, ideal, ideal_says, taken.gas.title, values, taken.readings,
         tuple(_working(sheet, find, values, units)), tuple(dict.fromkeys(warnings)), verdict, limit, row.low, row.high,
+        _ends(find, taken, safe),
     )
+
+
+def _ends(find: Find, taken: Taken, safe: float) -> str:
+    """Give the time of day at the safe end, where the question has a start."""
+    return clock.later(taken.clocks[find.clock], safe) if find.clock in taken.clocks else ""
 
 
 def _counted(sheet: Sheet, taken: Taken) -> tuple[dict[str, float], dict[str, float]]:
