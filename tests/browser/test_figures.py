@@ -13,10 +13,20 @@ import pytest
 from tests.browser.support.tab import Tab
 
 START_S = 60.0
-BANK = {"count": "4", "V_each": "50 L", "pg_start": "200 bar gauge", "pg_end": "10 bar gauge", "T_gas": "20 °C",
-        "q": "30 L/min"}
-SITE = {"station_pressure": ("1013", "mbar"), "air_temperature": ("20", "°C"), "reference_temperature": ("20", "°C"),
-        "reference_pressure": ("101.325", "kPa")}
+BANK = {
+    "count": "4",
+    "V_each": "50 L",
+    "pg_start": "200 bar gauge",
+    "pg_end": "10 bar gauge",
+    "T_gas": "20 °C",
+    "q": "30 L/min",
+}
+SITE = {
+    "station_pressure": ("1013", "mbar"),
+    "air_temperature": ("20", "°C"),
+    "reference_temperature": ("20", "°C"),
+    "reference_pressure": ("101.325", "kPa"),
+}
 DURATION = re.compile(r"(?:(\d+) h (\d+) min)")
 
 
@@ -55,7 +65,9 @@ def plain(text: str) -> str:
 
 def best_minutes(tab: Tab) -> tuple[float, float]:
     """Give the best estimate and its ± in minutes."""
-    found = re.search(r"Best estimate ([\d.]+) min ± ([\d.]+) min", plain(tab.text("#sheet-bank_endurance [data-best]")))
+    found = re.search(
+        r"Best estimate ([\d.]+) min ± ([\d.]+) min", plain(tab.text("#sheet-bank_endurance [data-best]"))
+    )
     assert found
     return float(found[1]), float(found[2])
 
@@ -101,10 +113,20 @@ def wait_station(tab: Tab, key: str) -> None:
 def test_fifty_litres_of_oxygen(tab: Tab) -> None:
     """50 L of oxygen at 200 bar absolute and 15 °C hold 10.591 m³ at 15 °C and 101.325 kPa, within 0.006."""
     open_sheet(tab, "cylinder_receipt")
-    fill(tab, "cylinder_receipt", "oxygen", {
-        "count": "1", "V_each": "50 L", "pg": "200 bar absolute", "T_gas": "15 °C", "p_atm": "1013 mbar",
-        "T_ref": "15 °C", "p_ref": "101.325 kPa",
-    })
+    fill(
+        tab,
+        "cylinder_receipt",
+        "oxygen",
+        {
+            "count": "1",
+            "V_each": "50 L",
+            "pg": "200 bar absolute",
+            "T_gas": "15 °C",
+            "p_atm": "1013 mbar",
+            "T_ref": "15 °C",
+            "p_ref": "101.325 kPa",
+        },
+    )
     tab.wait_text("#sheet-cylinder_receipt", r"Real oxygen", timeout_s=START_S)
     found = re.search(r"Real oxygen\s+([\d.]+) m³", plain(tab.text("#sheet-cylinder_receipt")))
     assert found
@@ -114,32 +136,52 @@ def test_fifty_litres_of_oxygen(tab: Tab) -> None:
 def test_locked_in_nitrogen_rises_by_the_real_gas(tab: Tab) -> None:
     """Nitrogen closed at 200 bar absolute and 15 °C rises about 0.99 bar in one kelvin, not 0.69."""
     open_sheet(tab, "locked_in")
-    fill(tab, "locked_in", "nitrogen", {
-        "pg_1": "200 bar absolute", "T_1": "15 °C", "T_2": "25 °C", "p_atm": "1013 mbar",
-    })
+    fill(
+        tab,
+        "locked_in",
+        "nitrogen",
+        {
+            "pg_1": "200 bar absolute",
+            "T_1": "15 °C",
+            "T_2": "25 °C",
+            "p_atm": "1013 mbar",
+        },
+    )
     tab.wait_one('#sheet-locked_in[data-state="answer"]', timeout_s=START_S)
     found = re.search(r"Real nitrogen\s+([\d.]+) bar", plain(tab.text("#sheet-locked_in")))
     assert found
     assert (float(found[1]) + 1.013 - 200) / 10 == pytest.approx(0.99, abs=0.01)
 
 
-@pytest.mark.parametrize(("name", "typed", "says"), [
-    ("pg_start", "", ""),
-    ("pg_start", "abc", r"expected a number"),
-    ("pg_start", "-2", r"-2 bar gauge.*no lower than"),
-    ("T_gas", "-300", r"−273\.15 °C"),
-    ("pg_start", "1,234", r"decimal mark or does it group"),
-    ("pg_start", "1e400", r"power of ten"),
-    ("pg_start", "220 psi", r"Which unit was read"),
-], ids=["empty", "letters", "below_vacuum", "below_zero", "comma", "huge", "wrong_unit"])
+@pytest.mark.parametrize(
+    ("name", "typed", "says"),
+    [
+        ("pg_start", "", ""),
+        ("pg_start", "abc", r"expected a number"),
+        ("pg_start", "-2", r"-2 bar gauge.*no lower than"),
+        ("T_gas", "-300", r"−273\.15 °C"),
+        ("pg_start", "1,234", r"decimal mark or does it group"),
+        ("pg_start", "1e400", r"power of ten"),
+        ("pg_start", "220 psi", r"Which unit was read"),
+    ],
+    ids=["empty", "letters", "below_vacuum", "below_zero", "comma", "huge", "wrong_unit"],
+)
 def test_a_bad_reading_is_told_beside_its_field_and_nothing_typed_is_lost(
     tab: Tab, name: str, typed: str, says: str
 ) -> None:
     """Each bad reading is named beside its field, gives no figure, and leaves what was typed."""
     open_sheet(tab, "bank_endurance")
-    fill(tab, "bank_endurance", "nitrogen", {
-        **BANK, "p_atm": "1013 mbar", "T_ref": "20 °C", "p_ref": "101.325 kPa",
-    })
+    fill(
+        tab,
+        "bank_endurance",
+        "nitrogen",
+        {
+            **BANK,
+            "p_atm": "1013 mbar",
+            "T_ref": "20 °C",
+            "p_ref": "101.325 kPa",
+        },
+    )
     tab.type(f"#bank_endurance-{name}", typed)
     tab.wait_one('#sheet-bank_endurance[data-state="incomplete"]', timeout_s=START_S)
     if says:
@@ -151,9 +193,17 @@ def test_a_bad_reading_is_told_beside_its_field_and_nothing_typed_is_lost(
 def test_a_liquid_is_refused_with_its_saturation_pressure(tab: Tab) -> None:
     """Carbon dioxide at 200 bar and 20 °C is liquid; its saturation pressure is 57.3 bar (CoolProp 8.0.0)."""
     open_sheet(tab, "bank_endurance")
-    fill(tab, "bank_endurance", "carbon_dioxide", {
-        **BANK, "p_atm": "1013 mbar", "T_ref": "20 °C", "p_ref": "101.325 kPa",
-    })
+    fill(
+        tab,
+        "bank_endurance",
+        "carbon_dioxide",
+        {
+            **BANK,
+            "p_atm": "1013 mbar",
+            "T_ref": "20 °C",
+            "p_ref": "101.325 kPa",
+        },
+    )
     tab.wait_text("#sheet-bank_endurance [data-refusal]", r"57\.2\d* bar absolute", timeout_s=START_S)
 
 

@@ -10,6 +10,7 @@ from gaswright.find import relation
 from gaswright.reading import Reading, read
 from gaswright.records import Kind
 from gaswright.tables import KINDS
+
 from generator.load import Case, read_cases
 
 ROOT = Path(__file__).resolve().parents[2]

@@ -73,7 +73,7 @@ class FirefoxProcess:
             "0",
             "--profile",
         ]
-        self._process = subprocess.Popen(  # noqa: S603 - the path comes from our own search for browsers
+        self._process = subprocess.Popen(
             [*command, profile],
             stdout=subprocess.DEVNULL,
             stderr=subprocess.PIPE,

@@ -5,9 +5,9 @@ Takes the name, an empty profile folder and the base address. Gives a `Tab`. Nex
 
 from pathlib import Path
 
-from generator.browsers import find_chromium, find_firefox
 from playwright.sync_api import Playwright
 
+from generator.browsers import find_chromium, find_firefox
 from tests.browser.support.chromium import ChromiumTab
 from tests.browser.support.firefox import FirefoxTab, warm_profile
 from tests.browser.support.tab import Tab

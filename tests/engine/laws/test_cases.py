@@ -3,10 +3,10 @@
 The sources stand beside the numbers in ``spec/cases``.
 """
 
-import pytest
-
 import gaswright
+import pytest
 from gaswright.errors import NoSolutionError
+
 from generator.load import Case
 from tests.support.cases import CASES, half_digit, name_of, reading_of, span
 

@@ -1,0 +1,89 @@
+"""Every number from outside typed into its law's page, in a real browser opened from a folder.
+
+One tab types them all, law by law; the row found is compared with the interval that the source's digits allow.
+"""
+
+import re
+from collections.abc import Iterator
+from pathlib import Path
+
+import pytest
+from gaswright.quantity import in_unit
+from playwright.sync_api import Playwright
+
+from generator.load import Case
+from tests.browser.support.launch import start_tab
+from tests.browser.support.tab import Tab
+from tests.support.cases import CASES, kind_of, reading_of, span
+
+START_S = 60.0
+LAWS = tuple(dict.fromkeys(case.relation for case in CASES))
+FOUND = re.compile(r"^[−\d.]+( × 10[⁰¹²³⁴⁵⁶⁷⁸⁹⁻]+)?$")
+RAISED = str.maketrans("⁰¹²³⁴⁵⁶⁷⁸⁹⁻", "0123456789-")
+
+
+@pytest.fixture(scope="module")
+def page(playwright: Playwright, file_site: Path, tmp_path_factory: pytest.TempPathFactory) -> Iterator[Tab]:
+    """One tab in Chromium on the copied folder, quiet at the end."""
+    started = start_tab(
+        "chromium", playwright=playwright, profile=tmp_path_factory.mktemp("profile"), base=f"{file_site.as_uri()}/"
+    )
+    try:
+        yield started
+        assert started.foreign_requests() == []
+        assert started.console_errors() == []
+    finally:
+        started.close()
+
+
+def offered(case: Case, name: str, unit: str) -> str:
+    """Give the unit where the page offers it for the variable, else the first that it offers."""
+    units = kind_of(case, name).units
+    return unit if unit in units else units[0]
+
+
+def type_reading(page: Tab, case: Case, name: str) -> None:
+    """Choose unit and reference of a row and type the digits."""
+    field = f"#{case.relation}-{name}"
+    reading = reading_of(case, name)
+    unit = offered(case, name, reading.unit)
+    digits = reading.text.split(" ", maxsplit=1)[0]
+    if page.exists(f"select{field}-unit"):
+        page.select(f"{field}-unit", unit)
+    if page.exists(f"select{field}-reference"):
+        page.select(f"{field}-reference", reading.reference)
+    page.type(field, digits if unit == reading.unit else repr(in_unit(reading.value, kind_of(case, name), unit)))
+
+
+def number(text: str) -> float:
+    """Give the number a page shows."""
+    plain = text.replace("\u202f", "").replace("−", "-")
+    head, times, power = plain.partition(" × 10")
+    return float(f"{head}e{power.translate(RAISED)}") if times else float(head)
+
+
+def agrees(case: Case, shown: float, unit: str) -> bool:
+    """Tell whether a shown number, with seven digits, lies in the interval of the source."""
+    low, high = sorted(in_unit(end, kind_of(case, case.find), unit) for end in span(case))
+    slack = 1e-6 * max(abs(low), abs(high))
+    return low - slack <= shown <= high + slack
+
+
+@pytest.mark.parametrize("law", LAWS)
+def test_the_published_figures_are_met_on_the_page(law: str, page: Tab) -> None:
+    """Type each case of the law and read the row found."""
+    page.open(f"laws/{law}.html")
+    for case in [case for case in CASES if case.relation == law]:
+        page.click(f"#{law}-find-{case.find}")
+        unit = offered(case, case.find, reading_of(case, case.find).unit)
+        if page.exists(f"select#{law}-{case.find}-unit"):
+            page.select(f"#{law}-{case.find}-unit", unit)
+        for name in case.given:
+            type_reading(page, case, name)
+        page.wait_until(
+            lambda case=case: page.text(f"#{law}-{case.find}-found").replace("\u202f", ""),
+            lambda text, case=case, unit=unit: bool(FOUND.match(text)) and agrees(case, number(text), unit),
+            step=f"row {case.find} of {law}",
+            expected=f"{case.expect} ({case.source})",
+            timeout_s=START_S,
+        )
