@@ -7,13 +7,17 @@ from typing import NamedTuple
 
 
 class Unit(NamedTuple):
-    """A unit: ``SI value = (reading + zero) * factor``; exponents of kg, m, s, K, mol; its UCUM code."""
+    """A unit: ``SI value = (reading + zero) * factor``; exponents of kg, m, s, K, mol; its UCUM code.
+
+    ``ratio`` is the factor as two whole numbers, numerator and denominator, so that products stay exact.
+    """
 
     key: str
     factor: float
     zero: float
     exponents: tuple[float, ...]
     ucum: str
+    ratio: tuple[int, int]
 
 
 class Kind(NamedTuple):
