@@ -3,17 +3,19 @@
 Takes text; gives a Number with the size of its last typed digit, or ReadingError. gaswright.reading comes next.
 """
 
-import math
 import re
 from typing import NamedTuple
 
 from gaswright.errors import ReadingError
 
-SPACES = "\u0020\u00a0\u2009\u202f'’_"
-PLAIN = re.compile(r"([+-]?)(\d*)(?:([.,])(\d*))?(?:[eE]([+-]?\d{1,4}))?")
-TIMES_TEN = re.compile(r"\s*[×x*·]\s*10\s*\^?\s*([+-]?\d+)$")
+SAME = str.maketrans({"−": "-", "–": "-", "\u00a0": " ", "\u2009": " ", "\u202f": " ", "’": "'", "‘": "'"})
 SUPERSCRIPTS = str.maketrans("⁰¹²³⁴⁵⁶⁷⁸⁹⁻⁺", "0123456789-+")
-LARGEST = 1e30
+PLAIN = re.compile(r"([+-]?)([0-9]*)(?:\.([0-9]*))?(?:[eE]([+-]?[0-9]{1,5}))?")
+TIMES_TEN = re.compile(r"\s*[×x*·]\s*10\s*\^?\s*([+-]?[0-9]+)$")
+SPACED = re.compile(r"([+-]?[0-9]{1,3})((?:[ '][0-9]{3})+)(?=[.,eE]|$)")
+THOUSANDS = re.compile(r"[+-]?[1-9][0-9]{0,2}(?:([.,])[0-9]{3})(?:\1[0-9]{3})*")
+LARGEST, LONGEST = 1e40, 60
+TODO = "Type digits with a decimal comma or point, such as 12.5."
 
 
 class Number(NamedTuple):
@@ -26,48 +28,72 @@ class Number(NamedTuple):
 def parse(text: str, where: str, decimal: str | None = None) -> Number:
     """Give the number ``text`` says. ``decimal`` is the page's decimal mark, which settles "1,234".
 
-    Raises ReadingError: empty, not a number, too large, or with more than one meaning (then it offers both).
+    Raises ReadingError: empty, not a number, too large, or with more than one meaning (then it offers them).
     """
-    cleaned = text.translate(SUPERSCRIPTS).replace("−", "-").strip()
+    cleaned = text.translate(SAME).strip()
     if not cleaned:
         raise ReadingError(where, "nothing", "a number", "Type the reading.")
-    cleaned = TIMES_TEN.sub(r"e\1", cleaned)
-    for mark in SPACES:
-        cleaned = cleaned.replace(mark, "")
-    cleaned = _without_groups(cleaned, where, decimal)
+    if len(cleaned) > LONGEST:
+        raise ReadingError(where, f"{cleaned[:20]!r} and {len(cleaned) - 20} more signs", "a number", TODO)
+    cleaned = TIMES_TEN.sub(r"e\1", cleaned.translate(SUPERSCRIPTS))
+    cleaned = SPACED.sub(lambda found: found[1] + re.sub("[ ']", "", found[2]), cleaned, count=1)
+    return _of_plain(_with_point(cleaned, where, decimal), text, where)
+
+
+def _of_plain(cleaned: str, text: str, where: str) -> Number:
     match = PLAIN.fullmatch(cleaned)
-    if not match or not (match[2] or match[4]):
-        todo = "Type digits with a decimal comma or point, such as 12.5."
-        raise ReadingError(where, repr(text[:40]), "a number", todo)
-    value = float(cleaned.replace(",", "."))
-    if not math.isfinite(value) or abs(value) > LARGEST:
-        raise ReadingError(where, repr(text[:40]), f"a number below {LARGEST:g}", "Check the power of ten.")
-    power = int(match[5] or 0) - len(match[4] or "")
-    return Number(value, 10.0 ** max(power, -300))
+    if not match or not (match[2] or match[3]):
+        raise ReadingError(where, repr(text[:40]), "a number", TODO)
+    value, power = float(cleaned), int(match[4] or 0) - len(match[3] or "")
+    has_digits = bool((match[2] + (match[3] or "")).strip("0"))
+    if abs(value) > LARGEST or abs(power) > 300:
+        expected = f"a number between −{LARGEST:g} and {LARGEST:g}"
+        raise ReadingError(where, repr(text[:40]), expected, "Check the power of ten.")
+    if has_digits and value == 0:
+        raise ReadingError(where, repr(text[:40]), "zero, or a number that is not so small", "Check the power of ten.")
+    return Number(value, 10.0**power)
 
 
-def _without_groups(text: str, where: str, decimal: str | None) -> str:
-    """Take out commas or points that group digits; ask where one mark may be either."""
-    commas, points = text.count(","), text.count(".")
+def _with_point(text: str, where: str, decimal: str | None) -> str:
+    """Give the text with a point as decimal mark and no grouping; ask where one mark may be either."""
+    digits, exponent, power = text.partition("e") if "e" in text else text.partition("E")
+    commas, points = digits.count(","), digits.count(".")
     if commas and points:
-        grouping = "," if text.rfind(".") > text.rfind(",") else "."
-        return _grouped(text, grouping, where)
-    if commas > 1 or points > 1:
-        return _grouped(text, "," if commas else ".", where)
-    if commas == 1 and re.fullmatch(r"[+-]?[1-9]\d{0,2},\d{3}", text):
-        if decimal == ",":
-            return text
+        mark = "," if digits.rfind(",") > digits.rfind(".") else "."
+        return _grouped(digits, mark, where, decimal) + exponent + power
+    mark = "," if commas else "."
+    grouping = THOUSANDS.fullmatch(digits)
+    if commas + points > 1:
+        return _grouped(digits, "." if commas else ",", where, decimal) + exponent + power
+    if grouping and mark == "," and decimal == ".":
+        return digits.replace(",", "") + exponent + power
+    if (grouping and decimal != mark and (mark == "," or decimal)) or (mark == "," and commas and decimal == "."):
+        raise _asked(digits, mark, exponent + power, where, decimal)
+    return digits.replace(",", ".") + exponent + power
+
+
+def _asked(digits: str, mark: str, power: str, where: str, decimal: str | None) -> ReadingError:
+    words = {",": "comma", ".": "point"}[mark]
+    as_decimal, as_group = digits.replace(mark, decimal or "."), digits.replace(mark, "")
+    is_grouped = THOUSANDS.fullmatch(digits) is not None
+    return ReadingError(
+        where, repr(digits + power), "one meaning", f"Is the {words} a decimal mark or does it group thousands?",
+        offers=(as_decimal + power, as_group + power) if is_grouped else (as_decimal + power,),
+    )
+
+
+def _grouped(digits: str, mark: str, where: str, decimal: str | None) -> str:
+    """Take out the marks that group the whole part in threes before the decimal ``mark``."""
+    whole, _, part = digits.partition(mark)
+    grouping = THOUSANDS.fullmatch(whole)
+    if not grouping or grouping[1] == mark or re.search("[.,]", part) or (decimal and _is_other(digits, mark, decimal)):
         raise ReadingError(
-            where, repr(text), "one meaning", "Is the comma a decimal mark or does it group thousands?",
-            offers=(text.replace(",", "."), text.replace(",", "")),
+            where, repr(digits[:40]), "digits grouped in threes and one decimal mark",
+            "Type the number without grouping.",
         )
-    return text
+    return whole.replace(grouping[1], "") + ("." + part if part else "")
 
 
-def _grouped(text: str, mark: str, where: str) -> str:
-    whole = text.replace(",", ".").split(".") if mark == "." and "," not in text else None
-    head = text[: text.rfind("." if mark == "," else ",")] if ("." in text and "," in text) else text
-    groups = (whole or head.split(mark))[1:]
-    if any(len(group) != 3 for group in groups):  # noqa: PLR2004 - thousands come in threes
-        raise ReadingError(where, repr(text[:40]), "digits grouped in threes", "Type the number without grouping.")
-    return text.replace(mark, "")
+def _is_other(digits: str, mark: str, decimal: str) -> bool:
+    """Say whether both marks stand in the number the other way round than the page's decimal mark has them."""
+    return mark in digits and mark != decimal

@@ -5,28 +5,27 @@ gaswright.law and gaswright.sheet come next.
 """
 
 import math
-import re
-from typing import NamedTuple
+from typing import Any, NamedTuple
 
 from gaswright import instrument as instruments_of
-from gaswright import number, unit
+from gaswright import number, show, unit
 from gaswright.errors import ReadingError
 from gaswright.records import Kind
+from gaswright.typed import Typed, take_apart
 
 Raw = str | float | int | dict[str, object]
 Instruments = dict[str, dict[str, object]]
 ROOT_3, ROOT_12 = math.sqrt(3), math.sqrt(12)
 ZERO_CELSIUS = 273.15
-REFERENCE_WORDS = {"gauge": " gauge", "absolute": " absolute", "vacuum": " vacuum"}
-PAIR = re.compile(r"\s*(?:at\s*)?\(([^()]*)[,;]([^()]*)\)\s*$")
-TEXT = re.compile(r"\s*([+\-−]?[\d.,\u00a0\u2009\u202f’' _]*\d[.,]?(?:\s*[eE][+-]?\d{1,4}(?!\w)|\s*[×x*·]\s*10\s*\^?[⁻+\-⁰¹²³⁴⁵⁶⁷⁸⁹\d]+)?)\s*(.*)", re.DOTALL)
+COUNTED = ("gauge", "absolute", "vacuum")
 
 
 class Reading(NamedTuple):
     """A reading in SI with its standard uncertainty.
 
     ``value`` is counted as ``reference`` says (absolute, gauge, vacuum, difference or nothing); ``u`` combines
-    ``u_systematic`` and ``u_random``; ``by`` says where the uncertainty comes from.
+    ``u_systematic`` and ``u_random``; ``by`` says where the uncertainty comes from. ``span`` is the width of the
+    instrument's scale and ``scale`` its ends, in SI as the instrument counts (0 where nothing is known of it).
     """
 
     name: str
@@ -45,105 +44,140 @@ class Reading(NamedTuple):
     came_from: str
     conditions: tuple[float, float] | None
     warnings: tuple[str, ...]
+    scale: tuple[float, float] = (0.0, 0.0)
 
 
-def read(where: str, raw: Raw, kind: Kind, decimal: str | None = None, instruments: Instruments | None = None) -> Reading:
+def read(
+    where: str, raw: Raw, kind: Kind, decimal: str | None = None, instruments: Instruments | None = None
+) -> Reading:
     """Give the reading ``raw`` of a quantity of ``kind``. A float is an SI value, counted as the kind counts.
 
     Raises ReadingError in four parts for whatever cannot be taken as it stands.
     """
     if isinstance(raw, (int, float)) and not isinstance(raw, bool):
         return _of_number(where, float(raw), kind)
-    record = {"text": raw} if isinstance(raw, str) else dict(raw)
-    text = str(record.get("text", "") or "").strip()
+    if not isinstance(raw, (str, dict)):
+        raise ReadingError(where, repr(raw)[:40], "a reading as text, such as 200 bar gauge", "Type the reading.")
+    record: dict[str, object] = {"text": raw} if isinstance(raw, str) else raw
+    text = "" if record.get("text") is None else str(record["text"]).strip()
     if not text:
         raise ReadingError(where, "nothing", f"a reading of {kind.title}", "Type the reading, or ask for this row.")
-    text, conditions = _conditions(text, where)
-    text, accuracy = _split_accuracy(text)
-    match = TEXT.fullmatch(text)
-    if not match:
-        raise ReadingError(where, repr(text[:40]), "a number", "Type digits with a decimal comma or point, such as 12.5.")
-    typed = _number(match[1], match[2].strip(), where, decimal)
-    found = _unit(match[2].strip(), str(record.get("unit") or ""), where, kind, match[1].strip())
-    reference = _reference(found, record, kind)
+    parts = take_apart(text, where)
+    found = _unit(parts, str(record.get("unit") or "").strip(), where, kind)
+    typed = _number(parts, where, decimal)
+    reference = _reference(found, str(record.get("reference") or ""), kind, where, parts)
     value = _to_si(typed.value, found, kind)
-    if not math.isfinite(value):
-        raise ReadingError(where, repr(text[:40]), "a finite value", "Check the number and its unit.")
-    _refuse_impossible(where, value, kind, reference, f"{match[1].strip()} {found.text}", found)
-    half = typed.step / 2 * found.factor
-    good = _accuracy(where, record, accuracy, value, half, kind, instruments or {})
+    said = f"{parts.digits} {found.text}".removesuffix(" 1")
+    _refuse_impossible(where, value, kind, reference, said, found)
+    good = _accuracy(where, record, parts, typed, found, kind, instruments or {})
+    conditions, pair = _conditions(parts, found, where, decimal)
     return Reading(
-        name=where, text=f"{match[1].strip()} {found.text}".removesuffix(" 1") + REFERENCE_WORDS.get(reference, ""),
+        name=where, text=said + (f" {reference}" if reference in COUNTED else "") + (f" ({pair})" if pair else ""),
         number=typed.value, unit=found.text, value=value, reference=reference, **good,
-        came_from=str(record.get("from") or "read"), conditions=conditions or found.conditions,
+        came_from=str(record.get("from") or "read"), conditions=conditions,
         warnings=_bare_warning(where, found, record, kind, reference),
     )
 
 
-def _number(digits: str, unit_text: str, where: str, decimal: str | None) -> number.Number:
+def _number(parts: Typed, where: str, decimal: str | None) -> number.Number:
     """Read the digits; where they have two meanings, offer both with the unit typed behind them."""
     try:
-        return number.parse(digits, where, decimal)
+        return number.parse(parts.digits, where, decimal)
     except ReadingError as error:
-        error.offers = tuple(f"{offer} {unit_text}".strip() for offer in error.offers)
+        error.offers = tuple(f"{offer} {parts.unit}".strip() for offer in error.offers)
         raise
 
 
 def _of_number(where: str, value: float, kind: Kind) -> Reading:
     if not math.isfinite(value):
         raise ReadingError(where, repr(value), "a finite value", "Give the SI value.")
-    own = unit.UnitReading(kind.si, 1.0, 273.15 if kind.si == "Cel" else 0.0, None, None)
+    own = unit.UnitReading(kind.si, 1.0, ZERO_CELSIUS if kind.si == "Cel" else 0.0, None, None, "")
     _refuse_impossible(where, value, kind, kind.reference, f"{value:g} {kind.si}", own)
     return Reading(where, f"{value:g} {kind.si}", value, kind.si, value, kind.reference, 0.0, 0.0, 0.0, math.inf,
                    "given as an exact SI value", "", 0.0, "read", None, ())
 
 
-def _conditions(text: str, where: str) -> tuple[str, tuple[float, float] | None]:
-    """Take a reference pair such as ``(20 °C, 101.325 kPa)`` off the end."""
-    from gaswright.tables import KINDS  # noqa: PLC0415 - the table is large and this is rare
+def _conditions(
+    parts: Typed, found: unit.UnitReading, where: str, decimal: str | None
+) -> tuple[tuple[float, float] | None, str]:
+    """Give temperature (K) and absolute pressure (Pa) of the reference conditions, and the pair as text."""
+    if not parts.pair:
+        return found.conditions, found.pair
+    from gaswright.tables import KINDS  # noqa: PLC0415 - a pair is rare
 
-    match = PAIR.search(text)
-    if not match:
-        return text, None
-    temperature = read(f"{where}, reference temperature", match[1], KINDS["absolute_temperature"])
-    pressure = read(f"{where}, reference pressure", match[2], KINDS["absolute_pressure"])
-    return text[: match.start()], (temperature.value, pressure.value)
-
-
-def _split_accuracy(text: str) -> tuple[str, str]:
-    """Split ``200 ± 2 bar`` or ``200 bar ± 1 %`` into reading and accuracy."""
-    head, mark, tail = text.replace("+/-", "±").partition("±")
-    if not mark:
-        return text, ""
-    match = re.match(r"\s*[\d.,]+(?:[eE][+-]?\d+)?\s*(.*)", tail, re.DOTALL)
-    own = match[1].strip() if match else ""
-    if own and not re.search(r"[^\d.,\s+\-−]", head):
-        return (f"{head} {own}", "±" + tail) if not own.startswith("%") else (head, "±" + tail)
-    if not own:
-        unit_text = (TEXT.fullmatch(head.strip()) or ["", "", ""])[2]
-        return head, f"±{tail} {unit_text}"
-    return head, "±" + tail
-
-
-def _unit(typed: str, chosen: str, where: str, kind: Kind, digits: str) -> unit.UnitReading:
-    if typed and chosen:
-        own, field = (unit.parse(text, where, kind.exponents, kind.title) for text in (typed, chosen))
-        if (own.factor, own.zero) != (field.factor, field.zero):
-            raise ReadingError(
-                where, f"{digits} {typed} in a field set to {chosen}", "one unit", "Which unit was read?",
-                offers=(f"{digits} {typed}", f"{digits} {chosen}"),
-            )
-        return own if own.reference else field
-    if not typed and not chosen and kind.si != "1":
-        todo = f"Add the unit, such as {digits} {kind.units[0]}."
-        raise ReadingError(where, f"{digits} without a unit", f"{kind.title} with its unit", todo)
-    return unit.parse(typed or chosen or "1", where, kind.exponents, kind.title)
+    temperature_text, pressure_text = sorted(parts.pair, key=unit.is_pressure)
+    try:
+        temperature = read(f"{where}, reference temperature", temperature_text, KINDS["absolute_temperature"], decimal)
+        pressure = read(f"{where}, reference pressure", pressure_text, KINDS["absolute_pressure"], decimal)
+    except ReadingError as error:
+        is_hot = error.where.endswith("temperature")
+        error.offers = tuple(
+            f"{parts.digits} {parts.unit} ({offer}, {pressure_text})" if is_hot
+            else f"{parts.digits} {parts.unit} ({temperature_text}, {offer})" for offer in error.offers
+        )
+        raise
+    if pressure.reference != "absolute":
+        raise ReadingError(
+            pressure.name, pressure.text, "an absolute pressure", "Give the pressure of the pair as absolute.",
+        )
+    pair = f"{temperature.text}, {pressure.text.removesuffix(' absolute')}"
+    given = (temperature.value, pressure.value)
+    if found.conditions and any(abs(a - b) > 1e-6 * b for a, b in zip(given, found.conditions, strict=True)):
+        raise ReadingError(
+            where, f"{parts.unit} with the pair ({pair})", f"one pair: {parts.unit} means ({found.pair})",
+            "Which reference conditions are meant?",
+            offers=tuple(f"{parts.digits} {found.text} ({each})" for each in (found.pair, pair)),
+        )
+    return given, pair
 
 
-def _reference(found: unit.UnitReading, record: dict[str, object], kind: Kind) -> str:
-    if not kind.reference or kind.reference == "difference":
-        return kind.reference
-    return found.reference or str(record.get("reference") or kind.reference)
+def _unit(parts: Typed, chosen: str, where: str, kind: Kind) -> unit.UnitReading:
+    """Read the unit typed or chosen beside the field; two that differ are asked about."""
+    if not parts.unit and not chosen and kind.si != "1":
+        todo = f"Add the unit, such as {parts.digits} {kind.units[0]}."
+        raise ReadingError(where, f"{parts.digits} without a unit", f"{kind.title} with its unit", todo)
+    own = _one_unit(parts, parts.unit or chosen or "1", where, kind)
+    if not parts.unit or not chosen:
+        return own
+    field = _one_unit(parts, chosen, where, kind)
+    if (own.factor, own.zero) != (field.factor, field.zero):
+        raise ReadingError(
+            where, f"{parts.digits} {parts.unit} in a field set to {chosen}", "one unit", "Which unit was read?",
+            offers=(f"{parts.digits} {parts.unit}", f"{parts.digits} {chosen}"),
+        )
+    return own._replace(reference=own.reference or field.reference)
+
+
+def _one_unit(parts: Typed, text: str, where: str, kind: Kind) -> unit.UnitReading:
+    """Read one unit; a word that lacks its reference conditions is taken where the pair was typed behind it."""
+    try:
+        return unit.parse(text, where, kind.exponents, kind.title, kind.units)
+    except ReadingError as error:
+        bases = {offer.partition(" (")[0] for offer in error.offers if offer.endswith(")")}
+        if parts.pair and len(bases) == 1:
+            return unit.parse(bases.pop(), where, kind.exponents, kind.title, kind.units)
+        error.offers = tuple(f"{parts.digits} {offer}" for offer in error.offers)
+        raise
+
+
+def _reference(found: unit.UnitReading, chosen: str, kind: Kind, where: str, parts: Typed) -> str:
+    """Give how the pressure is counted: as typed, else as chosen, else as the row counts."""
+    if not kind.reference:
+        return ""
+    if chosen and chosen not in (*COUNTED, "difference"):
+        raise ReadingError(where, repr(chosen[:40]), "gauge, absolute or vacuum", "Choose how the pressure is counted.")
+    said = found.reference
+    if said and chosen and said != chosen:
+        raise ReadingError(
+            where, f"{parts.digits} {parts.unit} in a field set to {chosen}", "one way of counting", "Which was read?",
+            offers=tuple(f"{parts.digits} {found.text} {each}" for each in (said, chosen)),
+        )
+    counted = said or chosen or kind.reference
+    if (counted == "difference") != (kind.reference == "difference"):
+        how = "a difference" if kind.reference == "difference" else "gauge, absolute or vacuum"
+        expected = f"{kind.title}, counted as {how}"
+        raise ReadingError(where, f"{parts.digits} {found.text} {counted}", expected, "Check which pressure was read.")
+    return counted
 
 
 def _bare_warning(
@@ -156,18 +190,21 @@ def _bare_warning(
 
 
 def _to_si(typed: float, found: unit.UnitReading, kind: Kind) -> float:
-    value = (typed + found.zero) * found.factor
-    return value - ZERO_CELSIUS if kind.si == "Cel" else value
+    if kind.si == "Cel":
+        return (typed + round(found.zero - ZERO_CELSIUS / found.factor, 9)) * found.factor
+    return (typed + found.zero) * found.factor
 
 
-def _refuse_impossible(where: str, value: float, kind: Kind, reference: str, said: str, found: unit.UnitReading) -> None:
+def _refuse_impossible(  # noqa: PLR0913, PLR0917 - what the message needs
+    where: str, value: float, kind: Kind, reference: str, said: str, found: unit.UnitReading
+) -> None:
     """Refuse what no instrument of the field can read; a gauge reading is held against the station pressure later."""
     low, high = kind.low, kind.high
     if reference != kind.reference:
         low, high = 0.0, max(high, kind.high)
     if reference == "gauge":
         low = -math.inf
-    if low <= value <= high or (value == 0 and low < 1e-6):  # noqa: PLR2004 - zero stands where the range starts at a trifle
+    if low <= value <= high or (value == 0 and low < 1e-6):
         return
     is_cold = "temperature" in kind.key and value < low
     least = "absolute zero, −273.15 °C," if is_cold else f"{_in(found, low, kind)}"
@@ -180,32 +217,40 @@ def _in(found: unit.UnitReading, value: float, kind: Kind) -> str:
     return f"{absolute / found.factor - found.zero:.6g} {found.text}".removesuffix(" 1")
 
 
-def _accuracy(  # noqa: PLR0913 - all that says how good a reading is
-    where: str, record: dict[str, object], typed: str, value: float, half: float, kind: Kind, instruments: Instruments
-) -> dict[str, object]:
+def _accuracy(  # noqa: PLR0913, PLR0917 - all that says how good a reading is
+    where: str, record: dict[str, object], parts: Typed, typed: number.Number, found: unit.UnitReading,
+    kind: Kind, instruments: Instruments,
+) -> dict[str, Any]:
+    """Give the fields of a Reading about its uncertainty. A limit is rectangular (JCGM 100:2008, 4.3.7)."""
     name = str(record.get("instrument") or "")
-    words = typed or str(record.get("accuracy") or "")
+    words = parts.accuracy or str(record.get("accuracy") or "")
     if name and name not in instruments:
-        raise ReadingError(where, f"the instrument {name!r}", "one of the list", "Choose it again or add it to the list.")
-    u_random = half / ROOT_3
-    if name:
-        tool = instruments[name]
-        accuracy = instruments_of.of_record(tool, value, kind.exponents, where)
-        resolution = instruments_of.resolution_of(tool, kind.exponents, where)
-        u_random = resolution / ROOT_12 if resolution else u_random
-        by = f"{name}, {accuracy.says}"
+        todo = "Choose it again or add it to the list."
+        raise ReadingError(where, f"the instrument {name[:40]!r}", "one of the list", todo)
+    size, half = abs(typed.value) * found.factor, typed.step / 2 * found.factor
+    tool = instruments.get(name, {})
+    if name and not parts.accuracy:
+        accuracy = instruments_of.of_record(tool, size, kind.exponents, f"{where}, {name}")
+        u_random = (instruments_of.resolution_of(tool, kind.exponents, f"{where}, {name}") or 2 * half) / ROOT_12
+        by = f"{name}, {_with_size(accuracy, found)}"
     elif words:
-        accuracy = instruments_of.parse(words, value, kind.exponents, where)
-        u_random = 0.0
-        by = accuracy.says
+        accuracy, u_random = instruments_of.parse(words, size, kind.exponents, where), 0.0
+        by = _with_size(accuracy, found)
     else:
-        accuracy = instruments_of.Accuracy(0.0, 0.0, "")
-        by = "± half the last digit"
+        accuracy, u_random = instruments_of.Accuracy(0.0, 0.0, "", (0.0, 0.0)), 2 * half / ROOT_12
+        by = f"half the last digit typed: ± {show.tidy(half / found.factor, 3)} {found.text}".removesuffix(" 1")
     u_systematic = accuracy.limit / ROOT_3
     return {
         "u": math.hypot(u_systematic, u_random), "u_systematic": u_systematic, "u_random": u_random,
-        "freedom": math.inf, "by": by, "instrument": name, "span": accuracy.span,
+        "freedom": math.inf, "by": by, "instrument": name, "span": accuracy.span, "scale": accuracy.scale,
     }
+
+
+def _with_size(accuracy: instruments_of.Accuracy, found: unit.UnitReading) -> str:
+    """Give the accuracy in words with its size in the typed unit: ``class 1.6 of 250 bar: ± 4 bar``."""
+    if accuracy.says == "exact" or not (accuracy.span or "%" in accuracy.says):
+        return accuracy.says
+    return f"{accuracy.says}: ± {show.tidy(accuracy.limit / found.factor, 3)} {found.text}".removesuffix(" 1")
 
 
 def to_reference(reading: Reading, wanted: str, station: "Reading | None") -> tuple[float, float]:
@@ -241,7 +286,8 @@ def _refuse_below_zero(reading: Reading, station: "Reading | None") -> None:
         return
     absolute = station.value + (reading.value if reading.reference == "gauge" else -reading.value)
     if absolute < 0:
-        limit = f"no lower than −{station.text} gauge" if reading.reference == "gauge" else f"no more than {station.text}"
+        is_gauge = reading.reference == "gauge"
+        limit = f"no lower than −{station.text} gauge" if is_gauge else f"no more than {station.text}"
         raise ReadingError(
             reading.name, reading.text, f"{limit}, which is no pressure at all",
             "Read the gauge and the station pressure again.",
@@ -249,14 +295,21 @@ def _refuse_below_zero(reading: Reading, station: "Reading | None") -> None:
 
 
 def questioned(reading: Reading) -> tuple[str, ...]:
-    """Say what is unlikely about a reading: below a tenth of its instrument's span, or above all of it."""
+    """Say what is unlikely about a reading: below a tenth of its instrument's span, where its class may not hold.
+
+    Raises ReadingError where it is off the scale. A scale that does not start at zero has no such tenth.
+    """
     if not reading.span:
         return ()
-    if abs(reading.value) > reading.span * (1 + 1e-9):
+    low, high = reading.scale
+    shown = -reading.value if reading.reference == "vacuum" and low < 0 else reading.value
+    slack = 1e-9 * reading.span
+    if not low - slack <= shown <= high + slack:
         raise ReadingError(
             reading.name, reading.text, f"a reading on the scale of {reading.instrument or 'the instrument'}",
             "Choose the instrument that was read, or read again.",
         )
-    if abs(reading.value) < reading.span / 10:
-        return (f"{reading.name}: {reading.text} is below a tenth of the span. A gauge of smaller span reads it better.",)
+    if low == 0 and shown < reading.span / 10:
+        todo = "A gauge of smaller span reads it better."
+        return (f"{reading.name}: {reading.text} is below a tenth of the span. {todo}",)
     return ()

@@ -16,7 +16,7 @@ def number(value: float, decimals: int, mark: str = ".") -> str:
     """Give ``value`` with ``decimals`` places, digits before the mark in threes from 10 000 on."""
     text = f"{abs(value):.{max(decimals, 0)}f}"
     whole, _, rest = text.partition(".")
-    if len(whole) > 4:  # noqa: PLR2004 - four digits read well without a gap
+    if len(whole) > 4:
         whole = f"{int(whole):,}".replace(",", THIN)
     sign = MINUS if value < 0 and float(text) else ""
     return sign + whole + (mark + rest if rest else "")
@@ -44,7 +44,7 @@ def tidy(value: float, digits: int = 6, mark: str = ".") -> str:
 
 def _power(value: float, digits: int) -> int:
     power = math.floor(math.log10(abs(value)))
-    return power + 1 if round(abs(value) / 10.0**power, digits - 1) >= 10 else power  # noqa: PLR2004 - carried into the next power
+    return power + 1 if round(abs(value) / 10.0**power, digits - 1) >= 10 else power
 
 
 def step_for(expanded: float) -> float | None:
@@ -105,7 +105,7 @@ def plus_minus(value: float, expanded: float, mark: str = ".") -> tuple[str, str
 def duration(seconds: float, *, down: bool) -> str:
     """Give a time as hours and minutes, rounded down or up to a minute (to a second below an hour)."""
     guard = GUARD * max(1.0, abs(seconds))
-    if abs(seconds) < 3600:  # noqa: PLR2004 - one hour
+    if abs(seconds) < 3600:
         whole = math.floor(seconds + guard) if down else math.ceil(seconds - guard)
         minutes, rest = divmod(whole, 60)
         return f"{minutes} min {rest:02d} s" if minutes else f"{rest} s"

@@ -28,7 +28,7 @@ def _share(t: float, freedom: float) -> float:
     top = math.atan(t / math.sqrt(freedom))
     steps = 400
     width = top / steps
-    total = sum(
+    total = math.fsum(
         (1 if place in (0, steps) else 4 if place % 2 else 2) * math.cos(place * width) ** (freedom - 1)
         for place in range(steps + 1)
     )

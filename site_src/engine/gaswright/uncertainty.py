@@ -41,13 +41,13 @@ def combine(gradient: Sequence[float], readings: Sequence[Reading]) -> Combined:
     """
     groups = _groups(readings)
     parts = [_part(group, gradient, readings) for group in groups]
-    total = sum(part[0] for part in parts)
+    total = sum(parts)
     u = math.sqrt(total)
     freedom = _freedom(u, gradient, readings)
     k = student.factor(freedom)
     shares = sorted(
-        (Share(_label([readings[place] for place in group]), part[0] / total if total else 0.0, math.sqrt(part[0]))
-         for group, part in zip(groups, parts, strict=True) if part[0] > 0),
+        (Share(_label([readings[place] for place in group]), part / total if total else 0.0, math.sqrt(part))
+         for group, part in zip(groups, parts, strict=True) if part > 0),
         key=lambda share: -share.fraction,
     )
     shared = tuple(readings[group[0]].instrument for group in groups if len(group) > 1)
@@ -55,28 +55,34 @@ def combine(gradient: Sequence[float], readings: Sequence[Reading]) -> Combined:
 
 
 def _groups(readings: Sequence[Reading]) -> list[list[int]]:
-    """Put together the readings that share their instrument's error."""
+    """Put together the readings that share their instrument's error: all within a tenth of the span of one another."""
     groups: list[list[int]] = []
-    for place, reading in enumerate(readings):
+    for place in sorted(range(len(readings)), key=lambda at: _on_scale(readings[at])):
+        reading = readings[place]
         for group in groups:
             if _shares(readings[group[0]], reading):
                 group.append(place)
                 break
         else:
             groups.append([place])
-    return groups
+    return [sorted(group) for group in sorted(groups, key=min)]
 
 
-def _shares(first: Reading, second: Reading) -> bool:
-    if not first.instrument or first.instrument != second.instrument:
+def _on_scale(reading: Reading) -> float:
+    return -reading.value if reading.reference == "vacuum" else reading.value
+
+
+def _shares(lowest: Reading, reading: Reading) -> bool:
+    """Say whether two readings count as equally wrong; where the span is not known, only equal readings do."""
+    if not lowest.instrument or lowest.instrument != reading.instrument:
         return False
-    return not first.span or abs(first.value - second.value) <= NEAR * first.span
+    return _on_scale(reading) - _on_scale(lowest) <= NEAR * lowest.span * (1 + 1e-9)
 
 
-def _part(group: Sequence[int], gradient: Sequence[float], readings: Sequence[Reading]) -> tuple[float]:
+def _part(group: Sequence[int], gradient: Sequence[float], readings: Sequence[Reading]) -> float:
     together = sum(gradient[place] * readings[place].u_systematic for place in group) ** 2
     alone = sum((gradient[place] * readings[place].u_random) ** 2 for place in group)
-    return (together + alone,)
+    return together + alone
 
 
 def _other(shared: tuple[str, ...], gradient: Sequence[float], readings: Sequence[Reading]) -> float:
@@ -85,7 +91,7 @@ def _other(shared: tuple[str, ...], gradient: Sequence[float], readings: Sequenc
     by_name: dict[str, list[int]] = {}
     for place, reading in enumerate(readings):
         by_name.setdefault(reading.instrument or f"#{place}", []).append(place)
-    return sum(_part(group, gradient, readings)[0] for group in by_name.values())
+    return sum(_part(group, gradient, readings) for group in by_name.values())
 
 
 def _freedom(u: float, gradient: Sequence[float], readings: Sequence[Reading]) -> float:

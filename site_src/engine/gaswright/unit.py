@@ -31,6 +31,7 @@ class UnitReading(NamedTuple):
     zero: float
     reference: str | None
     conditions: tuple[float, float] | None
+    pair: str
 
 
 def parse(
@@ -50,8 +51,18 @@ def parse(
         kind = name_of(found.exponents)
         said = f"{found.text} ({kind})" if kind else found.text
         raise ReadingError(where, said, expected, "Choose another unit, or check which row this is.")
-    shown = found.text + (f" ({found.pair})" if found.pair else "")
-    return UnitReading(shown, found.factor, found.zero, reference, conditions_of(found.pair) if found.pair else None)
+    conditions = conditions_of(found.pair) if found.pair else None
+    return UnitReading(found.text, found.factor, found.zero, reference, conditions, found.pair)
+
+
+def is_pressure(text: str) -> bool:
+    """Say whether a number with a unit, such as ``1 atm``, is a pressure by its unit."""
+    body = product.normal(text.lstrip("+-−–0123456789., \u00a0\u2009\u202f"))
+    try:
+        found, _ = _counted(body, "unit", "a unit")
+    except ReadingError:
+        return False
+    return found.exponents == PRESSURE
 
 
 def conditions_of(pair: str) -> tuple[float, float]:
