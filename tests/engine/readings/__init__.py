@@ -1,0 +1,1 @@
+"""Tests of readings, units, instruments, uncertainty and how numbers are shown."""
