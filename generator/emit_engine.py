@@ -15,7 +15,7 @@ from generator.printers import PythonWriter, TextWriter, symbol_text
 from generator.solve import Form, SolvedRelation, Way, evaluated
 from spec.model import Constant, Family, Relation, Sign, Validity, Variable
 
-MATH_NAMES = ("sqrt", "log", "exp", "sin", "cos", "asin", "erf", "pi")
+MATH_NAMES = ("pow", "sqrt", "log", "exp", "sin", "cos", "asin", "erf", "pi")
 SIGNS = {Sign.POSITIVE: "positive", Sign.NONNEGATIVE: "nonnegative", Sign.ANY: "any"}
 WIDTH = 110
 

@@ -3,6 +3,7 @@
 Takes the spec's units and kinds; gives the text of ``gaswright/tables.py``. Next: gaswright.unit and gaswright.reading.
 """
 
+import re
 from collections.abc import Iterable, Mapping
 
 from generator.errors import SpecError
@@ -10,8 +11,9 @@ from spec.dimensions import Dimension
 from spec.model import Kind, Unit
 from spec.unit_words import ASKED_PAIR, PRODUCTS, QUESTIONS, WITH_PAIR
 
-LEFT_OUT = str.maketrans("", "", " .^")
-PLAIN = str.maketrans("⁰¹²³⁴⁵⁶⁷⁸⁹₀₁₂₃₄₅₆₇₈₉⁻μ", "01234567890123456789-µ")
+LEFT_OUT = str.maketrans("", "", " .")
+PLAIN = str.maketrans({"²": "^2", "³": "^3", "₂": "2", "μ": "µ"})
+POWER_AT_END = re.compile(r"([A-Za-z])\^?([23])$")
 
 
 def emit_tables(units: Iterable[Unit], kinds: Iterable[Kind]) -> str:
@@ -24,9 +26,9 @@ def emit_tables(units: Iterable[Unit], kinds: Iterable[Kind]) -> str:
         "",
         *_table("UNITS", {unit.key: _unit(unit) for unit in units}),
         *_table("SPELLINGS", {word: repr(key) for word, key in spellings(units).items()}),
-        *_table("PRODUCTS", {compact(word): repr(text) for word, text in PRODUCTS.items()}),
-        *_table("WITH_PAIR", {compact(word): repr(pair) for word, pair in WITH_PAIR.items()}),
-        *_table("ASKED_PAIR", {compact(word): repr(pairs) for word, pairs in ASKED_PAIR.items()}),
+        *_table("PRODUCTS", _by_form(PRODUCTS)),
+        *_table("WITH_PAIR", _by_form(WITH_PAIR)),
+        *_table("ASKED_PAIR", _by_form(ASKED_PAIR)),
         *_table("QUESTIONS", {compact(word): repr(offers) for word, offers in QUESTIONS.items()}),
         *_table("KINDS", {kind.key: _kind(kind) for kind in kinds}),
         "",
@@ -35,15 +37,25 @@ def emit_tables(units: Iterable[Unit], kinds: Iterable[Kind]) -> str:
 
 
 def compact(word: str) -> str:
-    """Give a spelling as the engine compares it: no blanks, full stops or ``^``, digits on the line."""
+    """Give a spelling as the engine compares it: no blanks or full stops, raised digits behind ``^``."""
     return word.translate(PLAIN).translate(LEFT_OUT)
+
+
+def forms(word: str) -> tuple[str, ...]:
+    """Give the compact spelling, and where it ends in a power both ways of typing that: ``Nm3`` and ``Nm^3``."""
+    one = compact(word)
+    return tuple(dict.fromkeys((one, POWER_AT_END.sub(r"\1\2", one), POWER_AT_END.sub(r"\1^\2", one))))
+
+
+def _by_form(words: Mapping[str, object]) -> dict[str, str]:
+    return {form: repr(meaning) for word, meaning in words.items() for form in forms(word)}
 
 
 def spellings(units: Iterable[Unit]) -> dict[str, str]:
     """Give every compact spelling with its unit's key. Raises SpecError where two units claim one spelling."""
     found: dict[str, str] = {}
     for unit in units:
-        for word in map(compact, (unit.key, *unit.spellings)):
+        for word in (form for typed in (unit.key, *unit.spellings) for form in forms(typed)):
             owner = found.setdefault(word, unit.key)
             if owner != unit.key:
                 raise SpecError(

@@ -166,8 +166,10 @@ class PythonWriter(LineWriter):
         return str(value) if value.is_integer else repr(float(value))
 
     def power(self, base: str, exponent: sympy.Expr) -> str:
-        """Give squares and other powers with ``**``."""
-        return f"{base}**{self._bracketed(exponent, ATOM)}"
+        """Give whole powers with ``**`` and others with ``pow`` of math, which refuses what is not real."""
+        if isinstance(exponent, sympy.Integer):
+            return f"{base}**{exponent}"
+        return f"pow({base}, {self._walk(exponent)[0]})"
 
     def call(self, name: str, arguments: list[str]) -> str:
         """Give a call of a math function or of the gas model."""

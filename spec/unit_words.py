@@ -1,7 +1,7 @@
 """Words of the field that are no units by themselves: products, reference conditions, words with two meanings.
 
 Takes the keys of spec.units; gives plain tables. Next: generator.emit_tables writes them for gaswright.unit.
-Spellings are compared without blanks, full stops and ``^``, and without case where that leaves one meaning.
+Spellings are compared without blanks and full stops, and without case where that leaves one meaning.
 Reference conditions: DIN 1343 (normal), ISO 13443 (standard); what the others count at is common practice without a
 source and differs between suppliers, so it is asked.
 """
@@ -18,6 +18,7 @@ PRODUCTS = {
     "cf": "ft³", "cuft": "ft³", "cubic foot": "ft³", "cubic feet": "ft³", "cu in": "in³", "cubic inch": "in³",
     "cubic inches": "in³", "sq in": "in²", "sqft": "ft²", "sq m": "m²",
     "cfm": "ft³/min", "cfh": "ft³/h", "cfs": "ft³/s",
+    "kg/cm2": "kgf/cm²", "kp/cm2": "kgf/cm²", "ksc": "kgf/cm²",
     "mph": "mi/h", "kph": "km/h", "kmh": "km/h", "fps": "ft/s",
 }
 WITH_PAIR = {
@@ -34,7 +35,8 @@ ASKED_PAIR = {
 QUESTIONS = {
     "gal": ("US gal", "imp gal"), "gals": ("US gal", "imp gal"), "gallon": ("US gal", "imp gal"),
     "gallons": ("US gal", "imp gal"), "gpm": ("US gal/min", "imp gal/min"), "ton": ("t", "short ton", "long ton"),
-    "tons": ("t", "short ton", "long ton"), "nm3": ("Nm³", "nm^3"), "NM3": ("Nm³", "nm^3"), "mpa": ("MPa", "mPa"),
+    "tons": ("t", "short ton", "long ton"), "nm3": ("Nm³", "nm^3"), "NM3": ("Nm³", "nm^3"), "NM^3": ("Nm³", "nm^3"),
+    "mpa": ("MPa", "mPa"),
     "Mbar": ("mbar", "bar"), "MBAR": ("mbar", "bar"), "Mm": ("mm", "m"), "mw": ("mW", "MW"),
     "M": ("m", "mol", "min"),
 }

@@ -70,7 +70,7 @@ PRESSURE = (
     _unit("mbar", dim.PRESSURE, 100, "mbar", B8, "mb", "mbars", "millibar", "millibars"),
     _unit("µbar", dim.PRESSURE, "1/10", "ubar", B8, "ubar", "microbar"),
     _unit("atm", dim.PRESSURE, ATM, "atm", B8, "atmosphere", "atmospheres", "std atm"),
-    _unit("kgf/cm²", dim.PRESSURE, G_N * 10**4, "kgf/cm2", B8, "kgf/cm2", "kg/cm²", "kg/cm2", "kp/cm2", "at", "ksc"),
+    _unit("at", dim.PRESSURE, G_N * 10**4, "att", B8, "technical atmosphere"),
     _unit("psi", dim.PRESSURE, PSI, "[psi]", B8, "lbf/in2", "lb/in2", "lbs/in2", "lbf/sq in", "lb/sq in"),
     _unit("ksi", dim.PRESSURE, PSI * 1000, "10*3.[psi]", B8),
     _unit("psf", dim.PRESSURE, PSI / 144, "[lbf_av]/[ft_i]2", B8, "lbf/ft2", "lb/ft2"),

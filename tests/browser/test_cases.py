@@ -69,6 +69,19 @@ def agrees(case: Case, shown: float, unit: str) -> bool:
     return low - slack <= shown <= high + slack
 
 
+def wait_figure(page: Tab, case: Case, unit: str) -> None:
+    """Wait until the row found shows a number that agrees with the source."""
+
+    def look() -> str:
+        return page.text(f"#{case.relation}-{case.find}-found").replace("\u202f", "")
+
+    def done(text: str) -> bool:
+        return bool(FOUND.match(text)) and agrees(case, number(text), unit)
+
+    expected = f"{case.expect} ({case.source})"
+    page.wait_until(look, done, step=f"row {case.find} of {case.relation}", expected=expected, timeout_s=START_S)
+
+
 @pytest.mark.parametrize("law", LAWS)
 def test_the_published_figures_are_met_on_the_page(law: str, page: Tab) -> None:
     """Type each case of the law and read the row found."""
@@ -80,10 +93,4 @@ def test_the_published_figures_are_met_on_the_page(law: str, page: Tab) -> None:
             page.select(f"#{law}-{case.find}-unit", unit)
         for name in case.given:
             type_reading(page, case, name)
-        page.wait_until(
-            lambda case=case: page.text(f"#{law}-{case.find}-found").replace("\u202f", ""),
-            lambda text, case=case, unit=unit: bool(FOUND.match(text)) and agrees(case, number(text), unit),
-            step=f"row {case.find} of {law}",
-            expected=f"{case.expect} ({case.source})",
-            timeout_s=START_S,
-        )
+        wait_figure(page, case, unit)

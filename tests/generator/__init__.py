@@ -1,0 +1,1 @@
+"""Tests of the stages and commands of the generator."""

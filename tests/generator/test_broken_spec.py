@@ -24,7 +24,7 @@ from spec.model import Relation, Sheet, Use, Variable
 from spec.relations.a_pressure import GAUGE_PRESSURE
 from spec.relations.b_simple import BOYLE, V_1, p_1
 from spec.relations.g_real import VAN_DER_WAALS
-from spec.sheets import LOCKED_IN
+from spec.sheets.locked_in import LOCKED_IN
 
 ROOT = Path(__file__).resolve().parents[2]
 CASE = Case(
@@ -225,7 +225,8 @@ BROKEN = {
         "left=V_1 / T_1,",
         "left=V_1 * T_1,",
         (
-            "relation charles: found a left side in m^3 K and a right side in m^3 K^-1; expected the same dimension on both "
+            "relation charles: found a left side in m^3 K and a right side in m^3 K^-1; expected the same "
+            "dimension on both "
             "sides. correct the equation or the kinds of its variables"
         ),
     ),

@@ -10,17 +10,29 @@ from typing import Any
 from gaswright.errors import GaswrightError, NoSolutionError, OutsideRangeError, ReadingError
 
 __all__ = [
-    "GaswrightError", "NoSolutionError", "OutsideRangeError", "ReadingError",
-    "gas_state", "gases", "relations", "run_sheet", "sheets", "solve",
+    "GaswrightError",
+    "NoSolutionError",
+    "OutsideRangeError",
+    "ReadingError",
+    "gas_state",
+    "gases",
+    "relations",
+    "run_sheet",
+    "sheets",
+    "solve",
 ]
 
 _HOME = {
-    "solve": "gaswright.law", "run_sheet": "gaswright.sheet", "gas_state": "gaswright.gas",
-    "relations": "gaswright.contents", "sheets": "gaswright.contents", "gases": "gaswright.contents",
+    "solve": "gaswright.law",
+    "run_sheet": "gaswright.sheet",
+    "gas_state": "gaswright.gas",
+    "relations": "gaswright.contents",
+    "sheets": "gaswright.contents",
+    "gases": "gaswright.contents",
 }
 
 
-def __getattr__(name: str) -> Any:  # noqa: ANN401 - the public functions, imported when first asked for
+def __getattr__(name: str) -> Any:
     if name in _HOME:
         return getattr(import_module(_HOME[name]), name)
     raise AttributeError(f"module 'gaswright' has no attribute {name!r}")

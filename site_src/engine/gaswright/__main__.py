@@ -29,9 +29,13 @@ def main(arguments: Sequence[str] | None = None) -> int:
 
 
 def _parser() -> argparse.ArgumentParser:
-    parser = argparse.ArgumentParser(prog="gaswright", description="Gas laws and job sheets, from readings to a figure.")
+    parser = argparse.ArgumentParser(
+        prog="gaswright", description="Gas laws and job sheets, from readings to a figure."
+    )
     commands = parser.add_subparsers(dest="command", required=True)
-    solve_law = commands.add_parser("solve", help="solve a law: solve boyle V_2 p_1='6.5 psia' V_1='30 mL' p_2='11 psia'")
+    solve_law = commands.add_parser(
+        "solve", help="solve a law: solve boyle V_2 p_1='6.5 psia' V_1='30 mL' p_2='11 psia'"
+    )
     solve_law.add_argument("key")
     solve_law.add_argument("unknown")
     solve_law.add_argument("readings", nargs="*", metavar="name=value")
@@ -51,8 +55,15 @@ def _parser() -> argparse.ArgumentParser:
 def _solve(options: argparse.Namespace) -> dict[str, Any]:
     readings = dict(_pair(text) for text in options.readings)
     result = solve(options.key, options.unknown, readings, station_pressure=options.station_pressure)
-    return {"value": result.value, "unit": result.unit, "u": result.u, "expanded": result.expanded, "k": result.k,
-            "working": list(result.working), "warnings": list(result.warnings)}
+    return {
+        "value": result.value,
+        "unit": result.unit,
+        "u": result.u,
+        "expanded": result.expanded,
+        "k": result.k,
+        "working": list(result.working),
+        "warnings": list(result.warnings),
+    }
 
 
 def _pair(text: str) -> tuple[str, str]:
@@ -68,22 +79,41 @@ def _gas(options: argparse.Namespace) -> dict[str, Any]:
     if pressure.reference != "absolute":
         raise ReadingError("p", pressure.text, "an absolute pressure", "Add the station pressure to a gauge reading.")
     state = gas_state(options.name, T=temperature, p=pressure.value)
-    return {"Z": state.Z, "p": state.p, "T": state.T, "molar_density": state.molar_density,
-            "mass_density": state.mass_density, "method": state.method, "uncertainty": state.uncertainty,
-            "warnings": list(pressure.warnings)}
+    return {
+        "Z": state.Z,
+        "p": state.p,
+        "T": state.T,
+        "molar_density": state.molar_density,
+        "mass_density": state.mass_density,
+        "method": state.method,
+        "uncertainty": state.uncertainty,
+        "warnings": list(pressure.warnings),
+    }
 
 
 def _sheet(options: argparse.Namespace) -> dict[str, Any]:
     try:
         record = json.loads(options.file.read_text(encoding="utf-8"))
     except (OSError, ValueError) as problem:
-        raise ReadingError(str(options.file), str(problem)[:80], "a JSON file with find and readings", "Give another file.") from None
+        raise ReadingError(
+            str(options.file), str(problem)[:80], "a JSON file with find and readings", "Give another file."
+        ) from None
     if not isinstance(record, dict):
         raise ReadingError(str(options.file), "JSON that is not an object", "find and readings", "Correct the file.")
     result = run_sheet(options.key, record)
-    return {"find": result.find, "value": result.value, "unit": result.unit, "u": result.u, "expanded": result.expanded,
-            "k": result.k, "safe": result.safe, "ideal": result.ideal, "verdict": result.verdict,
-            "working": [line.text for line in result.working], "warnings": list(result.warnings)}
+    return {
+        "find": result.find,
+        "value": result.value,
+        "unit": result.unit,
+        "u": result.u,
+        "expanded": result.expanded,
+        "k": result.k,
+        "safe": result.safe,
+        "ideal": result.ideal,
+        "verdict": result.verdict,
+        "working": [line.text for line in result.working],
+        "warnings": list(result.warnings),
+    }
 
 
 def _plain(facts: dict[str, Any]) -> str:

@@ -8,8 +8,8 @@ from typing import Any
 from gaswright import find
 from gaswright.gas import find as find_gas
 from gaswright.gas import keys as gas_keys
-from gaswright.laws.index import FAMILY_OF
 from gaswright.jobs.index import TITLE_OF
+from gaswright.laws.index import FAMILY_OF
 from gaswright.tables import KINDS
 
 
@@ -22,14 +22,22 @@ def _relation(key: str) -> dict[str, Any]:
     relation = find.relation(key)
     variables = {
         variable.name: {
-            "kind": variable.kind, "unit": KINDS[variable.kind].si, "sign": variable.sign, "text": variable.text,
+            "kind": variable.kind,
+            "unit": KINDS[variable.kind].si,
+            "sign": variable.sign,
+            "text": variable.text,
             "default": variable.default,
         }
         for variable in relation.variables
     }
     return {
-        "title": relation.title, "family": relation.family, "equation": relation.text, "variables": variables,
-        "find": list(relation.forms), "needs_gas": relation.uses_gas, "source": relation.source,
+        "title": relation.title,
+        "family": relation.family,
+        "equation": relation.text,
+        "variables": variables,
+        "find": list(relation.forms),
+        "needs_gas": relation.uses_gas,
+        "source": relation.source,
     }
 
 
@@ -42,7 +50,9 @@ def _sheet(key: str) -> dict[str, Any]:
     sheet = find.sheet(key)
     rows = {
         name: {
-            "title": row.title, "kind": "gas" if row.is_gas else row.kind, "unit": KINDS[row.kind].si,
+            "title": row.title,
+            "kind": "gas" if row.is_gas else row.kind,
+            "unit": KINDS[row.kind].si,
             "optional": row.optional,
         }
         for name, row in sheet.rows.items()
@@ -54,4 +64,6 @@ def _sheet(key: str) -> dict[str, Any]:
 def gases() -> dict[str, dict[str, Any]]:
     """Give every gas by key: title, formula and molar mass in kg/mol."""
     found = {key: find_gas(key) for key in gas_keys()}
-    return {key: {"title": gas.title, "formula": gas.formula, "molar_mass": gas.molar_mass} for key, gas in found.items()}
+    return {
+        key: {"title": gas.title, "formula": gas.formula, "molar_mass": gas.molar_mass} for key, gas in found.items()
+    }

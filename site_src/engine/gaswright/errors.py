@@ -24,7 +24,7 @@ class ReadingError(GaswrightError):
     ``offers`` then holds the spellings to choose from.
     """
 
-    def __init__(  # noqa: PLR0913 - the four parts of a message and what is offered instead
+    def __init__(
         self, where: str, found: str, expected: str, todo: str, *, offers: tuple[str, ...] = ()
     ) -> None:
         """Keep the four parts and the spellings offered."""

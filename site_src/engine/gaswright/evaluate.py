@@ -38,11 +38,14 @@ def _has_sign(sign: str, value: float) -> bool:
     return sign == "any" or value > 0 or (sign == "nonnegative" and value == 0)
 
 
-def _no_answer(relation: Relation, where: str, sign: str, value: complex | float) -> NoSolutionError:
+def _no_answer(relation: Relation, where: str, sign: str, value: complex) -> NoSolutionError:
     is_number = not isinstance(value, complex) and math.isfinite(value)
     found = f"{value:.6g} (SI)" if is_number else "no finite number"
     return NoSolutionError(
-        f"{where}, by {relation.title}", found, SIGN_WORDS[sign], "Check the readings: they do not fit together.",
+        f"{where}, by {relation.title}",
+        found,
+        SIGN_WORDS[sign],
+        "Check the readings: they do not fit together.",
     )
 
 

@@ -6,9 +6,9 @@ Takes keys; gives emitted values, or ReadingError with the nearest keys.
 from importlib import import_module
 
 from gaswright.errors import ReadingError
-from gaswright.model import Relation, Sheet
-from gaswright.laws.index import FAMILY_OF
 from gaswright.jobs.index import TITLE_OF as SHEET_TITLES
+from gaswright.laws.index import FAMILY_OF
+from gaswright.model import Relation, Sheet
 
 _relations: dict[str, Relation] = {}
 

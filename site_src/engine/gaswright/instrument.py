@@ -5,12 +5,13 @@ A limit is rectangular (JCGM 100:2008, 4.3.7). gaswright.reading comes next.
 """
 
 import re
+from collections.abc import Mapping
 from typing import NamedTuple
 
 from gaswright import number, unit
 from gaswright.errors import ReadingError
 
-Record = dict[str, object]
+Record = Mapping[str, object]
 FIGURE = r"([+\-−]?[0-9.,]+(?:[eE][+-]?[0-9]+)?)"
 CLASS = re.compile(rf"(?:class|cl\.?|kl\.?|klasse)\s*{FIGURE}\s*(?:of|at|on|,)?\s*(.*)", re.IGNORECASE)
 PERCENT = re.compile(rf"±?\s*{FIGURE}\s*%\s*(?:of\s+)?(?:the\s+)?(.*)")

@@ -39,8 +39,15 @@ class Result(NamedTuple):
 
 
 def solve(  # noqa: PLR0913 - what a caller may say, all by name but three
-    key: str, unknown: str, readings: dict[str, Raw], *, station_pressure: Raw | None = None, gas: str | None = None,
-    decimal: str | None = None, instruments: Instruments | None = None, show: str = "",
+    key: str,
+    unknown: str,
+    readings: dict[str, Raw],
+    *,
+    station_pressure: Raw | None = None,
+    gas: str | None = None,
+    decimal: str | None = None,
+    instruments: Instruments | None = None,
+    show: str = "",
 ) -> Result:
     """Solve the law ``key`` for ``unknown``.
 
@@ -50,11 +57,13 @@ def solve(  # noqa: PLR0913 - what a caller may say, all by name but three
     """
     relation = find.relation(key)
     _check_names(relation, unknown, readings)
-    station = None if station_pressure is None else read(NO_STATION, station_pressure, KINDS["station_pressure"], decimal)
+    station = (
+        None if station_pressure is None else read(NO_STATION, station_pressure, KINDS["station_pressure"], decimal)
+    )
     gas_name = gas or readings.get("gas")
     model = find_gas(str(gas_name)) if relation.uses_gas and gas_name else None
     taken, warnings = _read_all(relation, unknown, readings, decimal, instruments)
-    return finish(relation, unknown, taken, station, model, warnings, show)
+    return finish(relation, unknown, taken, Around(station, model, tuple(warnings), show))
 
 
 def _check_names(relation: Relation, unknown: str, readings: dict[str, Raw]) -> None:
@@ -85,44 +94,73 @@ def read_variable(variable: Variable, raw: Raw, decimal: str | None, instruments
     """Read one variable of a law and refuse a value of the wrong sign."""
     reading = read(f"{variable.symbol}, {variable.text}", raw, KINDS[variable.kind], decimal, instruments)
     is_counted_otherwise = reading.reference != KINDS[variable.kind].reference
-    if not is_counted_otherwise and ((variable.sign == "positive" and reading.value <= 0)
-                                     or (variable.sign == "nonnegative" and reading.value < 0)):
+    if not is_counted_otherwise and (
+        (variable.sign == "positive" and reading.value <= 0) or (variable.sign == "nonnegative" and reading.value < 0)
+    ):
         expected = "more than zero" if variable.sign == "positive" else "zero or more"
         raise ReadingError(reading.name, reading.text, expected, "Check the number and its sign.")
     return reading
 
 
-def finish(  # noqa: PLR0913 - the parts of one answer
-    relation: Relation, unknown: str, taken: dict[str, Reading], station: Reading | None, gas: Gas | None,
-    warnings: list[str], show: str = "",
-) -> Result:
+class Around(NamedTuple):
+    """What stands around the readings of a law: station pressure, gas, warnings so far, the unit to show."""
+
+    station: Reading | None
+    gas: Gas | None
+    warnings: tuple[str, ...]
+    show: str
+
+
+def finish(relation: Relation, unknown: str, taken: dict[str, Reading], around: Around) -> Result:
     """Give the Result of readings already taken."""
+    station, gas, said_before, show = around
     if relation.uses_gas and gas is None:
         raise ReadingError("gas", "nothing", "the gas by name or formula", "Choose the gas.")
-    station = next((taken[variable.name] for variable in relation.variables
-                    if variable.kind == "station_pressure" and variable.name in taken), station)
+    station = next(
+        (
+            taken[variable.name]
+            for variable in relation.variables
+            if variable.kind == "station_pressure" and variable.name in taken
+        ),
+        station,
+    )
     values, couplings = _counted(relation, taken, station)
     where = f"{relation.variable(unknown).symbol}, {relation.variable(unknown).text}"
     values[unknown] = evaluate(relation, unknown, values, gas, where)
     said = check_validity(relation, values, relation.title)
     slopes = sensitivities(relation, unknown, values, gas)
-    combined = _combined(relation, unknown, taken, station, slopes, couplings)
-    warnings = [*warnings, *(text for reading in taken.values() for text in (*reading.warnings, *questioned(reading))), *said]
+    combined = _combined(relation, taken, station, slopes, couplings)
+    warnings = [
+        *said_before,
+        *(text for reading in taken.values() for text in (*reading.warnings, *questioned(reading))),
+        *said,
+    ]
     units = {name: reading.unit for name, reading in taken.items()}
     units[unknown] = show or like_unit(relation, unknown, taken)
     return Result(
-        relation.key, unknown, values[unknown], KINDS[relation.variable(unknown).kind].si, combined.u,
-        combined.expanded, combined.k, combined.freedom, combined.shares,
+        relation.key,
+        unknown,
+        values[unknown],
+        KINDS[relation.variable(unknown).kind].si,
+        combined.u,
+        combined.expanded,
+        combined.k,
+        combined.freedom,
+        combined.shares,
         (*_conversions(relation, taken, station, values), working.line(relation, unknown, values, units)),
-        tuple(dict.fromkeys(warnings)), values, taken, slopes,
+        tuple(dict.fromkeys(warnings)),
+        values,
+        taken,
+        slopes,
     )
 
 
 def like_unit(relation: Relation, unknown: str, taken: dict[str, Reading]) -> str:
     """Give the unit to show the unknown in: that of a reading of the same kind, or the first its kind offers."""
     kind = relation.variable(unknown).kind
-    same = (taken[variable.name].unit for variable in relation.variables
-            if variable.kind == kind and variable.name in taken)
+    same = (
+        taken[variable.name].unit for variable in relation.variables if variable.kind == kind and variable.name in taken
+    )
     return next(same, KINDS[kind].units[0])
 
 
@@ -149,11 +187,13 @@ def sensitivities(relation: Relation, unknown: str, values: dict[str, float], ga
     return {name: -slope / own for name, slope in by_name.items()}
 
 
-def _combined(  # noqa: PLR0913 - the parts of one answer
-    relation: Relation, unknown: str, taken: dict[str, Reading], station: Reading | None,
-    slopes: dict[str, float], couplings: dict[str, float],
+def _combined(
+    relation: Relation,
+    taken: dict[str, Reading],
+    station: Reading | None,
+    slopes: dict[str, float],
+    couplings: dict[str, float],
 ) -> Combined:
-    del unknown
     wanted = {variable.name: KINDS[variable.kind].reference for variable in relation.variables}
     gradient = {name: slopes[name] * turn(reading, wanted[name]) for name, reading in taken.items()}
     by_station = sum(slopes[name] * couplings[name] for name in taken)
@@ -175,5 +215,7 @@ def _conversions(
         wanted = KINDS[variable.kind].reference
         if reading and station and reading.reference != wanted and wanted in ("absolute", "gauge", "vacuum"):
             value = quantity.text_of(values[variable.name], KINDS[variable.kind], reading.unit)
-            lines.append(f"{variable.symbol} = {reading.text}, with the station pressure {station.text}: {value} {wanted}")
+            lines.append(
+                f"{variable.symbol} = {reading.text}, with the station pressure {station.text}: {value} {wanted}"
+            )
     return tuple(lines)

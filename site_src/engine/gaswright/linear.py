@@ -21,7 +21,9 @@ def solve_linear(matrix: list[list[float]], right: list[float], where: str) -> l
         pivot = max(range(column, size), key=lambda line: abs(rows[line][column]))
         if abs(rows[pivot][column]) < SMALLEST:
             raise NoSolutionError(
-                where, "readings that do not fix it", "readings on which the answer depends in one way only",
+                where,
+                "readings that do not fix it",
+                "readings on which the answer depends in one way only",
                 "Check the readings, or ask for another row.",
             )
         rows[column], rows[pivot] = rows[pivot], rows[column]

@@ -9,11 +9,11 @@ from collections.abc import Callable
 from typing import TYPE_CHECKING, NamedTuple
 
 from gaswright.errors import NoSolutionError, OutsideRangeError
+from gaswright.evaluate import evaluate
 from gaswright.find import relation as find_relation
 from gaswright.linear import solve_linear
 from gaswright.model import Block, Find, Relation, Sheet, Step
 from gaswright.roots import brent, sign_changes
-from gaswright.evaluate import evaluate
 
 if TYPE_CHECKING:
     from gaswright.gas.real import Gas
@@ -71,8 +71,10 @@ def _untie(sheet: Sheet, block: Block, values: dict[str, float], gas: "Gas") -> 
     if len(found) != 1:
         what = "no value" if not found else f"{len(found)} values"
         raise NoSolutionError(
-            row.title, f"{what} between {row.low:g} and {row.high:g} (SI) that agree with the readings",
-            "readings that exactly one value explains", "Check the readings, or ask for another row.",
+            row.title,
+            f"{what} between {row.low:g} and {row.high:g} (SI) that agree with the readings",
+            "readings that exactly one value explains",
+            "Check the readings, or ask for another row.",
         )
     values[block.torn] = found[0]
     for step in block.steps:
@@ -81,6 +83,7 @@ def _untie(sheet: Sheet, block: Block, values: dict[str, float], gas: "Gas") -> 
 
 def _roots(function: Callable[[float], float], low: float, high: float) -> list[float]:
     """Give every root between ``low`` and ``high``, also beside a place where the function stops being defined."""
+
     def defined(x: float) -> float | None:
         try:
             return function(x)
@@ -92,12 +95,14 @@ def _roots(function: Callable[[float], float], low: float, high: float) -> list[
     for at in range(len(places) - 1):
         if (values[at] is None) != (values[at + 1] is None):
             places.append(_edge(defined, places[at], places[at + 1], starts=values[at] is not None))
-    return [left if left == right else brent(function, left, right, at_left, at_right)
-            for left, right, at_left, at_right in sign_changes(defined, sorted(places))]
+    return [
+        left if left == right else brent(function, left, right, at_left, at_right)
+        for left, right, at_left, at_right in sign_changes(defined, sorted(places))
+    ]
 
 
 def _places(low: float, high: float) -> list[float]:
-    if low > 0 and high / low > 100:  # noqa: PLR2004 - beyond two decades a logarithmic grid sees more
+    if low > 0 and high / low > 100:
         ratio = math.log(high / low)
         return [low * math.exp(ratio * step / PLACES) for step in range(PLACES + 1)]
     return [low + (high - low) * step / PLACES for step in range(PLACES + 1)]

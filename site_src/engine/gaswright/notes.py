@@ -19,7 +19,9 @@ FRESH = 4 * 3600.0
 def capacity_each(values: Values, readings: Readings) -> tuple[str, ...]:
     """Question a water capacity above 150 L each: it may be the total of the pack."""
     if "V_each" in readings and values.get("V_each", 0.0) > LARGE_CYLINDER:
-        return (f"{readings['V_each'].text} is large for one cylinder. Is it the total of the pack? Then the count is 1.",)
+        return (
+            f"{readings['V_each'].text} is large for one cylinder. Is it the total of the pack? Then the count is 1.",
+        )
     return ()
 
 
@@ -30,7 +32,9 @@ def changeover_kept_back(values: Values, readings: Readings) -> tuple[str, ...]:
         return ()
     if start is not None and start <= end:
         raise NoSolutionError(
-            "Pressure now", readings["pg_start"].text, f"more than the changeover pressure {readings['pg_end'].text}",
+            "Pressure now",
+            readings["pg_start"].text,
+            f"more than the changeover pressure {readings['pg_end'].text}",
             "The bank is already at changeover: change over, or read both again.",
         )
     return ("No changeover pressure is kept back.",) if end <= 0 else ()

@@ -16,7 +16,7 @@ SAME = str.maketrans({
     "μ": "µ", "º": "°", "˚": "°", "⋅": "·", "∙": "·", "•": "·", "*": "·", "×": "·", "−": "-", "–": "-", "″": '"',
     "”": '"', "“": '"', "\u00a0": " ", "\u2009": " ", "\u202f": " ", "₂": "2", "∕": "/", "÷": "/", "∆": "Δ",
 })
-LEFT_OUT = str.maketrans("", "", " .^")
+LEFT_OUT = str.maketrans("", "", " .")
 RUN = re.compile(r"[⁰¹²³⁴⁵⁶⁷⁸⁹⁻⁺]+")
 PARTS = re.compile(r"[()/·]|[^()/·]+")
 POWER = re.compile(r"(.*[^\d^+\- ])\s*(?:\^\s*)?([+-]?\d{1,2})", re.DOTALL)
@@ -73,7 +73,16 @@ def _atoms(text: str, where: str, expected: str) -> Atoms:
 
 
 def _parts(text: str) -> list[str]:
-    return [part.strip() for part in PARTS.findall(normal(text)) if part.strip()]
+    """Cut into units, operators and brackets; a bracket that belongs to a unit's name, as in inHg (60 °F), stays."""
+    parts = [part.strip() for part in PARTS.findall(normal(text)) if part.strip()]
+    at = 0
+    while at + 3 < len(parts):
+        name = "".join(parts[at : at + 4])
+        if parts[at + 1] == "(" and parts[at + 3] == ")" and parts[at] not in "/·(" and _spelt(name):
+            power = parts[at + 4] if parts[at + 4 : at + 5] and parts[at + 4].startswith("^") else ""
+            parts[at : at + (5 if power else 4)] = [name + power]
+        at += 1
+    return parts
 
 
 def _product(parts: list[str], at: int, sign: int, where: str, expected: str) -> tuple[Atoms, int]:
@@ -169,13 +178,16 @@ def _spelt(part: str) -> set[str]:
     for table in (QUESTIONS, SPELLINGS, PRODUCTS, WITH_PAIR, ASKED_PAIR):
         if plain in table:
             return {plain}
-    if len(plain) < 2 or not (plain.isupper() or plain.islower() or plain.istitle()):
+    letters = sum(map(str.isalpha, plain))
+    if letters < 2 or not (plain.isupper() or plain.islower() or plain.istitle()):
+        return set()
+    power = POWER.fullmatch(plain)
+    if power and power[1].rstrip("^") in SPELLINGS:  # nm^3 is a cube of nm, not Nm³ in other letters
         return set()
     if not folded:
         for table in (SPELLINGS, PRODUCTS, WITH_PAIR, ASKED_PAIR):
             for word in table:
-                if len(word) > 2 or word.isalpha():
-                    folded.setdefault(word.lower(), set()).add(word)
+                folded.setdefault(word.lower(), set()).add(word)
     return _one_each(folded.get(plain.lower(), set()))
 
 
@@ -203,11 +215,12 @@ def _shown(powers: tuple[tuple[str, int], ...]) -> str:
     sides: tuple[dict[str, int], dict[str, int]] = ({}, {})
     for key, power in powers:
         side = sides[power < 0]
-        side[key] = side.get(key, 0) + abs(power)
+        if key != "1":
+            side[key] = side.get(key, 0) + abs(power)
     above, below = ("·".join(key + (str(n).translate(LOWERED) if n > 1 else "") for key, n in side.items())
                     for side in sides)
     if not below:
-        return above
+        return above or "1"
     return f"{above or '1'}/{below if len(sides[1]) == 1 else f'({below})'}"
 
 

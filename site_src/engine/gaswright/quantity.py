@@ -28,8 +28,7 @@ def with_unit(number: str, text: str) -> str:
 
 def text_of(value: float, kind: Kind, text: str, mark: str = ".", digits: int = 6) -> str:
     """Give an SI ``value`` with its unit, at most ``digits`` significant digits, and how a pressure is counted."""
-    words = with_unit(show.tidy(in_unit(value, kind, text), digits, mark), text)
-    return words
+    return with_unit(show.tidy(in_unit(value, kind, text), digits, mark), text)
 
 
 def working_unit(kind: Kind, typed: str) -> str:

@@ -5,6 +5,7 @@ gaswright.law and gaswright.sheet come next.
 """
 
 import math
+from collections.abc import Mapping
 from typing import Any, NamedTuple
 
 from gaswright import instrument as instruments_of
@@ -13,8 +14,8 @@ from gaswright.errors import ReadingError
 from gaswright.records import Kind
 from gaswright.typed import Typed, take_apart
 
-Raw = str | float | int | dict[str, object]
-Instruments = dict[str, dict[str, object]]
+Raw = str | float | int | Mapping[str, object]
+Instruments = Mapping[str, Mapping[str, object]]
 ROOT_3, ROOT_12 = math.sqrt(3), math.sqrt(12)
 ZERO_CELSIUS = 273.15
 COUNTED = ("gauge", "absolute", "vacuum")
@@ -56,9 +57,9 @@ def read(
     """
     if isinstance(raw, (int, float)) and not isinstance(raw, bool):
         return _of_number(where, float(raw), kind)
-    if not isinstance(raw, (str, dict)):
+    if not isinstance(raw, (str, Mapping)):
         raise ReadingError(where, repr(raw)[:40], "a reading as text, such as 200 bar gauge", "Type the reading.")
-    record: dict[str, object] = {"text": raw} if isinstance(raw, str) else raw
+    record: Mapping[str, object] = {"text": raw} if isinstance(raw, str) else raw
     text = "" if record.get("text") is None else str(record["text"]).strip()
     if not text:
         raise ReadingError(where, "nothing", f"a reading of {kind.title}", "Type the reading, or ask for this row.")
@@ -181,7 +182,7 @@ def _reference(found: unit.UnitReading, chosen: str, kind: Kind, where: str, par
 
 
 def _bare_warning(
-    where: str, found: unit.UnitReading, record: dict[str, object], kind: Kind, reference: str
+    where: str, found: unit.UnitReading, record: Mapping[str, object], kind: Kind, reference: str
 ) -> tuple[str, ...]:
     is_bare = kind.reference == "absolute" and not found.reference and not record.get("reference")
     if is_bare and kind.key != "station_pressure":
@@ -218,7 +219,7 @@ def _in(found: unit.UnitReading, value: float, kind: Kind) -> str:
 
 
 def _accuracy(  # noqa: PLR0913, PLR0917 - all that says how good a reading is
-    where: str, record: dict[str, object], parts: Typed, typed: number.Number, found: unit.UnitReading,
+    where: str, record: Mapping[str, object], parts: Typed, typed: number.Number, found: unit.UnitReading,
     kind: Kind, instruments: Instruments,
 ) -> dict[str, Any]:
     """Give the fields of a Reading about its uncertainty. A limit is rectangular (JCGM 100:2008, 4.3.7)."""
@@ -287,7 +288,8 @@ def _refuse_below_zero(reading: Reading, station: "Reading | None") -> None:
     absolute = station.value + (reading.value if reading.reference == "gauge" else -reading.value)
     if absolute < 0:
         is_gauge = reading.reference == "gauge"
-        limit = f"no lower than −{station.text} gauge" if is_gauge else f"no more than {station.text}"
+        most = station.text.removesuffix(" absolute")
+        limit = f"no lower than −{most} gauge" if is_gauge else f"no more than {most} vacuum"
         raise ReadingError(
             reading.name, reading.text, f"{limit}, which is no pressure at all",
             "Read the gauge and the station pressure again.",

@@ -5,6 +5,7 @@ Takes plain functions of one float; gives floats or NoSolutionError. Emitted num
 
 import math
 from collections.abc import Callable, Sequence
+from typing import NamedTuple
 
 from gaswright.errors import NoSolutionError
 
@@ -14,43 +15,45 @@ STEPS = 200
 TIGHT = 4e-16
 
 
+class Guess(NamedTuple):
+    """A place and the value of the function there."""
+
+    x: float
+    y: float
+
+
 def brent(function: Function, low: float, high: float, at_low: float, at_high: float) -> float:
     """Give the root between ``low`` and ``high``, where the function has opposite signs.
 
     Brent, Algorithms for Minimization without Derivatives, 1973, chapter 4; the tolerance is the spacing of floats.
     """
-    a, b, f_a, f_b = low, high, at_low, at_high
-    c, f_c = a, f_a
-    step = before = b - a
+    a, b = Guess(low, at_low), Guess(high, at_high)
+    c = a
+    step = before = b.x - a.x
     for _ in range(STEPS):
-        if f_b * f_c > 0:
-            c, f_c, step, before = a, f_a, b - a, b - a
-        if abs(f_c) < abs(f_b):
-            a, b, c, f_a, f_b, f_c = b, c, b, f_b, f_c, f_b
-        tolerance = TIGHT * abs(b)
-        half = (c - b) / 2
-        if abs(half) <= tolerance or f_b == 0:
-            return b
-        step, before = _next_step(a, b, c, f_a, f_b, f_c, half, step, before, tolerance)
-        a, f_a = b, f_b
-        b += step if abs(step) > tolerance else math.copysign(tolerance, half)
-        f_b = function(b)
-    return b
+        if b.y * c.y > 0:
+            c, step, before = a, b.x - a.x, b.x - a.x
+        if abs(c.y) < abs(b.y):
+            a, b, c = b, c, b
+        tolerance = TIGHT * abs(b.x)
+        half = (c.x - b.x) / 2
+        if abs(half) <= tolerance or b.y == 0:
+            return b.x
+        step, before = _next_step((a, b, c), half, step, before, tolerance=tolerance)
+        a = b
+        x = b.x + (step if abs(step) > tolerance else math.copysign(tolerance, half))
+        b = Guess(x, function(x))
+    return b.x
 
 
-def _next_step(  # noqa: PLR0913 - the state of Brent's iteration
-    a: float, b: float, c: float, f_a: float, f_b: float, f_c: float,
-    half: float, step: float, before: float, tolerance: float,
+def _next_step(
+    guesses: tuple[Guess, Guess, Guess], half: float, step: float, before: float, *, tolerance: float
 ) -> tuple[float, float]:
-    if abs(before) < tolerance or abs(f_a) <= abs(f_b):
+    """Interpolate where that is safe, else halve; give the step and the one before it."""
+    a, b, c = guesses
+    if abs(before) < tolerance or abs(a.y) <= abs(b.y):
         return half, half
-    ratio = f_b / f_a
-    if a == c:
-        above, below = 2 * half * ratio, 1 - ratio
-    else:
-        q, r = f_a / f_c, f_b / f_c
-        above = ratio * (2 * half * q * (q - r) - (b - a) * (r - 1))
-        below = (q - 1) * (r - 1) * (ratio - 1)
+    above, below = _interpolated(a, b, c, half)
     if above > 0:
         below = -below
     above = abs(above)
@@ -59,11 +62,21 @@ def _next_step(  # noqa: PLR0913 - the state of Brent's iteration
     return half, half
 
 
+def _interpolated(a: Guess, b: Guess, c: Guess, half: float) -> tuple[float, float]:
+    """Give the step as a quotient: by the secant through two points or the inverse parabola through three."""
+    ratio = b.y / a.y
+    if a.x == c.x:
+        return 2 * half * ratio, 1 - ratio
+    q, r = a.y / c.y, b.y / c.y
+    return ratio * (2 * half * q * (q - r) - (b.x - a.x) * (r - 1)), (q - 1) * (r - 1) * (ratio - 1)
+
+
 def find_root(function: Function, low: float, high: float, where: str) -> float:
     """Give the one root of a function that only rises or only falls between ``low`` and ``high`` (both positive).
 
     Raises NoSolutionError where the function has one sign over the whole range.
     """
+
     def along(logarithm: float) -> float:
         return function(math.exp(logarithm))
 
@@ -75,8 +88,10 @@ def find_root(function: Function, low: float, high: float, where: str) -> float:
         return high
     if (at_start > 0) == (at_end > 0):
         raise NoSolutionError(
-            where, f"no value between {low:g} and {high:g} (SI) that agrees with the readings",
-            "readings that one value in that range can explain", "Check the readings and their units.",
+            where,
+            f"no value between {low:g} and {high:g} (SI) that agrees with the readings",
+            "readings that one value in that range can explain",
+            "Check the readings and their units.",
         )
     return _polished(function, math.exp(brent(along, start, end, at_start, at_end)), low, high)
 
@@ -91,7 +106,9 @@ def _polished(function: Function, near: float, low: float, high: float) -> float
     return near
 
 
-def sign_changes(function: Callable[[float], float | None], places: Sequence[float]) -> list[tuple[float, float, float, float]]:
+def sign_changes(
+    function: Callable[[float], float | None], places: Sequence[float]
+) -> list[tuple[float, float, float, float]]:
     """Give each pair of neighbouring ``places`` between which the function changes sign, with its values there.
 
     A place where the function is not defined (None) ends a stretch and starts another.
@@ -134,8 +151,10 @@ def polynomial_roots(coefficients: Sequence[float], low: float, high: float) -> 
         return total
 
     brackets = sign_changes(value, edges)
-    return [left if left == right else brent(value, left, right, at_left, at_right)
-            for left, right, at_left, at_right in brackets]
+    return [
+        left if left == right else brent(value, left, right, at_left, at_right)
+        for left, right, at_left, at_right in brackets
+    ]
 
 
 def polynomial_root(coefficients: Sequence[float], low: float, high: float, root: str, where: str) -> float:
@@ -143,7 +162,9 @@ def polynomial_root(coefficients: Sequence[float], low: float, high: float, root
     found = polynomial_roots(coefficients, low, high)
     if not found:
         raise NoSolutionError(
-            where, f"no real root between {low:g} and {high:g} (SI)", "readings that a state of the gas can have",
+            where,
+            f"no real root between {low:g} and {high:g} (SI)",
+            "readings that a state of the gas can have",
             "Check the readings and their units.",
         )
     return found[-1] if root == "largest" else found[0]

@@ -5,8 +5,8 @@ Takes a sheet's key and the input part of a record; gives a SheetResult. gaswrig
 
 from typing import Any, NamedTuple
 
-from gaswright import find as finder
 from gaswright import clock, quantity, working
+from gaswright import find as finder
 from gaswright.errors import GaswrightError, NoSolutionError, OutsideRangeError, ReadingError
 from gaswright.gas import Gas, IdealGas
 from gaswright.gas import find as find_gas
@@ -90,7 +90,9 @@ def question(sheet: Sheet, row: str | None) -> Find:
     if row is None:
         return next(iter(sheet.finds.values()))
     if row not in sheet.finds:
-        raise ReadingError(sheet.title, f"the question {row!r}", f"one of {', '.join(sheet.finds)}", "Ask for one of these.")
+        raise ReadingError(
+            sheet.title, f"the question {row!r}", f"one of {', '.join(sheet.finds)}", "Ask for one of these."
+        )
     return sheet.finds[row]
 
 
@@ -129,19 +131,19 @@ def _unknown_row(sheet: Sheet, name: str) -> ReadingError:
     return ReadingError(sheet.title, f"the row {str(name)[:40]!r}", f"one of {rows}", "Correct the name.")
 
 
-def _is_empty(raw: Any) -> bool:  # noqa: ANN401 - what a record may hold
+def _is_empty(raw: Any) -> bool:
     return raw is None or not _text(raw).strip()
 
 
-def _text(raw: Any) -> str:  # noqa: ANN401 - what a record may hold
+def _text(raw: Any) -> str:
     return str(raw.get("text", "") if isinstance(raw, dict) else raw)
 
 
-def _gas(raw: Any) -> Gas | None:  # noqa: ANN401 - what a record may hold
+def _gas(raw: Any) -> Gas | None:
     return None if _is_empty(raw) else find_gas(str(raw["text"] if isinstance(raw, dict) else raw))
 
 
-def _read_row(row: Row, raw: Any, decimal: str | None, instruments: Instruments | None) -> Reading:  # noqa: ANN401 - what a record may hold
+def _read_row(row: Row, raw: Any, decimal: str | None, instruments: Instruments | None) -> Reading:
     if row.accuracy and isinstance(raw, str):
         raw = {"text": raw, "accuracy": row.accuracy}
     elif row.accuracy and isinstance(raw, dict) and not raw.get("accuracy") and not raw.get("instrument"):
@@ -150,7 +152,7 @@ def _read_row(row: Row, raw: Any, decimal: str | None, instruments: Instruments 
     is_counted_otherwise = reading.reference != KINDS[row.kind].reference
     if not is_counted_otherwise and not row.low <= reading.value <= row.high:
         raise _out_of_row(row, reading)
-    if row.whole and abs(reading.number - round(reading.number)) > 1e-9:  # noqa: PLR2004 - whole but for representation
+    if row.whole and abs(reading.number - round(reading.number)) > 1e-9:
         raise ReadingError(row.title, reading.text, "a whole number", "Count again.")
     return reading
 
@@ -179,9 +181,29 @@ def work(sheet: Sheet, find: Find, taken: Taken, show: str = "") -> SheetResult:
     limit, verdict = _verdict(find, values, combined.expanded)
     units = {name: reading.unit for name, reading in taken.readings.items()} | ({find.row: show} if show else {})
     return SheetResult(
-        sheet.key, find.row, value, kind.si, combined.u, combined.expanded, combined.k, combined.freedom, safe,
-        combined.shares, combined.shared, combined.other_u, ideal, ideal_says, taken.gas.title, values, taken.readings,
-        tuple(_working(sheet, find, values, units)), tuple(dict.fromkeys(warnings)), verdict, limit, row.low, row.high,
+        sheet.key,
+        find.row,
+        value,
+        kind.si,
+        combined.u,
+        combined.expanded,
+        combined.k,
+        combined.freedom,
+        safe,
+        combined.shares,
+        combined.shared,
+        combined.other_u,
+        ideal,
+        ideal_says,
+        taken.gas.title,
+        values,
+        taken.readings,
+        tuple(_working(sheet, find, values, units)),
+        tuple(dict.fromkeys(warnings)),
+        verdict,
+        limit,
+        row.low,
+        row.high,
         _ends(find, taken, safe),
     )
 
@@ -244,8 +266,24 @@ def _combined(
 
 def _equation_reading(title: str, relative: float) -> Reading:
     infinite = float("inf")
-    return Reading(f"Equation of the gas, {title.lower()}", "", 0.0, "1", 0.0, "", relative, relative, 0.0, infinite,
-                   "stated by the equation’s authors", "", 0.0, "preset", None, ())
+    return Reading(
+        f"Equation of the gas, {title.lower()}",
+        "",
+        0.0,
+        "1",
+        0.0,
+        "",
+        relative,
+        relative,
+        0.0,
+        infinite,
+        "stated by the equation’s authors",
+        "",
+        0.0,
+        "preset",
+        None,
+        (),
+    )
 
 
 def _ideal(sheet: Sheet, find: Find, given: dict[str, float], gas: Gas) -> tuple[float | None, str]:
@@ -256,7 +294,7 @@ def _ideal(sheet: Sheet, find: Find, given: dict[str, float], gas: Gas) -> tuple
 
 
 def _verdict(find: Find, values: dict[str, float], expanded: float) -> tuple[float | None, str]:
-    """Hold the figure against its limit: PASS, FAIL or CANNOT DECIDE (JCGM 106:2012, guarded acceptance and rejection)."""
+    """Hold the figure against its limit: PASS, FAIL or CANNOT DECIDE (JCGM 106:2012, guarded acceptance)."""
     if not find.limit or find.limit not in values:
         return None, ""
     limit, value = values[find.limit], values[find.row]
@@ -285,7 +323,7 @@ def _line(sheet: Sheet, step: Step, values: dict[str, float], units: dict[str, s
 
 
 def worked_example(key: str, row: str) -> SheetResult:
-    """Work the sheet's example for any of its questions: the first answer stands in for its row when another is asked."""
+    """Work the sheet's example for any of its questions; the first answer stands in when another is asked."""
     sheet = finder.sheet(key)
     first = next(iter(sheet.finds))
     if row == first:

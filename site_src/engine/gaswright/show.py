@@ -5,15 +5,19 @@ Takes values in the unit shown; gives text. gaswright.answer comes next.
 
 import math
 
+from gaswright.errors import OutsideRangeError
+
 THIN = "\u202f"
 MINUS = "−"
 SUPERSCRIPTS = str.maketrans("0123456789-", "⁰¹²³⁴⁵⁶⁷⁸⁹⁻")
 GUARD = 1e-9
 PLAIN_LOW, PLAIN_HIGH = 1e-4, 1e9
+NOTHING = 1e-300
 
 
 def number(value: float, decimals: int, mark: str = ".") -> str:
     """Give ``value`` with ``decimals`` places, digits before the mark in threes from 10 000 on."""
+    _refuse_infinite(value)
     text = f"{abs(value):.{max(decimals, 0)}f}"
     whole, _, rest = text.partition(".")
     if len(whole) > 4:
@@ -24,7 +28,8 @@ def number(value: float, decimals: int, mark: str = ".") -> str:
 
 def significant(value: float, digits: int, mark: str = ".") -> str:
     """Give ``value`` with so many significant digits; in powers of ten where it is very small or large."""
-    if value == 0:
+    _refuse_infinite(value)
+    if abs(value) < NOTHING:
         return "0"
     power = _power(value, digits)
     if not PLAIN_LOW <= abs(value) < PLAIN_HIGH:
@@ -40,6 +45,12 @@ def tidy(value: float, digits: int = 6, mark: str = ".") -> str:
     if mark in head:
         head = head.rstrip("0").rstrip(mark)
     return head + times + tail
+
+
+def _refuse_infinite(value: float) -> None:
+    """Raise OutsideRangeError rather than show what is no number."""
+    if not math.isfinite(value):
+        raise OutsideRangeError("The figure", "no finite number", "a finite number", "Check the readings.")
 
 
 def _power(value: float, digits: int) -> int:
@@ -72,6 +83,7 @@ def safe_high(value: float, expanded: float, mark: str = ".") -> str:
 
 
 def _safe(end: float, expanded: float, mark: str, *, down: bool) -> str:
+    _refuse_infinite(end)
     step = step_for(expanded)
     if step is None:
         return tidy(end, 7, mark)
@@ -95,20 +107,26 @@ def scaled(value: float, step: float, mark: str = ".") -> str:
 
 
 def plus_minus(value: float, expanded: float, mark: str = ".") -> tuple[str, str]:
-    """Give the best estimate and its ± as text, both to the step; the ± rounded up."""
+    """Give the best estimate and its ± as text, both to the step and to the same power of ten; the ± rounded up."""
     step = step_for(expanded)
     if step is None:
         return tidy(value, 7, mark), "0"
-    return scaled(round(value / step) * step, step, mark), scaled(rounded_to(expanded, step, down=False), step, mark)
+    best, plus = round(value / step) * step, rounded_to(expanded, step, down=False)
+    if not best or PLAIN_LOW <= abs(best) < PLAIN_HIGH:
+        return number(best, places_of(step), mark), number(plus, places_of(step), mark)
+    power = math.floor(math.log10(abs(best)) + GUARD)
+    places = max(0, power - math.floor(math.log10(step) + GUARD))
+    tail = f" × 10{str(power).translate(SUPERSCRIPTS)}"
+    return number(best / 10.0**power, places, mark) + tail, number(plus / 10.0**power, places, mark) + tail
 
 
 def duration(seconds: float, *, down: bool) -> str:
     """Give a time as hours and minutes, rounded down or up to a minute (to a second below an hour)."""
-    guard = GUARD * max(1.0, abs(seconds))
-    if abs(seconds) < 3600:
-        whole = math.floor(seconds + guard) if down else math.ceil(seconds - guard)
+    _refuse_infinite(seconds)
+    whole = int(rounded_to(seconds, 1.0, down=down))
+    if abs(whole) < 3600:
         minutes, rest = divmod(whole, 60)
-        return f"{minutes} min {rest:02d} s" if minutes else f"{rest} s"
-    minutes = math.floor((seconds + guard) / 60) if down else math.ceil((seconds - guard) / 60)
-    hours, rest = divmod(minutes, 60)
+        parts = (f"{minutes} min" if minutes else "", f"{rest:02d} s" if minutes and rest else "")
+        return " ".join(part for part in parts if part) or f"{rest} s"
+    hours, rest = divmod(int(rounded_to(seconds / 60, 1.0, down=down)), 60)
     return f"{number(hours, 0)} h {rest:02d} min"

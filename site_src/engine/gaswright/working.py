@@ -16,8 +16,10 @@ def line(relation: Relation, unknown: str, values: dict[str, float], units: dict
     """Give ``V_2 = p_1·V_1/p_2 = 1.2 bar·48 L/2 bar = 28.8 L``; ``units`` names the unit of each variable by name."""
     form = relation.forms[unknown]
     shown = {variable.symbol: _shown(relation, variable.name, values, units, mark) for variable in relation.variables}
-    constants = {constant.symbol: quantity.with_unit(f"{constant.value:.7g}".replace(".", mark), constant.unit)
-                 for constant in relation.constants}
+    constants = {
+        constant.symbol: quantity.with_unit(f"{constant.value:.7g}".replace(".", mark), constant.unit)
+        for constant in relation.constants
+    }
     symbol = relation.variable(unknown).symbol
     put_in = TOKEN.sub(lambda found: {**shown, **constants}.get(found[0], found[0]), form.text)
     if form.way != "closed form":
