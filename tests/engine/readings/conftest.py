@@ -30,4 +30,4 @@ _stage()
 @pytest.fixture
 def examples(request: pytest.FixtureRequest) -> int:
     """How many random texts to try."""
-    return 20_000 if request.config.getoption("--all") else 400
+    return 10_000 if request.config.getoption("--all") else 300
