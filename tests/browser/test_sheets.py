@@ -20,6 +20,8 @@ SHEET = "#sheet-bank_endurance"
 KEY = "#bank_endurance"
 ADDRESS = "sheets.html#bank_endurance"
 START_S = 60.0
+# Over http the same files are opened by the tests of the figures, of the start and of the search.
+FROM_A_FOLDER = pytest.mark.parametrize("tab", ["chromium-file", "firefox-file"], indirect=True)
 READINGS = {
     "count": "4",
     "V_each": "50",
@@ -99,13 +101,12 @@ def wait_payloads(tab: Tab) -> None:
 
 def order_of_rows(tab: Tab) -> list[str]:
     """Names of the rows in the order of the page."""
-    names = tab.evaluate(
-        "sheet => [...document.querySelectorAll(`${sheet} .row`)].map(row => row.dataset.row)", SHEET
-    )
+    names = tab.evaluate("sheet => [...document.querySelectorAll(`${sheet} .row`)].map(row => row.dataset.row)", SHEET)
     assert isinstance(names, list)
     return [str(name) for name in names]
 
 
+@FROM_A_FOLDER
 def test_another_question_wipes_nothing_and_survives_a_reload(tab: Tab) -> None:
     """The row to find moves to the foot; the one found before stands as a reading that was worked out."""
     open_view(tab, ADDRESS)
@@ -134,6 +135,7 @@ def test_another_question_wipes_nothing_and_survives_a_reload(tab: Tab) -> None:
     )
 
 
+@FROM_A_FOLDER
 def test_first_own_reading_clears_the_example(tab: Tab) -> None:
     """No invented value is left among a crew's own; the units stay."""
     open_view(tab, ADDRESS)
@@ -147,6 +149,7 @@ def test_first_own_reading_clears_the_example(tab: Tab) -> None:
     assert "Pressure now" in tab.text(f"{SHEET} [data-state-says]")
 
 
+@FROM_A_FOLDER
 def test_ambiguous_number_is_asked_about_and_the_choice_fills_the_field(tab: Tab) -> None:
     """The message stands under the row and belongs to the field."""
     open_view(tab, ADDRESS)
@@ -160,6 +163,7 @@ def test_ambiguous_number_is_asked_about_and_the_choice_fills_the_field(tab: Tab
     assert tab.value(KEY + "-pg_start") == offered
 
 
+@FROM_A_FOLDER
 def test_wrong_reading_says_why_and_is_kept(tab: Tab) -> None:
     """Nothing typed is lost, and no figure is left standing beside it."""
     open_view(tab, ADDRESS)
@@ -172,6 +176,7 @@ def test_wrong_reading_says_why_and_is_kept(tab: Tab) -> None:
     assert tab.value(KEY + "-T_gas") == "300"
 
 
+@FROM_A_FOLDER
 def test_site_conditions_reach_the_sheets_and_wait_to_be_confirmed(tab: Tab) -> None:
     """A default is not a reading: signing waits for each value that nobody confirmed on this sheet."""
     set_site(tab, datetime.now(UTC))
@@ -193,13 +198,14 @@ def test_site_conditions_reach_the_sheets_and_wait_to_be_confirmed(tab: Tab) -> 
     assert tab.value("#locked_in-p_atm") == "1013"
 
 
+@FROM_A_FOLDER
 def test_old_site_conditions_hold_up_signing(tab: Tab) -> None:
     """After a shift of 12 h the sheet is stale until they are read again."""
     set_site(tab, datetime.now(UTC) - timedelta(hours=12, minutes=2))
     open_view(tab, ADDRESS)
     fill_bank(tab)
     wait_state(tab, "stale")
-    assert "older than 12 h" in tab.text(f"{SHEET} [data-wait]")
+    tab.wait_text(f"{SHEET} [data-wait]", "older than 12 h")
     assert tab.attribute(KEY + "-sign-now", "disabled") is not None
     open_view(tab, "sheets.html#site")
     tab.click("#site-now")
@@ -207,6 +213,7 @@ def test_old_site_conditions_hold_up_signing(tab: Tab) -> None:
     wait_state(tab, "answer")
 
 
+@FROM_A_FOLDER
 def test_signed_sheet_is_locked_until_a_new_revision_with_a_reason(tab: Tab) -> None:
     """The day page shows it, a reload keeps it, and a correction says why."""
     open_view(tab, ADDRESS)
@@ -232,6 +239,7 @@ def test_signed_sheet_is_locked_until_a_new_revision_with_a_reason(tab: Tab) -> 
     assert tab.text('[data-day-row="bank_endurance"] [data-mark]') == "readings in, revision 2"
 
 
+@FROM_A_FOLDER
 def test_whole_sheet_by_keyboard(tab: Tab) -> None:
     """Every field, list and button is reached by Tab, in the order of the rows."""
     open_view(tab, ADDRESS)
@@ -249,6 +257,7 @@ def test_whole_sheet_by_keyboard(tab: Tab) -> None:
     assert reached[-1] == "bank_endurance-signer"
 
 
+@pytest.mark.parametrize("tab", ["chromium-file"], indirect=True)
 @pytest.mark.parametrize("width", [1280, 400])
 def test_every_page_can_be_read_in_the_sun_and_used_with_gloves(tab: Tab, width: int) -> None:
     """18 px, 7:1, 45 px, and nothing wider than the screen."""
@@ -263,6 +272,7 @@ def test_every_page_can_be_read_in_the_sun_and_used_with_gloves(tab: Tab, width:
     assert not troubles
 
 
+@FROM_A_FOLDER
 def test_narrow_order_and_foot_bar(tab: Tab) -> None:
     """Readings, result, working; the bar at the foot shows the figure and leads to its box."""
     tab.resize(400, 800)
