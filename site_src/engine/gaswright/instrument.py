@@ -12,13 +12,14 @@ from gaswright import number, unit
 from gaswright.errors import ReadingError
 
 Record = Mapping[str, object]
+# These are compiled where first needed: most readings name no instrument, and start-up counts in the browser.
 FIGURE = r"([+\-−]?[0-9.,]+(?:[eE][+-]?[0-9]+)?)"
-CLASS = re.compile(rf"(?:class|cl\.?|kl\.?|klasse)\s*{FIGURE}\s*(?:of|at|on|,)?\s*(.*)", re.IGNORECASE)
-PERCENT = re.compile(rf"±?\s*{FIGURE}\s*%\s*(?:of\s+)?(?:the\s+)?(.*)")
-LIMIT = re.compile(rf"±\s*{FIGURE}\s*(\S.*)")
-SPAN = re.compile(rf"(?:{FIGURE}\s*([^\s0-9.,…\-–−]*)\s*(?:to|\.\.\.?|…|-|–|−)\s*)?{FIGURE}\s*(\S.*)")
+CLASS = rf"(?:class|cl\.?|kl\.?|klasse)\s*{FIGURE}\s*(?:of|at|on|,)?\s*(.*)"
+PERCENT = rf"±?\s*{FIGURE}\s*%\s*(?:of\s+)?(?:the\s+)?(.*)"
+LIMIT = rf"±\s*{FIGURE}\s*(\S.*)"
+SPAN = rf"(?:{FIGURE}\s*([^\s0-9.,…\-–−]*)\s*(?:to|\.\.\.?|…|-|–|−)\s*)?{FIGURE}\s*(\S.*)"
 OF_READING = ("", "reading", "rdg", "rd", "value", "measured value", "of reading")
-OF_SPAN = re.compile(r"(?:span|full scale|f\.?\s?s\.?|fsd)\b\.?\s*(?:of|,)?\s*(.*)", re.IGNORECASE)
+OF_SPAN = r"(?:span|full scale|f\.?\s?s\.?|fsd)\b\.?\s*(?:of|,)?\s*(.*)"
 LONGEST = 80
 OWN = "the kind that was read"
 
@@ -50,13 +51,13 @@ def parse(words: str, size: float, exponents: tuple[float, ...], where: str) -> 
         raise _unreadable(text, where)
     if text.lower() == "exact":
         return Accuracy(0.0, 0.0, "exact", (0.0, 0.0))
-    match = CLASS.fullmatch(text)
+    match = re.fullmatch(CLASS, text, re.IGNORECASE)
     if match:
         return _of_span(match[1], match[2], exponents, where, f"class {match[1]}")
-    match = PERCENT.fullmatch(text)
+    match = re.fullmatch(PERCENT, text)
     if match:
         return _percent(match[1], match[2].strip(), size, exponents, where)
-    match = LIMIT.fullmatch(text)
+    match = re.fullmatch(LIMIT, text)
     if match:
         found = unit.parse(match[2], where, exponents, OWN)
         return Accuracy(_limit(match[1], where) * found.factor, 0.0, f"± {match[1]} {found.text}", (0.0, 0.0))
@@ -66,7 +67,7 @@ def parse(words: str, size: float, exponents: tuple[float, ...], where: str) -> 
 def _percent(share: str, of: str, size: float, exponents: tuple[float, ...], where: str) -> Accuracy:
     if of.lower() in OF_READING:
         return Accuracy(_limit(share, where) / 100 * size, 0.0, f"± {share} % of the reading", (0.0, 0.0))
-    span = OF_SPAN.fullmatch(of)
+    span = re.fullmatch(OF_SPAN, of, re.IGNORECASE)
     return _of_span(share, span[1] if span else of, exponents, where, f"± {share} % of span")
 
 
@@ -96,7 +97,7 @@ def _of_span(share: str, text: str, exponents: tuple[float, ...], where: str, sa
 
 def span_of(text: str, exponents: tuple[float, ...], where: str) -> Span:
     """Give a span such as ``250 bar``, ``0 to 250 bar`` or ``−1 ... 15 bar`` in SI."""
-    match = SPAN.fullmatch(text.strip()) if len(text) <= LONGEST else None
+    match = re.fullmatch(SPAN, text.strip()) if len(text) <= LONGEST else None
     if not match:
         raise ReadingError(where, repr(text[:40]), "a span such as 250 bar", "Give the full scale with its unit.")
     found = unit.parse(match[4], where, exponents, OWN)
