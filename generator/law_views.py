@@ -3,7 +3,7 @@
 Takes a relation, its texts and its cases; gives its RelationView. Next: generator.make_views.
 """
 
-from gaswright.answer import answer_relation
+from gaswright.answer_law import answer_relation
 from gaswright.find import relation as find_law
 from gaswright.gas import find as find_gas
 from gaswright.gas import keys as gas_keys

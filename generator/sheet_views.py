@@ -3,7 +3,7 @@
 Takes a sheet of the spec; gives its SheetView. Next: generator.make_views.
 """
 
-from gaswright.answer import answer_sheet
+from gaswright.answer_sheet import answer_sheet
 from gaswright.gas import find as find_gas
 from gaswright.gas import keys as gas_keys
 

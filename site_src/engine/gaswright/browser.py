@@ -7,8 +7,10 @@ that hosts the engine calls ``answer``.
 import json
 from typing import Any
 
-from gaswright.answer import answer_relation, answer_sheet, refused
+from gaswright.answer_law import answer_relation
+from gaswright.answer_sheet import answer_sheet
 from gaswright.errors import GaswrightError, ReadingError
+from gaswright.respond import refused
 from gaswright.tables import KINDS
 from gaswright.version import DIGEST, VERSION
 

@@ -1,6 +1,6 @@
 """Read a time of day and give the time some seconds later.
 
-Takes ``07:34`` or an RFC 3339 time; gives words. gaswright.sheet reads the row, gaswright.answer shows the end.
+Takes ``07:34`` or an RFC 3339 time; gives words. gaswright.sheet reads the row, gaswright.verdict shows the end.
 """
 
 import re

@@ -1,7 +1,7 @@
 """Solve a law for one unknown from readings as typed.
 
 Takes a key, an unknown and readings; gives a Result with the SI value, its uncertainty, working and warnings.
-gaswright.answer draws it for a page, gaswright.__main__ prints it.
+gaswright.answer_law draws it for a page, gaswright.__main__ prints it.
 """
 
 from typing import NamedTuple

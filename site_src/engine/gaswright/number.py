@@ -15,7 +15,7 @@ TIMES_TEN = re.compile(r"\s*[×x*·]\s*10\s*\^?\s*([+-]?[0-9]+)$")
 SPACED = re.compile(r"([+-]?[0-9]{1,3})((?:[ '][0-9]{3})+)(?=[.,eE]|$)")
 THOUSANDS = re.compile(r"[+-]?[1-9][0-9]{0,2}(?:([.,])[0-9]{3})(?:\1[0-9]{3})*")
 LARGEST, LONGEST = 1e40, 60
-TODO = "Type digits with a decimal comma or point, such as 12.5."
+WHAT_TO_DO = "Type digits with a decimal comma or point, such as 12.5."
 
 
 class Number(NamedTuple):
@@ -34,7 +34,7 @@ def parse(text: str, where: str, decimal: str | None = None) -> Number:
     if not cleaned:
         raise ReadingError(where, "nothing", "a number", "Type the reading.")
     if len(cleaned) > LONGEST:
-        raise ReadingError(where, f"{cleaned[:20]!r} and {len(cleaned) - 20} more signs", "a number", TODO)
+        raise ReadingError(where, f"{cleaned[:20]!r} and {len(cleaned) - 20} more signs", "a number", WHAT_TO_DO)
     cleaned = TIMES_TEN.sub(r"e\1", cleaned.translate(SUPERSCRIPTS))
     cleaned = SPACED.sub(lambda found: found[1] + re.sub("[ ']", "", found[2]), cleaned, count=1)
     return _of_plain(_with_point(cleaned, where, decimal), text, where)
@@ -43,7 +43,7 @@ def parse(text: str, where: str, decimal: str | None = None) -> Number:
 def _of_plain(cleaned: str, text: str, where: str) -> Number:
     match = PLAIN.fullmatch(cleaned)
     if not match or not (match[2] or match[3]):
-        raise ReadingError(where, repr(text[:40]), "a number", TODO)
+        raise ReadingError(where, repr(text[:40]), "a number", WHAT_TO_DO)
     value, power = float(cleaned), int(match[4] or 0) - len(match[3] or "")
     has_digits = bool((match[2] + (match[3] or "")).strip("0"))
     if abs(value) > LARGEST or abs(power) > 300:

@@ -21,7 +21,7 @@ RUN = re.compile(r"[⁰¹²³⁴⁵⁶⁷⁸⁹⁻⁺]+")
 PARTS = re.compile(r"[()/·]|[^()/·]+")
 POWER = re.compile(r"(.*[^\d^+\- ])\s*(?:\^\s*)?([+-]?\d{1,2})", re.DOTALL)
 LONGEST, HIGHEST = 60, 12
-TODO = "Choose one from the list beside the field."
+WHAT_TO_DO = "Choose one from the list beside the field."
 
 folded: dict[str, set[str]] = {}
 
@@ -57,7 +57,7 @@ def knows(text: str) -> bool:
 def read(text: str, where: str, expected: str) -> Product:
     """Give the product ``text`` says. Raises ReadingError: unknown or with more than one meaning."""
     if len(text) > LONGEST:
-        raise ReadingError(where, f"{text[:20]!r} and {len(text) - 20} more signs", expected, TODO)
+        raise ReadingError(where, f"{text[:20]!r} and {len(text) - 20} more signs", expected, WHAT_TO_DO)
     return _made(_atoms(text, where, expected))
 
 
@@ -125,7 +125,7 @@ def _bracketless(whole: str, where: str) -> ReadingError:
 
 
 def _unknown(text: str, where: str, expected: str) -> ReadingError:
-    return ReadingError(where, repr(text[:40]), expected, TODO)
+    return ReadingError(where, repr(text[:40]), expected, WHAT_TO_DO)
 
 
 def _factor(part: str, sign: int, where: str, expected: str, whole: str) -> Atoms:

@@ -1,6 +1,6 @@
 """Put an SI value into a unit and back, and write it with its unit.
 
-Takes SI values and unit texts; gives numbers and text. gaswright.working and gaswright.answer use it.
+Takes SI values and unit texts; gives numbers and text. gaswright.working and gaswright.respond use it.
 """
 
 from gaswright import show, unit

@@ -1,6 +1,6 @@
 """Work a job sheet: from readings as typed to the row asked for, its uncertainty and its safe end.
 
-Takes a sheet's key and the input part of a record; gives a SheetResult. gaswright.answer draws it.
+Takes a sheet's key and the input part of a record; gives a SheetResult. gaswright.answer_sheet draws it.
 """
 
 from typing import Any, NamedTuple

@@ -1,6 +1,6 @@
 """Show numbers as a figure to sign: no finer than the uncertainty, rounded to the safe side.
 
-Takes values in the unit shown; gives text. gaswright.answer comes next.
+Takes values in the unit shown; gives text. gaswright.respond comes next.
 """
 
 import math

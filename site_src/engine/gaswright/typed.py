@@ -17,7 +17,7 @@ BRACKETED = re.compile(r"\s*\(([^()]*±[^()]*)\)(.*)", re.DOTALL)
 PAIR = re.compile(r"\s*(?:\bat\b|@)?\s*\(([^()]*[0-9][^()]*)\)\s*$")
 AT_PAIR = re.compile(r"\s+(?:at|@)\s+([0-9+\-−][^()]*)$")
 BETWEEN = re.compile(r"(?<=[^0-9\s])\s*[,;&/]\s*|\s*;\s*|,\s+|\s+(?:and|at)\s+")
-TODO = "Type digits with a decimal comma or point, such as 12.5."
+WHAT_TO_DO = "Type digits with a decimal comma or point, such as 12.5."
 
 
 class Typed(NamedTuple):
@@ -32,7 +32,8 @@ class Typed(NamedTuple):
 def take_apart(text: str, where: str) -> Typed:
     """Give the parts of ``text``. Raises ReadingError where it does not start with a number."""
     if len(text) > LONGEST:
-        raise ReadingError(where, f"{text[:20]!r} and {len(text) - 20} more signs", "a number with its unit", TODO)
+        found = f"{text[:20]!r} and {len(text) - 20} more signs"
+        raise ReadingError(where, found, "a number with its unit", WHAT_TO_DO)
     body, pair = _without_pair(text.replace("+/-", "±").replace("+-", "±"))
     bracketed = BRACKETED.fullmatch(body)
     if bracketed:
@@ -48,7 +49,7 @@ def _without_accuracy(body: str, where: str) -> tuple[str, str, str]:
     head, mark, tail = body.partition("±")
     match = NUMBER.fullmatch(head)
     if not match:
-        raise ReadingError(where, repr(body[:40]), "a number", TODO)
+        raise ReadingError(where, repr(body[:40]), "a number", WHAT_TO_DO)
     digits, unit = match[1].strip(), match[2].strip()
     if not mark:
         return digits, unit, ""

@@ -1,6 +1,6 @@
 """Random states of the gases and the independent library that judges them.
 
-CoolProp 8.0.0 carries the coefficients, so agreement with it proves transcription and evaluation;
+CoolProp 8.0.0 carries the coefficients, so agreement with it proves copying and evaluation;
 the published tables in test_published.py judge the coefficients themselves.
 """
 
