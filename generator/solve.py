@@ -14,7 +14,7 @@ import sympy
 from generator.arrange import arrange, flatten
 from generator.check import variables_of
 from generator.errors import SpecError
-from generator.isolate import isolate
+from generator.isolate import isolate, peel
 from generator.prove import is_monotonic, prove_closed
 from spec.model import Nature, Relation, Root
 from spec.symbols import GAS_FUNCTIONS
@@ -110,7 +110,8 @@ def _textbook(relation: Relation, unknown: sympy.Symbol) -> sympy.Expr | None:
 def _isolated(relation: Relation, left: sympy.Expr, right: sympy.Expr, unknown: sympy.Symbol) -> sympy.Expr | None:
     found = isolate(left, right, unknown)
     if found is None:
-        found = _linear(left - right, unknown)
+        inside, outside = peel(left, right, unknown)
+        found = _linear(left - right, unknown) or _linear(inside - outside, unknown)
     return None if found is None else arrange(found, order_of(relation))
 
 
