@@ -265,4 +265,339 @@ ATTRACTION = Kind(
     high=100.0,
 )
 
+ANGLE = Kind(
+    key="angle",
+    title="angle",
+    dimension=dim.NUMBER,
+    si="rad",
+    units=("°", "rad"),
+    low=1e-6,
+    high=1.570796326794896,
+    note="Between 0 and 90 degrees.",
+)
+FRACTION = Kind(
+    key="fraction",
+    title="share by amount",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("%", "ppm", "ppb", "1"),
+    low=1e-12,
+    high=1.0,
+    note="Moles of one gas in one mole of all; by volume it is the same for ideal gases.",
+)
+HUMIDITY = Kind(
+    key="humidity",
+    title="relative humidity",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("%", "1"),
+    low=1e-9,
+    high=10.0,
+)
+ENHANCEMENT = Kind(
+    key="enhancement",
+    title="enhancement factor",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=0.9,
+    high=100.0,
+    note="1 leaves out what the gas does to the vapour; the result says so where 1 was taken.",
+)
+SMALL_FACTOR = Kind(
+    key="small_factor",
+    title="small number of a formula",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=1e-9,
+    high=0.5,
+)
+COEFFICIENT = Kind(
+    key="coefficient",
+    title="coefficient of a device",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=1e-3,
+    high=10.0,
+    note="From the calibration or the data of the device.",
+)
+HEAT_RATIO = Kind(
+    key="heat_ratio",
+    title="ratio of heat capacities",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=1.001,
+    high=5.0,
+    note="1.40 for nitrogen and air, 1.67 for helium and argon, 1.31 for methane, near 15 °C and 1 bar.",
+)
+SHARE_OF_TIME = Kind(
+    key="mixing_share",
+    title="mixing factor",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=0.1,
+    high=1.0,
+    note="1 is perfect mixing.",
+)
+EXPANSION = Kind(
+    key="expansion",
+    title="expansion per kelvin",
+    dimension=dim.NUMBER / dim.TEMPERATURE,
+    si="1/K",
+    units=("1/K",),
+    low=1e-7,
+    high=1e-2,
+)
+ALTITUDE = Kind(
+    key="altitude",
+    title="height above sea level",
+    dimension=dim.LENGTH,
+    si="m",
+    units=("m", "km", "ft"),
+    low=-500.0,
+    high=9e4,
+)
+COLUMN_HEIGHT = Kind(
+    key="column_height",
+    title="height of a column",
+    dimension=dim.LENGTH,
+    si="m",
+    units=("mm", "cm", "m", "in", "ft"),
+    low=-1e4,
+    high=1e4,
+)
+SMALL_LENGTH = Kind(
+    key="small_length",
+    title="length of molecular size",
+    dimension=dim.LENGTH,
+    si="m",
+    units=("nm", "µm", "mm", "m"),
+    low=1e-11,
+    high=1e6,
+)
+MOLECULE_MASS = Kind(
+    key="molecule_mass",
+    title="mass of one molecule",
+    dimension=dim.MASS,
+    si="kg",
+    units=("kg", "g"),
+    low=1e-28,
+    high=1e-22,
+)
+ENERGY = Kind(
+    key="energy",
+    title="energy",
+    dimension=dim.ENERGY,
+    si="J",
+    units=("MJ", "kJ", "J", "kWh"),
+    low=1e-6,
+    high=1e15,
+)
+MOLECULE_ENERGY = Kind(
+    key="molecule_energy",
+    title="energy of one molecule",
+    dimension=dim.ENERGY,
+    si="J",
+    units=("J",),
+    low=1e-24,
+    high=1e-15,
+)
+SPECIFIC_ENERGY = Kind(
+    key="specific_energy",
+    title="energy of one kilogram",
+    dimension=dim.ENERGY / dim.MASS,
+    si="J/kg",
+    units=("MJ/kg", "kJ/kg", "J/kg"),
+    low=1e3,
+    high=1e9,
+)
+SPECIFIC_GAS_CONSTANT = Kind(
+    key="specific_gas_constant",
+    title="gas constant of one kilogram",
+    dimension=dim.ENERGY / (dim.MASS * dim.TEMPERATURE),
+    si="J/(kg·K)",
+    units=("J/(kg·K)",),
+    low=10.0,
+    high=1e4,
+)
+TEMPERATURE_DIFFERENCE = Kind(
+    key="temperature_difference",
+    title="temperature difference",
+    dimension=dim.TEMPERATURE,
+    si="K",
+    units=("K", "Δ°C", "Δ°F"),
+    low=0.0,
+    high=6000.0,
+    note="A difference: nothing is added to it.",
+)
+WATER_TEMPERATURE = Kind(
+    key="water_temperature",
+    title="temperature between the triple and the critical point of water",
+    dimension=dim.TEMPERATURE,
+    si="K",
+    units=("°C", "K", "°F", "°R"),
+    low=273.15,
+    high=647.09,
+    note="Kelvin: add 273.15 to degrees Celsius.",
+)
+ICE_TEMPERATURE = Kind(
+    key="ice_temperature",
+    title="temperature of ice",
+    dimension=dim.TEMPERATURE,
+    si="K",
+    units=("°C", "K", "°F", "°R"),
+    low=50.0,
+    high=273.16,
+    note="Kelvin: add 273.15 to degrees Celsius.",
+)
+DEW_TEMPERATURE = Kind(
+    key="dew_temperature",
+    title="temperature of saturation over water",
+    dimension=dim.TEMPERATURE,
+    si="K",
+    units=("°C", "K", "°F", "°R"),
+    low=173.15,
+    high=373.15,
+    note="Kelvin: add 273.15 to degrees Celsius.",
+)
+VAPOUR_PRESSURE = Kind(
+    key="vapour_pressure",
+    title="vapour pressure",
+    dimension=dim.PRESSURE,
+    si="Pa",
+    reference="absolute",
+    units=("hPa", "mbar", "kPa", "Pa", "torr", "mmHg", "inHg", "psi", "bar"),
+    low=1e-9,
+    high=2.3e7,
+    note="The share of the pressure that the vapour bears: always absolute.",
+)
+VESSEL_PRESSURE = Kind(
+    key="vessel_pressure",
+    title="absolute pressure of a vessel under test",
+    dimension=dim.PRESSURE,
+    si="Pa",
+    reference="absolute",
+    units=("bar", "kPa", "MPa", "psi", "mbar", "Pa", "atm"),
+    low=5e4,
+    high=1e9,
+    note="A gauge reading needs the station pressure added first.",
+)
+PRESSURE_SQUARED = Kind(
+    key="pressure_squared",
+    title="difference of squared pressures",
+    dimension=dim.PRESSURE**2,
+    si="Pa²",
+    units=("bar²", "kPa²", "Pa²", "MPa²"),
+    low=1e-6,
+    high=1e18,
+    note="From absolute pressures: the square upstream less the square downstream.",
+)
+MASS_CONCENTRATION = Kind(
+    key="mass_concentration",
+    title="mass in a volume of gas",
+    dimension=dim.DENSITY,
+    si="kg/m³",
+    units=("mg/m³", "µg/m³", "g/m³", "kg/m³", "lb/ft³"),
+    low=1e-15,
+    high=1e3,
+)
+MASS_RATIO = Kind(
+    key="mass_ratio",
+    title="share by mass",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("g/kg", "kg/kg", "1"),
+    low=1e-12,
+    high=1e6,
+)
+METER_CONSTANT = Kind(
+    key="meter_constant",
+    title="reference temperature over reference pressure",
+    dimension=dim.TEMPERATURE / dim.PRESSURE,
+    si="K/Pa",
+    units=("K/mmHg", "°R/inHg", "K/kPa", "K/Pa"),
+    low=1e-6,
+    high=1.0,
+)
+FREQUENCY = Kind(
+    key="frequency",
+    title="turns per time",
+    dimension=dim.NUMBER / dim.TIME,
+    si="1/s",
+    units=("1/s", "1/min"),
+    low=1e-6,
+    high=1e6,
+)
+LEAK_RATE = Kind(
+    key="leak_rate",
+    title="leak rate",
+    dimension=dim.PRESSURE * dim.FLOW,
+    si="Pa·m³/s",
+    units=("mbar·L/s", "Pa·m³/s", "torr·L/s", "atm·cm³/s"),
+    low=1e-15,
+    high=1e9,
+    note="Pressure times volume per time: it belongs to the temperature it was counted at.",
+)
+PUMP_SPEED = Kind(
+    key="pump_speed",
+    title="pumping speed or conductance",
+    dimension=dim.FLOW,
+    si="m³/s",
+    units=("L/s", "m³/h", "m³/s", "L/min", "ft³/min"),
+    low=1e-12,
+    high=1e6,
+    note="Volume at the pressure there, not at reference conditions.",
+)
+FRICTION = Kind(
+    key="friction_factor",
+    title="friction factor (Darcy)",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=1e-4,
+    high=1.0,
+    note="Darcy’s: four times Fanning’s.",
+)
+IMPINGEMENT = Kind(
+    key="impingement",
+    title="molecules per area and time",
+    dimension=dim.NUMBER / (dim.AREA * dim.TIME),
+    si="1/(m²·s)",
+    units=("1/(m²·s)", "1/(cm²·s)"),
+    low=1.0,
+    high=1e40,
+)
+SECOND_VIRIAL = Kind(
+    key="second_virial",
+    title="second virial coefficient",
+    dimension=dim.MOLAR_VOLUME,
+    si="m³/mol",
+    units=("cm³/mol", "L/mol", "m³/mol"),
+    low=-1e-2,
+    high=1e-3,
+)
+LAPSE_RATE = Kind(
+    key="lapse_rate",
+    title="temperature gradient",
+    dimension=dim.TEMPERATURE / dim.LENGTH,
+    si="K/m",
+    units=("K/km", "K/m"),
+    low=-2e-2,
+    high=2e-2,
+)
+ACCURACY_CLASS = Kind(
+    key="accuracy_class",
+    title="accuracy class",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=1e-3,
+    high=20.0,
+    note="The class printed on the dial: per cent of the span.",
+)
+
 ALL = tuple(value for value in vars().values() if isinstance(value, Kind))

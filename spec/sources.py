@@ -58,6 +58,124 @@ SUTHERLAND_1893 = Source(
 )
 CFR_1065 = Source(key="cfr1065", work="Code of Federal Regulations, title 40, part 1065, Engine-testing procedures")
 CFR_1066 = Source(key="cfr1066", work="Code of Federal Regulations, title 40, part 1066, Vehicle-testing procedures")
+CFR_60 = Source(
+    key="cfr60", work="Code of Federal Regulations, title 40, part 60, Standards of performance, appendix A methods"
+)
+EPA_METHOD_4 = Source(key="epa4", work="40 CFR 60 appendix A-3, Method 4, Moisture content in stack gases")
+EPA_METHOD_5 = Source(key="epa5", work="40 CFR 60 appendix A-3, Method 5, Particulate matter from stationary sources")
+EPA_METHOD_2 = Source(key="epa2", work="40 CFR 60 appendix A-1, Method 2, Stack gas velocity and volumetric flow rate")
+EPA_METHOD_19 = Source(key="epa19", work="40 CFR 60 appendix A-7, Method 19", note=FROM_MEMORY)
+DALTON_1801 = Source(
+    key="dalton",
+    work="Dalton, Experimental essays on the constitution of mixed gases, Mem. Manchester Lit. Phil. Soc. 5 (1802) 535",
+    note=FROM_MEMORY,
+)
+ISO_6145 = Source(
+    key="iso6145", work="ISO 6145-1:2019, Calibration gas mixtures, Dynamic methods, General", note=FROM_MEMORY
+)
+WMO_8 = Source(key="wmo8", work="WMO-No. 8, Guide to Instruments and Methods of Observation, 2018 edition, volume I")
+IAPWS_SR1 = Source(
+    key="iapws_sr1",
+    work="IAPWS SR1-86(1992), Saturation properties of ordinary water substance",
+    note="coefficients from memory, shown by the published values in the cases",
+)
+IAPWS_R14 = Source(
+    key="iapws_r14",
+    work="IAPWS R14-08(2011), Melting pressure and sublimation pressure of ordinary water substance",
+    note="coefficients from memory, shown by the published values in the cases",
+)
+CIPM_2007 = Source(
+    key="cipm2007",
+    work="Picard et al., Revised formula for the density of moist air (CIPM-2007), Metrologia 45 (2008) 149",
+    note=FROM_MEMORY,
+)
+GREENSPAN_1976 = Source(
+    key="greenspan",
+    work="Greenspan, Functional equations for the enhancement factors for CO2-free moist air, "
+    "J. Res. NBS 80A (1976) 41",
+    note=FROM_MEMORY,
+)
+NACA_1135 = Source(
+    key="naca1135", work="NACA Report 1135, Equations, tables and charts for compressible flow, 1953", note=FROM_MEMORY
+)
+ISO_9300 = Source(
+    key="iso9300", work="ISO 9300:2005, Gas flow by critical flow Venturi nozzles", note=FROM_MEMORY
+)
+COLEBROOK_1939 = Source(
+    key="colebrook",
+    work="Colebrook, Turbulent flow in pipes, J. Inst. Civ. Eng. 11 (1939) 133",
+    note=FROM_MEMORY,
+)
+LEAK_HANDBOOK = Source(
+    key="leak_handbook",
+    work="ASNT, Nondestructive Testing Handbook volume 2, Leak Testing, 4th edition",
+    note=FROM_MEMORY,
+)
+VACUUM_HANDBOOK = Source(
+    key="vacuum_handbook",
+    work="O’Hanlon, A User’s Guide to Vacuum Technology, 3rd edition, Wiley 2003",
+    note=FROM_MEMORY,
+)
+KNUDSEN_1909 = Source(
+    key="knudsen",
+    work="Knudsen, Die Gesetze der Molekularströmung und der inneren Reibungsströmung der Gase durch Röhren, "
+    "Ann. Phys. 28 (1909) 75",
+    note=FROM_MEMORY,
+)
+EN_1779 = Source(
+    key="en1779", work="EN 1779:1999, Leak testing, Criteria for method and technique selection", note=FROM_MEMORY
+)
+ANSI_N14_5 = Source(
+    key="ansi_n14_5", work="ANSI N14.5-2014, Leakage tests on packages for shipment", note=FROM_MEMORY
+)
+ISO_11929 = Source(
+    key="iso11929", work="ISO 11929-1:2019, Characteristic limits: decision threshold, detection limit",
+    note=FROM_MEMORY,
+)
+CROWL_LOUVAR = Source(
+    key="crowl_louvar",
+    work="Crowl and Louvar, Chemical Process Safety, 3rd edition, Prentice Hall 2011",
+    note=FROM_MEMORY,
+)
+POISSON_1823 = Source(
+    key="poisson", work="Poisson, Sur la vitesse du son, Ann. Chim. Phys. 23 (1823) 5", note=FROM_MEMORY
+)
+ASME_PCC_2 = Source(
+    key="asme_pcc2",
+    work="ASME PCC-2, Repair of pressure equipment and piping, article on pressure and tightness testing",
+    note=FROM_MEMORY,
+)
+BRODE_1959 = Source(
+    key="brode", work="Brode, Blast wave from a spherical charge, Phys. Fluids 2 (1959) 217", note=FROM_MEMORY
+)
+US_ATMOSPHERE_1976 = Source(
+    key="us_atmosphere",
+    work="US Standard Atmosphere 1976, NOAA-S/T 76-1562",
+    note="tables read in a handbook, equations from memory",
+)
+ICAO_ATMOSPHERE = Source(
+    key="icao_atmosphere", work="ICAO Doc 7488, Manual of the ICAO Standard Atmosphere, 3rd edition", note=FROM_MEMORY
+)
+OIML_R_111 = Source(key="oiml_r111", work="OIML R 111-1:2004, Weights of classes E1 to M3", note=FROM_MEMORY)
+GRS80 = Source(key="grs80", work="Moritz, Geodetic Reference System 1980, J. Geod. 74 (2000) 128", note=FROM_MEMORY)
+JENNINGS_1988 = Source(
+    key="jennings", work="Jennings, The mean free path in air, J. Aerosol Sci. 19 (1988) 159", note=FROM_MEMORY
+)
+ISO_15900 = Source(
+    key="iso15900",
+    work="ISO 15900:2020, Differential electrical mobility analysis for aerosol particles",
+    note=FROM_MEMORY,
+)
+ADR_P200 = Source(
+    key="adr", work="ADR, packing instruction P200, filling ratio; the local code decides", note=FROM_MEMORY
+)
+NIOSH_NMAM = Source(key="nmam", work="NIOSH Manual of Analytical Methods, 4th edition")
+OSHA_1000 = Source(key="osha1000", work="Code of Federal Regulations, title 29, section 1910.1000, Air contaminants")
+IEC_80079 = Source(
+    key="iec80079",
+    work="ISO/IEC 80079-20-1:2017, Material characteristics for gas and vapour classification",
+    note=FROM_MEMORY,
+)
 DEFINITION = Source(key="definition", work="Definition of the quantity")
 CONSERVATION = Source(key="conservation", work="Conservation of amount of substance")
 COMMON_PRACTICE = Source(key="common_practice", work="Common practice, no source")

@@ -5,8 +5,10 @@ from spec.relations import (
     b_simple,
     c_ideal,
     d_reference,
+    e_mixtures,
     f_kinetic,
     g_real,
+    h_humidity,
     m_vessels,
     r_balances,
 )
@@ -16,8 +18,10 @@ FAMILIES = (
     b_simple.FAMILY,
     c_ideal.FAMILY,
     d_reference.FAMILY,
+    e_mixtures.FAMILY,
     f_kinetic.FAMILY,
     g_real.FAMILY,
+    h_humidity.FAMILY,
     m_vessels.FAMILY,
     r_balances.FAMILY,
 )
