@@ -1,6 +1,6 @@
 """The commands of the wheel: solve, gas, sheet.
 
-Takes words; prints the answer, as JSON with --json. Errors are told in four parts and end with status 1.
+Takes words; prints the answer, as JSON with --json, also where it is an error in four parts, which ends with status 1.
 """
 
 import argparse
@@ -22,10 +22,25 @@ def main(arguments: Sequence[str] | None = None) -> int:
     try:
         facts = {"solve": _solve, "gas": _gas, "sheet": _sheet}[options.command](options)
     except GaswrightError as error:
-        print(str(error), file=sys.stderr)
+        if options.json:
+            print(json.dumps({"error": _parts(error)}, ensure_ascii=False, indent=2))
+        else:
+            print(str(error), file=sys.stderr)
         return 1
     print(json.dumps(facts, ensure_ascii=False, indent=2) if options.json else _plain(facts))
     return 0
+
+
+def _parts(error: GaswrightError) -> dict[str, Any]:
+    offers = list(error.offers) if isinstance(error, ReadingError) else []
+    return {
+        "kind": type(error).__name__,
+        "where": error.where,
+        "found": error.found,
+        "expected": error.expected,
+        "todo": error.todo,
+        "offers": offers,
+    }
 
 
 def _parser() -> argparse.ArgumentParser:
@@ -40,6 +55,8 @@ def _parser() -> argparse.ArgumentParser:
     solve_law.add_argument("unknown")
     solve_law.add_argument("readings", nargs="*", metavar="name=value")
     solve_law.add_argument("--station-pressure", help="needed for gauge readings, such as '1013 mbar'")
+    solve_law.add_argument("--gas", help="needed where the law uses a gas, such as nitrogen")
+    solve_law.add_argument("--decimal", choices=(".", ","), help="settles what 1,234 means")
     state = commands.add_parser("gas", help="state of a gas: gas nitrogen '15 °C' '200 bar absolute'")
     state.add_argument("name")
     state.add_argument("T")
@@ -53,8 +70,15 @@ def _parser() -> argparse.ArgumentParser:
 
 
 def _solve(options: argparse.Namespace) -> dict[str, Any]:
-    readings = dict(_pair(text) for text in options.readings)
-    result = solve(options.key, options.unknown, readings, station_pressure=options.station_pressure)
+    readings: dict[str, Any] = dict(_pair(text) for text in options.readings)
+    result = solve(
+        options.key,
+        options.unknown,
+        readings,
+        station_pressure=options.station_pressure,
+        gas=options.gas,
+        decimal=options.decimal,
+    )
     return {
         "value": result.value,
         "unit": result.unit,

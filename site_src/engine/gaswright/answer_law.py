@@ -6,11 +6,12 @@ gaswright.browser speaks JSON with the page; the worked examples of the pages ar
 
 from typing import Any
 
+from gaswright import conditions, quantity, show
 from gaswright import find as finder
-from gaswright import quantity, show
 from gaswright.errors import NoSolutionError, OutsideRangeError, ReadingError
+from gaswright.gas import Gas
 from gaswright.gas import find as find_gas
-from gaswright.law import Around, Result, finish, like_unit, read_variable
+from gaswright.law import Around, Result, finish, kinds_of, like_unit, read_variable
 from gaswright.model import Relation
 from gaswright.reading import Reading, read
 from gaswright.respond import (
@@ -26,11 +27,10 @@ from gaswright.respond import (
     place_error,
     problem_row,
     share_list,
-    show_unit,
-    text_of,
     with_state,
 )
 from gaswright.tables import KINDS
+from gaswright.typed import text_of
 
 STATION_ROW = "p_station"
 
@@ -38,42 +38,59 @@ STATION_ROW = "p_station"
 def answer_relation(request: dict[str, Any]) -> Response:
     """Answer a law's page: rows with their states, the figure, ±, shares, working, warnings."""
     relation = finder.relation(str(request["key"]))
-    unknown = str(request["find"])
-    raw: dict[str, Any] = request.get("rows") or {}
+    unknown = _unknown(relation, request.get("find"))
+    unit = quantity.shown_unit(request.get("show"), KINDS[relation.variable(unknown).kind])
     mark = request.get("decimal") or "."
-    taken, rows, warnings = _read_law(relation, unknown, raw, request.get("decimal"))
+    taken, rows, warnings = _read_law(relation, unknown, request)
+    station, gas = _station_row(request, rows), _gas_row(relation, request, rows)
     response = blank(rows, cautions=())
-    try:
-        station = _site_station(request)
-        if STATION_ROW in raw and station is not None:
-            rows[STATION_ROW] = ok_row(station, KINDS["station_pressure"])
-    except ReadingError as error:
-        rows[STATION_ROW] = problem_row(error)
-        return with_state(response, "incomplete")
-    try:
-        gas_text = request.get("gas") or text_of(raw.get("gas"))
-        gas = find_gas(gas_text) if relation.uses_gas and gas_text else None
-    except ReadingError as error:
-        rows["gas"] = problem_row(error)
-        return with_state(response, "incomplete")
-    if any(row["state"] in ("empty", "error", "question") for row in rows.values()) or (
-        relation.uses_gas and gas is None
-    ):
+    is_open = any(row["state"] in ("empty", "error", "question") for row in rows.values())
+    if is_open or (relation.uses_gas and gas is None):
         return with_state(response, "empty" if not taken else "incomplete")
     try:
-        result = finish(relation, unknown, taken, Around(station, gas, tuple(warnings), show_unit(request)))
+        result = finish(relation, unknown, taken, Around(station, gas, tuple(warnings), unit, mark))
     except ReadingError as error:
         return place_error(response, error, taken)
     except (NoSolutionError, OutsideRangeError) as error:
         return with_state({**response, "refusal": str(error)}, "refused")
-    return _law_figure(response, relation, result, show_unit(request), mark)
+    return _law_figure(response, relation, result, unit, mark)
+
+
+def _unknown(relation: Relation, asked: Any) -> str:
+    if asked in relation.forms:
+        return str(asked)
+    found = "no question" if asked is None else f"the question {str(asked)[:40]!r}"
+    raise ReadingError(relation.title, found, f"one of {', '.join(relation.forms)}", "Ask for one of these.")
+
+
+def _station_row(request: dict[str, Any], rows: dict[str, Response]) -> Reading | None:
+    """Give the station pressure and put the state of its row, where the page shows one."""
+    try:
+        station = _site_station(request)
+    except ReadingError as error:
+        rows[STATION_ROW] = problem_row(error)
+        return None
+    if STATION_ROW in (request.get("rows") or {}) and station is not None:
+        rows[STATION_ROW] = ok_row(station, KINDS["station_pressure"], request.get("decimal") or ".")
+    return station
+
+
+def _gas_row(relation: Relation, request: dict[str, Any], rows: dict[str, Response]) -> Gas | None:
+    text = request.get("gas") or text_of((request.get("rows") or {}).get("gas"))
+    try:
+        return find_gas(text) if relation.uses_gas and text else None
+    except ReadingError as error:
+        rows["gas"] = problem_row(error)
+        return None
 
 
 def _read_law(
-    relation: Relation, unknown: str, raw: dict[str, Any], decimal: str | None
+    relation: Relation, unknown: str, request: dict[str, Any]
 ) -> tuple[dict[str, Reading], dict[str, Response], list[str]]:
+    decimal = request.get("decimal")
+    raw = conditions.filled(request.get("rows") or {}, kinds_of(relation), unknown, decimal)
     taken: dict[str, Reading] = {}
-    rows: dict[str, Response] = {}
+    rows: dict[str, Response] = _strangers(relation, raw)
     warnings: list[str] = []
     for variable in relation.variables:
         if variable.name == unknown:
@@ -83,16 +100,31 @@ def _read_law(
         try:
             if not text_of(entry) and variable.default is not None:
                 taken[variable.name] = read_variable(variable, variable.default, decimal, None)
-                rows[variable.name] = {"state": "default", "says": f"taken as {variable.default:g}"}
-                warnings.append(f"{variable.symbol} was taken as {variable.default:g}, because none was given.")
+                shown = show.tidy(variable.default, 7, decimal or ".")
+                rows[variable.name] = {"state": "default", "says": f"taken as {shown}"}
+                warnings.append(f"{variable.symbol} was taken as {shown}, because none was given.")
             elif not text_of(entry):
                 rows[variable.name] = {"state": "empty", "says": ""}
             else:
-                taken[variable.name] = read_variable(variable, entry or "", decimal, None)
-                rows[variable.name] = ok_row(taken[variable.name], KINDS[variable.kind])
+                taken[variable.name] = read_variable(
+                    variable, "" if entry is None else entry, decimal, request.get("instruments")
+                )
+                rows[variable.name] = ok_row(taken[variable.name], KINDS[variable.kind], decimal or ".")
         except ReadingError as error:
             rows[variable.name] = problem_row(error)
     return taken, rows, warnings
+
+
+def _strangers(relation: Relation, raw: dict[str, Any]) -> dict[str, Response]:
+    """Give the rows that are none of the law's, each as an error."""
+    names = [variable.name for variable in relation.variables]
+    return {
+        name: problem_row(
+            ReadingError(relation.title, repr(name[:40]), f"one of {', '.join(names)}", "Correct the name.")
+        )
+        for name in raw
+        if name not in (*names, STATION_ROW, "gas")
+    }
 
 
 def _site_station(request: dict[str, Any]) -> Reading | None:
@@ -100,7 +132,7 @@ def _site_station(request: dict[str, Any]) -> Reading | None:
     raw = (request.get("rows") or {}).get(STATION_ROW) or (request.get("site") or {}).get("station_pressure")
     if not text_of(raw):
         return None
-    return read("Station pressure", raw or "", KINDS["station_pressure"], request.get("decimal"))
+    return read("Station pressure", "" if raw is None else raw, KINDS["station_pressure"], request.get("decimal"))
 
 
 def _law_figure(response: Response, relation: Relation, result: Result, unit: str, mark: str) -> Response:
@@ -117,21 +149,14 @@ def _law_figure(response: Response, relation: Relation, result: Result, unit: st
             "text": quantity.with_unit(figure, unit) + counted,
             "unit": "",
             "row": show.tidy(shown, ROW_DIGITS, mark),
-            "exact": exact(shown, unit, kind),
+            "exact": exact(shown, display),
         },
-        "best": f"{best} ({factor(result.k)})." if width else NO_U,
+        "best": f"{best} ({factor(result.k, mark)})." if width else NO_U,
         "value": result.value,
         "unit": result.unit,
         "expanded": result.expanded,
         "shares": share_list(result.shares),
-        "working": [
-            {
-                "text": text.replace(".", mark) if mark == "," else text,
-                "relation": relation.key,
-                "title": relation.title,
-            }
-            for text in result.working
-        ],
+        "working": [{"text": text, "relation": relation.key, "title": relation.title} for text in result.working],
         "warnings": list(result.warnings),
         "sensitivities": result.sensitivities,
     }

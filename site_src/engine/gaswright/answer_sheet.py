@@ -8,7 +8,9 @@ from typing import Any
 
 from gaswright import find as finder
 from gaswright import quantity, show
+from gaswright.conditions import CAME_FROM
 from gaswright.errors import NoSolutionError, OutsideRangeError, ReadingError
+from gaswright.instrument import overdue
 from gaswright.model import Find, Row, Sheet
 from gaswright.reading import Reading
 from gaswright.respond import (
@@ -24,12 +26,12 @@ from gaswright.respond import (
     place_error,
     problem_row,
     share_list,
-    show_unit,
-    text_of,
     with_state,
 )
-from gaswright.sheet import SheetResult, Taken, question, take, work
+from gaswright.sheet import SheetResult, work
 from gaswright.tables import KINDS
+from gaswright.take import Taken, question, take
+from gaswright.typed import text_of
 from gaswright.verdict import assumption, extra, stepped, verdict_words, versus
 
 
@@ -39,21 +41,31 @@ def answer_sheet(request: dict[str, Any]) -> Response:
     find = question(sheet, request.get("find"))
     raw = _with_site(sheet, request)
     mark = request.get("decimal") or "."
+    kind = KINDS[sheet.rows[find.row].kind]
+    unit = quantity.shown_unit(request.get("show"), kind) or find.unit
     taken = take(sheet, find, raw, request.get("decimal"), request.get("instruments"))
-    rows = _sheet_rows(sheet, find, taken)
+    rows = _sheet_rows(sheet, find, taken, mark)
     response = blank(rows, sheet.cautions)
-    _question_unlikely(sheet, taken, rows)
+    _question_unlikely(sheet, taken, rows, mark)
     if taken.problems or taken.empty:
-        nothing = not taken.readings and taken.gas is None
+        nothing = not (taken.readings or taken.gases or taken.problems)
         return with_state(response, "empty" if nothing else "incomplete")
-    unit = show_unit(request) or find.unit
     try:
-        result = work(sheet, find, taken, unit)
+        result = work(sheet, find, taken, unit, mark)
     except ReadingError as error:
         return place_error(response, error, taken.readings)
     except (NoSolutionError, OutsideRangeError) as error:
         return with_state({**response, "refusal": str(error)}, "refused")
-    return _sheet_figure(response, sheet, find, result, Display(KINDS[sheet.rows[find.row].kind], unit, mark))
+    result = result._replace(warnings=(*result.warnings, *_overdue(taken, request)))
+    return _sheet_figure(response, sheet, find, result, Display(kind, unit, mark))
+
+
+def _overdue(taken: Taken, request: dict[str, Any]) -> tuple[str, ...]:
+    """Say which instruments of the readings were past their due date when the site conditions were read."""
+    today = text_of((request.get("site") or {}).get("time"))[:10]
+    names = dict.fromkeys(reading.instrument for reading in taken.readings.values() if reading.instrument)
+    records = request.get("instruments") or {}
+    return tuple(text for name in names if today for text in overdue(records[name], today))
 
 
 def _with_site(sheet: Sheet, request: dict[str, Any]) -> dict[str, Any]:
@@ -67,7 +79,7 @@ def _with_site(sheet: Sheet, request: dict[str, Any]) -> dict[str, Any]:
     return raw
 
 
-def _sheet_rows(sheet: Sheet, find: Find, taken: Taken) -> dict[str, Response]:
+def _sheet_rows(sheet: Sheet, find: Find, taken: Taken, mark: str) -> dict[str, Response]:
     rows: dict[str, Response] = {}
     for name, row in sheet.rows.items():
         if not row.reading:
@@ -76,17 +88,19 @@ def _sheet_rows(sheet: Sheet, find: Find, taken: Taken) -> dict[str, Response]:
             rows[name] = {"state": "find", "says": ""}
         elif name in taken.problems:
             rows[name] = problem_row(taken.problems[name])
-        elif row.is_gas and taken.gas is not None:
-            rows[name] = {"state": "ok", "says": "", "si": taken.gas.formula, "typed": taken.gas.title}
+        elif name in taken.gases:
+            gas = taken.gases[name]
+            rows[name] = {"state": "ok", "says": "", "si": gas.formula, "typed": gas.title}
         elif name in taken.clocks:
             rows[name] = {"state": "ok", "says": "", "typed": taken.clocks[name]}
         elif name in taken.readings:
-            rows[name] = ok_row(taken.readings[name], KINDS[row.kind])
-            if taken.readings[name].came_from != "read":
+            rows[name] = ok_row(taken.readings[name], KINDS[row.kind], mark)
+            if taken.readings[name].came_from not in ("read", CAME_FROM):
                 rows[name] |= {"state": "default", "says": _default_words(taken.readings[name])}
         else:
             rows[name] = {"state": "empty", "says": ""}
-    return rows
+    strangers = {name: problem_row(problem) for name, problem in taken.problems.items() if name not in rows}
+    return rows | strangers
 
 
 def _default_words(reading: Reading) -> str:
@@ -94,24 +108,26 @@ def _default_words(reading: Reading) -> str:
     return f"{reading.text}, {where}, not yet confirmed"
 
 
-def _question_unlikely(sheet: Sheet, taken: Taken, rows: dict[str, Response]) -> None:
+def _question_unlikely(sheet: Sheet, taken: Taken, rows: dict[str, Response], mark: str) -> None:
     """Question what is possible and unlikely, without stopping."""
     for name, reading in taken.readings.items():
         above = sheet.rows[name].unusual_above
         if above is not None and reading.value > above and rows[name]["state"] == "ok":
-            limit = quantity.text_of(above, KINDS[sheet.rows[name].kind], reading.unit)
+            limit = quantity.text_of(above, KINDS[sheet.rows[name].kind], reading.unit, mark)
             rows[name]["says"] = f"{reading.text} is unusual (above {limit}): check the number and its unit."
 
 
 def _sheet_figure(response: Response, sheet: Sheet, find: Find, result: SheetResult, display: Display) -> Response:
     row = sheet.rows[find.row]
-    kind, unit, mark = display
+    mark = display.mark
     shown, width, best = figure_texts(result.value, result.expanded, display)
     text = _signed(find, row, result, display)
     counted = display.counted()
     way = "rounded down" if find.safe == "low" else "rounded up"
     best_line = (
-        f"Best estimate {best}{counted} ({factor(result.k)})." if width else f"Best estimate {best}{counted}. {NO_U}"
+        f"Best estimate {best}{counted} ({factor(result.k, mark)})."
+        if width
+        else f"Best estimate {best}{counted}. {NO_U}"
     )
     response |= {
         "figure": {
@@ -119,7 +135,7 @@ def _sheet_figure(response: Response, sheet: Sheet, find: Find, result: SheetRes
             "text": text + counted,
             "unit": "",
             "row": show.tidy(shown, ROW_DIGITS, mark),
-            "exact": exact(shown, unit, kind),
+            "exact": exact(shown, display),
         },
         "best": best_line + (f" Unrounded {show.tidy(shown, 10, mark)}." if row.whole else ""),
         "value": result.value,
@@ -140,10 +156,10 @@ def _sheet_figure(response: Response, sheet: Sheet, find: Find, result: SheetRes
 def _signed(find: Find, row: Row, result: SheetResult, display: Display) -> str:
     """Give the figure to sign: the safe end, rounded to the safe side."""
     kind, unit, mark = display
-    shown, width = quantity.in_unit(result.value, kind, unit), quantity.interval_in_unit(result.expanded, kind, unit)
+    safe, width = quantity.in_unit(result.safe, kind, unit), quantity.interval_in_unit(result.expanded, kind, unit)
     down = find.safe == "low"
     if row.whole:
-        return show.number(show.rounded_to(shown + (-width if down else width), 1.0, down=down), 0, mark)
+        return show.number(show.rounded_to(safe, 1.0, down=down), 0, mark)
     if unit in ("min", "h"):
         return show.duration(stepped(result.safe, result.expanded, unit, down=down), down=down)
-    return quantity.with_unit((show.safe_low if down else show.safe_high)(shown, width, mark), unit)
+    return quantity.with_unit(show.safe_end(safe, width, mark, down=down), unit)

@@ -7,54 +7,65 @@ that hosts the engine calls ``answer``.
 import json
 from typing import Any
 
+from gaswright import request as requests
 from gaswright.answer_law import answer_relation
 from gaswright.answer_sheet import answer_sheet
 from gaswright.errors import GaswrightError, ReadingError
-from gaswright.respond import refused
+from gaswright.reading import read
+from gaswright.records import Kind
+from gaswright.respond import Response, ok_row, problem_row, refused
 from gaswright.tables import KINDS
+from gaswright.typed import text_of
 from gaswright.version import DIGEST, VERSION
 
-LONGEST = 200_000
+RELOAD = "Load the page again."
 
 
 def answer(text: str) -> str:
     """Answer one request. Its ``id`` comes back; ``do`` says what is asked."""
+    request: dict[str, Any] = {}
     try:
-        request = _request(text)
-        response = _answer(request)
+        request = requests.parse(text)
+        response = _answer(requests.check(request))
     except GaswrightError as error:
-        request, response = _request_or_empty(text), refused(error)
-    return json.dumps({"id": request.get("id"), **response}, allow_nan=False, ensure_ascii=False)
+        response = refused(error)
+    said = json.dumps({"id": requests.id_of(request), **response}, allow_nan=False, ensure_ascii=False)
+    return said.encode(
+        "utf-8", "replace"
+    ).decode()  # half a surrogate pair that was typed comes back as a question mark
 
 
-def _request(text: str) -> dict[str, Any]:
-    if len(text) > LONGEST:
-        raise ReadingError("request", f"{len(text)} characters", f"at most {LONGEST}", "Send less at once.")
-    try:
-        request = json.loads(text)
-    except (ValueError, RecursionError):
-        raise ReadingError("request", "text that is not JSON", "a JSON object", "Load the page again.") from None
-    if not isinstance(request, dict):
-        raise ReadingError("request", "JSON that is not an object", "a JSON object", "Load the page again.")
-    return request
-
-
-def _request_or_empty(text: str) -> dict[str, Any]:
-    try:
-        return _request(text)
-    except ReadingError:
-        return {}
-
-
-def _answer(request: dict[str, Any]) -> dict[str, Any]:
+def _answer(request: dict[str, Any]) -> Response:
     do = request.get("do")
     if do in ("relation", "sheet"):
-        if not isinstance(request.get("key"), str):
-            raise ReadingError("request", "no key", "the key of a law or sheet", "Load the page again.")
+        if request.get("key") is None:
+            raise ReadingError("request", "no key", "the key of a law or sheet", RELOAD)
         return answer_relation(request) if do == "relation" else answer_sheet(request)
+    if do == "reading":
+        return _answer_reading(request)
     if do == "about":
         return {"version": VERSION, "digest": DIGEST}
     if do == "units":
-        kind = KINDS.get(str(request.get("kind")))
-        return {"units": list(kind.units) if kind else []}
-    raise ReadingError("request", repr(do)[:60], "relation, sheet, units or about", "Load the page again.")
+        return {"units": list(_kind(request).units)}
+    raise ReadingError("request", repr(do)[:60], "relation, sheet, reading, units or about", RELOAD)
+
+
+def _answer_reading(request: dict[str, Any]) -> Response:
+    """Answer a field that stands by itself, such as one of the site conditions."""
+    kind, raw = _kind(request), request.get("reading")
+    if raw is None or not text_of(raw):
+        return {"state": "empty", "says": "", "offers": []}
+    try:
+        reading = read(
+            request.get("where") or kind.title, raw, kind, request.get("decimal"), request.get("instruments")
+        )
+    except ReadingError as error:
+        return problem_row(error)
+    return {**ok_row(reading, kind, request.get("decimal") or "."), "offers": []}
+
+
+def _kind(request: dict[str, Any]) -> Kind:
+    key = request.get("kind") or ""
+    if key not in KINDS:
+        raise ReadingError("request, kind", repr(key[:40]), "a kind of quantity, such as volume", RELOAD)
+    return KINDS[key]

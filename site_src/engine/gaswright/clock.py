@@ -10,6 +10,7 @@ from gaswright.errors import ReadingError
 
 TIME = re.compile(r"([01]?\d|2[0-3])[:.h]([0-5]\d)")
 MINUTES_A_DAY = 1440
+LAST_YEAR = 9998
 LONGEST_S = 366 * 86400.0
 
 
@@ -25,7 +26,7 @@ def later(start: str, seconds: float) -> str:
     if not 0 <= seconds <= LONGEST_S:
         return ""
     moment = _moment(start)
-    if moment:
+    if moment and moment.year < LAST_YEAR:
         return (moment + timedelta(seconds=seconds)).strftime("%H:%M on %Y-%m-%d")
     found = TIME.fullmatch(start)
     if not found:

@@ -5,7 +5,8 @@ gaswright.law and gaswright.network both go through here.
 """
 
 import math
-from typing import TYPE_CHECKING
+from collections.abc import Callable
+from typing import TYPE_CHECKING, Any
 
 from gaswright.errors import NoSolutionError, OutsideRangeError
 from gaswright.model import Relation
@@ -19,19 +20,47 @@ SIGN_WORDS = {"positive": "a value above zero", "nonnegative": "zero or a value 
 def evaluate(relation: Relation, unknown: str, values: dict[str, float], gas: "Gas | None", where: str) -> float:
     """Give the SI value of ``unknown``. Raises NoSolutionError or OutsideRangeError, never another exception."""
     form = relation.forms[unknown]
-    arguments = [gas if name == "gas" else values[name] for name in form.arguments]
-    try:
-        value = form.function(*arguments)
-    except (ZeroDivisionError, OverflowError):
-        value = math.nan
-    except ValueError as error:
-        if isinstance(error, (NoSolutionError, OutsideRangeError)):
-            raise
-        value = math.nan
+    value = _called(form.function, [gas if name == "gas" else values[name] for name in form.arguments])
     sign = relation.variable(unknown).sign
     if isinstance(value, complex) or not math.isfinite(value) or not _has_sign(sign, value):
         raise _no_answer(relation, where, sign, value)
-    return value
+    return float(value)
+
+
+def _called(function: Callable[..., Any], arguments: list[Any]) -> Any:
+    """Give what an emitted function gives, NaN where arithmetic has no answer; named errors pass."""
+    try:
+        return function(*arguments)
+    except (NoSolutionError, OutsideRangeError):
+        raise
+    except (ArithmeticError, ValueError):
+        return math.nan
+
+
+def residual(relation: Relation, arguments: list[Any], where: str) -> float:
+    """Give left - right of the relation in SI. Raises NoSolutionError where that is no finite number."""
+    value = _called(relation.residual, arguments)
+    if isinstance(value, complex) or not math.isfinite(value):
+        raise _no_answer(relation, where, "any", math.nan)
+    return float(value)
+
+
+def slopes(relation: Relation, arguments: list[Any], where: str) -> tuple[float, ...]:
+    """Give how left - right moves with each variable, in their order. Raises NoSolutionError where one has no slope."""
+    found = _called(relation.slopes, arguments)
+    if not isinstance(found, tuple) or any(isinstance(slope, complex) or not math.isfinite(slope) for slope in found):
+        raise no_slope(where)
+    return found
+
+
+def no_slope(where: str) -> NoSolutionError:
+    """Give the error for an answer whose uncertainty has no finite size."""
+    return NoSolutionError(
+        where,
+        "an answer that the least error of a reading moves without bound",
+        "readings on which it depends smoothly",
+        "Check the readings: they stand on the edge of what the law covers.",
+    )
 
 
 def _has_sign(sign: str, value: float) -> bool:

@@ -4,16 +4,20 @@ Takes a key, an unknown and readings; gives a Result with the SI value, its unce
 gaswright.answer_law draws it for a page, gaswright.__main__ prints it.
 """
 
+from collections.abc import Mapping
 from typing import NamedTuple
 
-from gaswright import find, quantity, working
+from gaswright import conditions, find, quantity, working
+from gaswright.counting import questioned, to_reference, turn
 from gaswright.errors import ReadingError
-from gaswright.evaluate import check_validity, evaluate
+from gaswright.evaluate import check_validity, evaluate, no_slope
+from gaswright.evaluate import slopes as slopes_of
 from gaswright.gas import Gas
 from gaswright.gas import find as find_gas
 from gaswright.model import Relation, Variable
-from gaswright.reading import Instruments, Raw, Reading, questioned, read, to_reference, turn
+from gaswright.reading import Instruments, Raw, Reading, read
 from gaswright.tables import KINDS
+from gaswright.typed import text_of
 from gaswright.uncertainty import Combined, Share, combine
 
 NO_STATION = "station pressure"
@@ -41,7 +45,7 @@ class Result(NamedTuple):
 def solve(  # noqa: PLR0913 - what a caller may say, all by name but three
     key: str,
     unknown: str,
-    readings: dict[str, Raw],
+    readings: Mapping[str, Raw],
     *,
     station_pressure: Raw | None = None,
     gas: str | None = None,
@@ -60,13 +64,14 @@ def solve(  # noqa: PLR0913 - what a caller may say, all by name but three
     station = (
         None if station_pressure is None else read(NO_STATION, station_pressure, KINDS["station_pressure"], decimal)
     )
-    gas_name = gas or readings.get("gas")
-    model = find_gas(str(gas_name)) if relation.uses_gas and gas_name else None
+    gas_name = gas or text_of(readings.get("gas"))
+    model = find_gas(gas_name) if relation.uses_gas and gas_name else None
     taken, warnings = _read_all(relation, unknown, readings, decimal, instruments)
-    return finish(relation, unknown, taken, Around(station, model, tuple(warnings), show))
+    shown = quantity.shown_unit({"unit": show}, KINDS[relation.variable(unknown).kind])
+    return finish(relation, unknown, taken, Around(station, model, tuple(warnings), shown, decimal or "."))
 
 
-def _check_names(relation: Relation, unknown: str, readings: dict[str, Raw]) -> None:
+def _check_names(relation: Relation, unknown: str, readings: Mapping[str, Raw]) -> None:
     names = [variable.name for variable in relation.variables]
     allowed = [*names, "gas"] if relation.uses_gas else names
     for name in [unknown, *readings]:
@@ -75,10 +80,11 @@ def _check_names(relation: Relation, unknown: str, readings: dict[str, Raw]) -> 
 
 
 def _read_all(
-    relation: Relation, unknown: str, readings: dict[str, Raw], decimal: str | None, instruments: Instruments | None
+    relation: Relation, unknown: str, given: Mapping[str, Raw], decimal: str | None, instruments: Instruments | None
 ) -> tuple[dict[str, Reading], list[str]]:
     taken: dict[str, Reading] = {}
     warnings: list[str] = []
+    readings = conditions.filled(given, kinds_of(relation), unknown, decimal)
     for variable in relation.variables:
         raw = readings.get(variable.name)
         if variable.name == unknown:
@@ -90,30 +96,40 @@ def _read_all(
     return taken, warnings
 
 
+def kinds_of(relation: Relation) -> dict[str, str]:
+    """Give the kind of each variable by name."""
+    return {variable.name: variable.kind for variable in relation.variables}
+
+
 def read_variable(variable: Variable, raw: Raw, decimal: str | None, instruments: Instruments | None) -> Reading:
     """Read one variable of a law and refuse a value of the wrong sign."""
     reading = read(f"{variable.symbol}, {variable.text}", raw, KINDS[variable.kind], decimal, instruments)
-    is_counted_otherwise = reading.reference != KINDS[variable.kind].reference
-    if not is_counted_otherwise and (
-        (variable.sign == "positive" and reading.value <= 0) or (variable.sign == "nonnegative" and reading.value < 0)
-    ):
-        expected = "more than zero" if variable.sign == "positive" else "zero or more"
-        raise ReadingError(reading.name, reading.text, expected, "Check the number and its sign.")
+    if reading.reference == KINDS[variable.kind].reference:
+        _refuse_sign(variable, reading, reading.value)
     return reading
 
 
+def _refuse_sign(variable: Variable, reading: Reading, value: float) -> None:
+    if (variable.sign == "positive" and value <= 0) or (variable.sign == "nonnegative" and value < 0):
+        expected = "more than zero" if variable.sign == "positive" else "zero or more"
+        counted = KINDS[variable.kind].reference
+        counted = f" {counted}" if counted != reading.reference else ""
+        raise ReadingError(reading.name, reading.text, f"{expected}{counted}", "Check the number and its sign.")
+
+
 class Around(NamedTuple):
-    """What stands around the readings of a law: station pressure, gas, warnings so far, the unit to show."""
+    """What stands around the readings of a law: station pressure, gas, warnings so far, unit and decimal mark shown."""
 
     station: Reading | None
     gas: Gas | None
     warnings: tuple[str, ...]
     show: str
+    mark: str
 
 
 def finish(relation: Relation, unknown: str, taken: dict[str, Reading], around: Around) -> Result:
     """Give the Result of readings already taken."""
-    station, gas, said_before, show = around
+    station, gas, said_before, show, mark = around
     if relation.uses_gas and gas is None:
         raise ReadingError("gas", "nothing", "the gas by name or formula", "Choose the gas.")
     station = next(
@@ -127,7 +143,7 @@ def finish(relation: Relation, unknown: str, taken: dict[str, Reading], around: 
     values, couplings = _counted(relation, taken, station)
     where = f"{relation.variable(unknown).symbol}, {relation.variable(unknown).text}"
     values[unknown] = evaluate(relation, unknown, values, gas, where)
-    said = check_validity(relation, values, relation.title)
+    said = (*conditions.check(taken, values, kinds_of(relation)), *check_validity(relation, values, relation.title))
     slopes = sensitivities(relation, unknown, values, gas)
     combined = _combined(relation, taken, station, slopes, couplings)
     warnings = [
@@ -137,21 +153,22 @@ def finish(relation: Relation, unknown: str, taken: dict[str, Reading], around: 
     ]
     units = {name: reading.unit for name, reading in taken.items()}
     units[unknown] = show or like_unit(relation, unknown, taken)
+    conversions = _conversions(relation, taken, station, values, mark)
     return Result(
-        relation.key,
-        unknown,
-        values[unknown],
-        KINDS[relation.variable(unknown).kind].si,
-        combined.u,
-        combined.expanded,
-        combined.k,
-        combined.freedom,
-        combined.shares,
-        (*_conversions(relation, taken, station, values), working.line(relation, unknown, values, units)),
-        tuple(dict.fromkeys(warnings)),
-        values,
-        taken,
-        slopes,
+        key=relation.key,
+        unknown=unknown,
+        value=values[unknown],
+        unit=KINDS[relation.variable(unknown).kind].si,
+        u=combined.u,
+        expanded=combined.expanded,
+        k=combined.k,
+        freedom=combined.freedom,
+        shares=combined.shares,
+        working=(*conversions, working.line(relation, unknown, values, units, mark)),
+        warnings=tuple(dict.fromkeys(warnings)),
+        values=values,
+        readings=taken,
+        sensitivities=slopes,
     )
 
 
@@ -174,14 +191,18 @@ def _counted(
         if variable.name in taken:
             wanted = KINDS[variable.kind].reference
             values[variable.name], couplings[variable.name] = to_reference(taken[variable.name], wanted, station)
+            _refuse_sign(variable, taken[variable.name], values[variable.name])
     return values, couplings
 
 
 def sensitivities(relation: Relation, unknown: str, values: dict[str, float], gas: Gas | None) -> dict[str, float]:
     """Give how the unknown moves with each other variable: -F_x/F_y, exact also where it was found numerically."""
-    slopes = relation.slopes(*(gas if name == "gas" else values[name] for name in relation.arguments))
+    where = f"{relation.variable(unknown).symbol}, by {relation.title}"
+    slopes = slopes_of(relation, [gas if name == "gas" else values[name] for name in relation.arguments], where)
     by_name = {variable.name: slope for variable, slope in zip(relation.variables, slopes, strict=True)}
     own = by_name.pop(unknown)
+    if own == 0 and any(by_name.values()):
+        raise no_slope(where)
     if own == 0:
         return dict.fromkeys(by_name, 0.0)
     return {name: -slope / own for name, slope in by_name.items()}
@@ -206,7 +227,7 @@ def _combined(
 
 
 def _conversions(
-    relation: Relation, taken: dict[str, Reading], station: Reading | None, values: dict[str, float]
+    relation: Relation, taken: dict[str, Reading], station: Reading | None, values: dict[str, float], mark: str
 ) -> tuple[str, ...]:
     """Write how a reading counted one way became the value counted another."""
     lines = []
@@ -214,7 +235,7 @@ def _conversions(
         reading = taken.get(variable.name)
         wanted = KINDS[variable.kind].reference
         if reading and station and reading.reference != wanted and wanted in ("absolute", "gauge", "vacuum"):
-            value = quantity.text_of(values[variable.name], KINDS[variable.kind], reading.unit)
+            value = quantity.text_of(values[variable.name], KINDS[variable.kind], reading.unit, mark)
             lines.append(
                 f"{variable.symbol} = {reading.text}, with the station pressure {station.text}: {value} {wanted}"
             )

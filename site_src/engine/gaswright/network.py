@@ -9,7 +9,8 @@ from collections.abc import Callable
 from typing import TYPE_CHECKING, NamedTuple
 
 from gaswright.errors import NoSolutionError, OutsideRangeError
-from gaswright.evaluate import evaluate
+from gaswright.evaluate import evaluate, residual
+from gaswright.evaluate import slopes as slopes_of
 from gaswright.find import relation as find_relation
 from gaswright.linear import solve_linear
 from gaswright.model import Block, Find, Relation, Sheet, Step
@@ -51,7 +52,7 @@ def _take(sheet: Sheet, step: Step, values: dict[str, float], gas: "Gas") -> Non
 def _residual(sheet: Sheet, block: Block, values: dict[str, float], gas: "Gas") -> float:
     use = sheet.uses[block.use]
     relation = find_relation(use.relation)
-    return relation.residual(*_arguments(relation, use.rows, values, gas))
+    return residual(relation, _arguments(relation, use.rows, values, gas), sheet.rows[block.torn].title)
 
 
 def _arguments(relation: Relation, rows: dict[str, str], values: dict[str, float], gas: "Gas") -> "list[float | Gas]":
@@ -61,13 +62,13 @@ def _arguments(relation: Relation, rows: dict[str, str], values: dict[str, float
 def _untie(sheet: Sheet, block: Block, values: dict[str, float], gas: "Gas") -> None:
     row = sheet.rows[block.torn]
 
-    def residual(guess: float) -> float:
+    def off(guess: float) -> float:
         trial = {**values, block.torn: guess}
         for step in block.steps:
             _take(sheet, step, trial, gas)
         return _residual(sheet, block, trial, gas)
 
-    found = _roots(residual, row.low, row.high)
+    found = _roots(off, row.low, row.high)
     if len(found) != 1:
         what = "no value" if not found else f"{len(found)} values"
         raise NoSolutionError(
@@ -146,7 +147,8 @@ def slopes(sheet: Sheet, find: Find, values: dict[str, float], gas: "Gas") -> Sl
 def _row_slopes(sheet: Sheet, place: int, values: dict[str, float], gas: "Gas") -> dict[str, float]:
     use = sheet.uses[place]
     relation = find_relation(use.relation)
-    found = relation.slopes(*_arguments(relation, use.rows, values, gas))
+    where = f"{sheet.rows[use.rows[relation.variables[0].name]].title}, by {relation.title}"
+    found = slopes_of(relation, _arguments(relation, use.rows, values, gas), where)
     line: dict[str, float] = {}
     for variable, slope in zip(relation.variables, found, strict=True):
         row = use.rows[variable.name]

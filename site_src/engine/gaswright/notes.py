@@ -6,8 +6,9 @@ them after the readings are in.
 
 from collections.abc import Callable
 
+from gaswright.counting import questioned
 from gaswright.errors import NoSolutionError
-from gaswright.reading import Reading, questioned
+from gaswright.reading import Reading
 
 Values = dict[str, float]
 Readings = dict[str, Reading]

@@ -3,7 +3,10 @@
 Takes SI values and unit texts; gives numbers and text. gaswright.working and gaswright.respond use it.
 """
 
+from typing import Any
+
 from gaswright import show, unit
+from gaswright.errors import ReadingError
 from gaswright.records import Kind
 
 ZERO_CELSIUS = 273.15
@@ -14,6 +17,21 @@ def in_unit(value: float, kind: Kind, text: str) -> float:
     found = unit.parse(text, kind.title, kind.exponents, kind.title)
     absolute = value + ZERO_CELSIUS if kind.si == "Cel" else value
     return absolute / found.factor - found.zero
+
+
+def shown_unit(asked: Any, kind: Kind) -> str:
+    """Give the unit a figure is asked in (``{"unit": "L"}``) in full spelling, or nothing.
+
+    Raises ReadingError where it is no unit of the kind, or carries what has a place of its own.
+    """
+    text = str((asked or {}).get("unit") or "")
+    if not text:
+        return ""
+    found = unit.parse(text, "Unit shown", kind.exponents, kind.title, kind.units)
+    if found.pair or found.reference not in (None, kind.reference):
+        todo = "How it is counted, or at which reference conditions, stands in the rows."
+        raise ReadingError("Unit shown", repr(text[:40]), f"{found.text} alone", todo)
+    return found.text
 
 
 def interval_in_unit(width: float, kind: Kind, text: str) -> float:

@@ -12,7 +12,7 @@ from gaswright import instrument as instruments_of
 from gaswright import number, show, unit
 from gaswright.errors import ReadingError
 from gaswright.records import Kind
-from gaswright.typed import Typed, take_apart
+from gaswright.typed import Typed, take_apart, text_of
 
 Raw = str | float | int | Mapping[str, object]
 Instruments = Mapping[str, Mapping[str, object]]
@@ -56,11 +56,11 @@ def read(
     Raises ReadingError in four parts for whatever cannot be taken as it stands.
     """
     if isinstance(raw, (int, float)) and not isinstance(raw, bool):
-        return _of_number(where, float(raw), kind)
+        return _of_number(where, raw, kind)
     if not isinstance(raw, (str, Mapping)):
         raise ReadingError(where, repr(raw)[:40], "a reading as text, such as 200 bar gauge", "Type the reading.")
     record: Mapping[str, object] = {"text": raw} if isinstance(raw, str) else raw
-    text = "" if record.get("text") is None else str(record["text"]).strip()
+    text = text_of(record)
     if not text:
         raise ReadingError(where, "nothing", f"a reading of {kind.title}", "Type the reading, or ask for this row.")
     parts = take_apart(text, where)
@@ -70,7 +70,8 @@ def read(
     value = _to_si(typed.value, found, kind)
     said = f"{parts.digits} {found.text}".removesuffix(" 1")
     _refuse_impossible(where, value, kind, reference, said, found)
-    good = _accuracy(where, record, parts, typed, found, kind, instruments or {})
+    said_of = Said(record, parts.accuracy, instruments or {}, decimal or ".")
+    good = _accuracy(where, said_of, typed, found, kind)
     conditions, pair = _conditions(parts, found, where, decimal)
     return Reading(
         name=where, text=said + (f" {reference}" if reference in COUNTED else "") + (f" ({pair})" if pair else ""),
@@ -89,9 +90,10 @@ def _number(parts: Typed, where: str, decimal: str | None) -> number.Number:
         raise
 
 
-def _of_number(where: str, value: float, kind: Kind) -> Reading:
-    if not math.isfinite(value):
-        raise ReadingError(where, repr(value), "a finite value", "Give the SI value.")
+def _of_number(where: str, raw: float, kind: Kind) -> Reading:
+    if not abs(raw) <= number.LARGEST:  # an integer may be too large for a float
+        raise ReadingError(where, f"{raw!r:.40}", "a finite value", "Give the SI value.")
+    value = float(raw)
     own = unit.UnitReading(kind.si, 1.0, ZERO_CELSIUS if kind.si == "Cel" else 0.0, None, None, "")
     _refuse_impossible(where, value, kind, kind.reference, f"{value:g} {kind.si}", own)
     return Reading(where, f"{value:g} {kind.si}", value, kind.si, value, kind.reference, 0.0, 0.0, 0.0, math.inf,
@@ -218,28 +220,37 @@ def _in(found: unit.UnitReading, value: float, kind: Kind) -> str:
     return f"{absolute / found.factor - found.zero:.6g} {found.text}".removesuffix(" 1")
 
 
-def _accuracy(  # noqa: PLR0913, PLR0917 - all that says how good a reading is
-    where: str, record: Mapping[str, object], parts: Typed, typed: number.Number, found: unit.UnitReading,
-    kind: Kind, instruments: Instruments,
+class Said(NamedTuple):
+    """What says how good a reading is: its record, the accuracy typed behind it, the instruments, the decimal mark."""
+
+    record: Mapping[str, object]
+    typed: str
+    instruments: Instruments
+    mark: str
+
+
+def _accuracy(
+    where: str, said: Said, typed: number.Number, found: unit.UnitReading, kind: Kind
 ) -> dict[str, Any]:
     """Give the fields of a Reading about its uncertainty. A limit is rectangular (JCGM 100:2008, 4.3.7)."""
-    name = str(record.get("instrument") or "")
-    words = parts.accuracy or str(record.get("accuracy") or "")
-    if name and name not in instruments:
+    name = str(said.record.get("instrument") or "")
+    words = said.typed or str(said.record.get("accuracy") or "")
+    if name and name not in said.instruments:
         todo = "Choose it again or add it to the list."
         raise ReadingError(where, f"the instrument {name[:40]!r}", "one of the list", todo)
     size, half = abs(typed.value) * found.factor, typed.step / 2 * found.factor
-    tool = instruments.get(name, {})
-    if name and not parts.accuracy:
+    tool = said.instruments.get(name, {})
+    if name and not said.typed:
         accuracy = instruments_of.of_record(tool, size, kind.exponents, f"{where}, {name}")
         u_random = (instruments_of.resolution_of(tool, kind.exponents, f"{where}, {name}") or 2 * half) / ROOT_12
-        by = f"{name}, {_with_size(accuracy, found)}"
+        by = f"{name}, {_with_size(accuracy, found, said.mark)}"
     elif words:
         accuracy, u_random = instruments_of.parse(words, size, kind.exponents, where), 0.0
-        by = _with_size(accuracy, found)
+        by = _with_size(accuracy, found, said.mark)
     else:
         accuracy, u_random = instruments_of.Accuracy(0.0, 0.0, "", (0.0, 0.0)), 2 * half / ROOT_12
-        by = f"half the last digit typed: ± {show.tidy(half / found.factor, 3)} {found.text}".removesuffix(" 1")
+        size_shown = show.tidy(half / found.factor, 3, said.mark)
+        by = f"half the last digit typed: ± {size_shown} {found.text}".removesuffix(" 1")
     u_systematic = accuracy.limit / ROOT_3
     return {
         "u": math.hypot(u_systematic, u_random), "u_systematic": u_systematic, "u_random": u_random,
@@ -247,71 +258,8 @@ def _accuracy(  # noqa: PLR0913, PLR0917 - all that says how good a reading is
     }
 
 
-def _with_size(accuracy: instruments_of.Accuracy, found: unit.UnitReading) -> str:
+def _with_size(accuracy: instruments_of.Accuracy, found: unit.UnitReading, mark: str) -> str:
     """Give the accuracy in words with its size in the typed unit: ``class 1.6 of 250 bar: ± 4 bar``."""
     if accuracy.says == "exact" or not (accuracy.span or "%" in accuracy.says):
         return accuracy.says
-    return f"{accuracy.says}: ± {show.tidy(accuracy.limit / found.factor, 3)} {found.text}".removesuffix(" 1")
-
-
-def to_reference(reading: Reading, wanted: str, station: "Reading | None") -> tuple[float, float]:
-    """Give the value counted as ``wanted`` and its slope by the station pressure (1, -1 or 0).
-
-    Raises ReadingError: no station pressure where one is needed, or less than no pressure at all.
-    """
-    have = reading.reference
-    if have == wanted or wanted in ("", "difference"):
-        value, slope = reading.value, 0.0
-    else:
-        if station is None:
-            raise ReadingError(
-                reading.name, reading.text, "the station pressure to count it from",
-                "Give the station pressure, or the absolute pressure.",
-            )
-        to_absolute = {"absolute": (1.0, 0.0), "gauge": (1.0, 1.0), "vacuum": (-1.0, 1.0)}[have]
-        from_absolute = {"absolute": (1.0, 0.0), "gauge": (1.0, -1.0), "vacuum": (-1.0, 1.0)}[wanted]
-        absolute = to_absolute[0] * reading.value + to_absolute[1] * station.value
-        value = from_absolute[0] * absolute + from_absolute[1] * station.value
-        slope = from_absolute[0] * to_absolute[1] + from_absolute[1]
-    _refuse_below_zero(reading, station)
-    return value, slope
-
-
-def turn(reading: Reading, wanted: str) -> float:
-    """Give how the value counted as ``wanted`` moves with the value as read: 1, or -1 into or out of a vacuum scale."""
-    return -1.0 if (reading.reference == "vacuum") != (wanted == "vacuum") and wanted not in ("", "difference") else 1.0
-
-
-def _refuse_below_zero(reading: Reading, station: "Reading | None") -> None:
-    if station is None or reading.reference not in ("gauge", "vacuum"):
-        return
-    absolute = station.value + (reading.value if reading.reference == "gauge" else -reading.value)
-    if absolute < 0:
-        is_gauge = reading.reference == "gauge"
-        most = station.text.removesuffix(" absolute")
-        limit = f"no lower than −{most} gauge" if is_gauge else f"no more than {most} vacuum"
-        raise ReadingError(
-            reading.name, reading.text, f"{limit}, which is no pressure at all",
-            "Read the gauge and the station pressure again.",
-        )
-
-
-def questioned(reading: Reading) -> tuple[str, ...]:
-    """Say what is unlikely about a reading: below a tenth of its instrument's span, where its class may not hold.
-
-    Raises ReadingError where it is off the scale. A scale that does not start at zero has no such tenth.
-    """
-    if not reading.span:
-        return ()
-    low, high = reading.scale
-    shown = -reading.value if reading.reference == "vacuum" and low < 0 else reading.value
-    slack = 1e-9 * reading.span
-    if not low - slack <= shown <= high + slack:
-        raise ReadingError(
-            reading.name, reading.text, f"a reading on the scale of {reading.instrument or 'the instrument'}",
-            "Choose the instrument that was read, or read again.",
-        )
-    if low == 0 and shown < reading.span / 10:
-        todo = "A gauge of smaller span reads it better."
-        return (f"{reading.name}: {reading.text} is below a tenth of the span. {todo}",)
-    return ()
+    return f"{accuracy.says}: ± {show.tidy(accuracy.limit / found.factor, 3, mark)} {found.text}".removesuffix(" 1")

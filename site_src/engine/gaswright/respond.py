@@ -7,6 +7,7 @@ gaswright.answer_sheet come next.
 from typing import Any, NamedTuple
 
 from gaswright import quantity, show
+from gaswright.conditions import CAME_FROM
 from gaswright.errors import GaswrightError, ReadingError
 from gaswright.reading import Reading
 from gaswright.records import Kind
@@ -31,21 +32,12 @@ class Display(NamedTuple):
         return f" {self.kind.reference}" if self.kind.reference in COUNTED else ""
 
 
-def show_unit(request: dict[str, Any]) -> str:
-    """Give the unit a page asks the figure in, or nothing."""
-    return str((request.get("show") or {}).get("unit") or "")
-
-
-def text_of(raw: Any) -> str:
-    """Give the typed text of a row as a page or a record holds it."""
-    return str(raw.get("text", "") if isinstance(raw, dict) else raw or "").strip()
-
-
-def ok_row(reading: Reading, kind: Kind) -> Response:
+def ok_row(reading: Reading, kind: Kind, mark: str) -> Response:
     """Give the state of a row that was read: its SI value and how good it is."""
     counted = f" {reading.reference}" if reading.reference in COUNTED else ""
-    si = f"{show.tidy(reading.value, 7)} {'°C' if kind.si == 'Cel' else kind.si}".removesuffix(" 1") + counted
-    return {"state": "ok", "says": "", "si": si, "by": reading.by, "typed": reading.text}
+    si = f"{show.tidy(reading.value, 7, mark)} {'°C' if kind.si == 'Cel' else kind.si}".removesuffix(" 1") + counted
+    says = f"{reading.text}, as typed with a volume or flow" if reading.came_from == CAME_FROM else ""
+    return {"state": "ok", "says": says, "si": si, "by": reading.by, "typed": reading.text}
 
 
 def problem_row(error: ReadingError) -> Response:
@@ -85,11 +77,12 @@ def with_state(response: Response, state: str) -> Response:
 
 def place_error(response: Response, error: ReadingError, taken: dict[str, Reading]) -> Response:
     """Put an error that came up while counting beside the row it belongs to."""
-    for name, reading in taken.items():
-        if error.where.startswith(reading.name):
-            response["rows"][name] = problem_row(error)
-            return with_state(response, "incomplete")
-    return with_state({**response, "refusal": str(error)}, "refused")
+    named = [name for name, reading in taken.items() if error.where.startswith(reading.name)]
+    if not named:
+        return with_state({**response, "refusal": str(error)}, "refused")
+    name = max(named, key=lambda each: len(taken[each].name))  # "Pressure now" is not "Pressure"
+    response["rows"][name] = problem_row(error)
+    return with_state(response, "incomplete")
 
 
 def figure_texts(value: float, expanded: float, display: Display) -> tuple[float, float, str]:
@@ -101,15 +94,16 @@ def figure_texts(value: float, expanded: float, display: Display) -> tuple[float
     return shown, width, f"{text} ± {quantity.with_unit(plus, unit)}" if width else text
 
 
-def exact(shown: float, unit: str, kind: Kind) -> Response:
+def exact(shown: float, display: Display) -> Response:
     """Give the unrounded value in the unit shown, for the row that takes it over as a reading."""
+    kind, unit, mark = display
     reference = kind.reference if kind.reference in COUNTED else ""
-    return {"text": repr(shown), "unit": unit, "reference": reference}
+    return {"text": repr(shown).replace(".", mark), "unit": unit, "reference": reference}
 
 
-def factor(k: float) -> str:
+def factor(k: float, mark: str) -> str:
     """Give the coverage factor in words."""
-    return f"k = {k:.3g}"
+    return f"k = {show.tidy(k, 3, mark)}"
 
 
 def share_list(shares: tuple[Share, ...]) -> list[Response]:

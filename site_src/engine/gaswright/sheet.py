@@ -3,32 +3,24 @@
 Takes a sheet's key and the input part of a record; gives a SheetResult. gaswright.answer_sheet draws it.
 """
 
+import math
 from typing import Any, NamedTuple
 
-from gaswright import clock, quantity, working
+from gaswright import clock, conditions, quantity, working
 from gaswright import find as finder
-from gaswright.errors import GaswrightError, NoSolutionError, OutsideRangeError, ReadingError
+from gaswright import request as requests
+from gaswright.counting import to_reference, turn
+from gaswright.errors import NoSolutionError, OutsideRangeError, ReadingError
 from gaswright.gas import Gas, IdealGas
-from gaswright.gas import find as find_gas
-from gaswright.model import Find, Row, Sheet, Step
+from gaswright.model import Find, Sheet, Step
 from gaswright.network import slopes, travel
 from gaswright.notes import NOTES
-from gaswright.reading import Instruments, Reading, read, to_reference, turn
+from gaswright.reading import Reading
 from gaswright.tables import KINDS
+from gaswright.take import Taken, question, refuse_outside_row, take
 from gaswright.uncertainty import Combined, Share, combine
 
 STATION_KIND = "station_pressure"
-EXACT = 0.0
-
-
-class Taken(NamedTuple):
-    """Readings of a sheet as taken: by row, the gas, what went wrong by row, and rows still empty."""
-
-    readings: dict[str, Reading]
-    gas: Gas | None
-    problems: dict[str, ReadingError]
-    empty: tuple[str, ...]
-    clocks: dict[str, str]
 
 
 class Line(NamedTuple):
@@ -75,137 +67,79 @@ def run_sheet(key: str, record: dict[str, Any]) -> SheetResult:
     SI float or record), and optionally ``instruments`` and ``decimal``. Raises ReadingError for the first reading
     that cannot be taken, NoSolutionError or OutsideRangeError where there is no figure.
     """
+    requests.check(record)
     sheet = finder.sheet(key)
     find = question(sheet, record.get("find"))
-    taken = take(sheet, find, record.get("readings", {}), record.get("decimal"), record.get("instruments"))
+    taken = take(sheet, find, record.get("readings") or {}, record.get("decimal"), record.get("instruments"))
     for problem in taken.problems.values():
         raise problem
     for name in taken.empty:
         raise ReadingError(sheet.rows[name].title, "nothing", "a reading", "Type the reading, or ask for this row.")
-    return work(sheet, find, taken, str(record.get("show", {}).get("unit", "")))
+    show = quantity.shown_unit(record.get("show"), KINDS[sheet.rows[find.row].kind])
+    return work(sheet, find, taken, show, record.get("decimal") or ".")
 
 
-def question(sheet: Sheet, row: str | None) -> Find:
-    """Give the question asked; ReadingError names the rows that may be found."""
-    if row is None:
-        return next(iter(sheet.finds.values()))
-    if row not in sheet.finds:
-        raise ReadingError(
-            sheet.title, f"the question {row!r}", f"one of {', '.join(sheet.finds)}", "Ask for one of these."
-        )
-    return sheet.finds[row]
+def work(sheet: Sheet, find: Find, taken: Taken, show: str = "", mark: str = ".") -> SheetResult:
+    """Give the answer of readings taken, its working in the unit ``show`` and with the decimal ``mark``.
 
-
-def take(
-    sheet: Sheet, find: Find, raw: dict[str, Any], decimal: str | None = None, instruments: Instruments | None = None
-) -> Taken:
-    """Read every row; gather what is wrong and what is missing instead of stopping."""
-    readings: dict[str, Reading] = {}
-    problems: dict[str, ReadingError] = {name: _unknown_row(sheet, name) for name in raw if name not in sheet.rows}
-    empty: list[str] = []
-    clocks: dict[str, str] = {}
-    gas: Gas | None = None
-    for name, row in sheet.rows.items():
-        if not row.reading or name == find.row:
-            continue
-        try:
-            if row.is_gas:
-                gas = _gas(raw.get(name))
-            elif _is_empty(raw.get(name)):
-                if not row.optional:
-                    empty.append(name)
-            elif row.is_clock:
-                clocks[name] = clock.check(_text(raw[name]), row.title)
-            else:
-                readings[name] = _read_row(row, raw[name], decimal, instruments)
-        except ReadingError as problem:
-            problems[name] = problem
-    gas_row = next((name for name, row in sheet.rows.items() if row.is_gas), None)
-    if gas is None and gas_row and gas_row not in problems:
-        empty.append(gas_row)
-    return Taken(readings, gas, problems, tuple(empty), clocks)
-
-
-def _unknown_row(sheet: Sheet, name: str) -> ReadingError:
-    rows = ", ".join(row for row, meaning in sheet.rows.items() if meaning.reading)
-    return ReadingError(sheet.title, f"the row {str(name)[:40]!r}", f"one of {rows}", "Correct the name.")
-
-
-def _is_empty(raw: Any) -> bool:
-    return raw is None or not _text(raw).strip()
-
-
-def _text(raw: Any) -> str:
-    return str(raw.get("text", "") if isinstance(raw, dict) else raw)
-
-
-def _gas(raw: Any) -> Gas | None:
-    return None if _is_empty(raw) else find_gas(str(raw["text"] if isinstance(raw, dict) else raw))
-
-
-def _read_row(row: Row, raw: Any, decimal: str | None, instruments: Instruments | None) -> Reading:
-    if row.accuracy and isinstance(raw, str):
-        raw = {"text": raw, "accuracy": row.accuracy}
-    elif row.accuracy and isinstance(raw, dict) and not raw.get("accuracy") and not raw.get("instrument"):
-        raw = {**raw, "accuracy": row.accuracy}
-    reading = read(row.title, raw, KINDS[row.kind], decimal, instruments)
-    is_counted_otherwise = reading.reference != KINDS[row.kind].reference
-    if not is_counted_otherwise and not row.low <= reading.value <= row.high:
-        raise _out_of_row(row, reading)
-    if row.whole and abs(reading.number - round(reading.number)) > 1e-9:
-        raise ReadingError(row.title, reading.text, "a whole number", "Count again.")
-    return reading
-
-
-def _out_of_row(row: Row, reading: Reading) -> ReadingError:
-    kind = KINDS[row.kind]
-    low, high = (quantity.text_of(edge, kind, reading.unit) for edge in (row.low, row.high))
-    return ReadingError(row.title, reading.text, f"between {low} and {high}", "Check the number and its unit.")
-
-
-def work(sheet: Sheet, find: Find, taken: Taken, show: str = "") -> SheetResult:
-    """Give the answer of readings taken. Raises NoSolutionError or OutsideRangeError where there is none."""
-    if taken.gas is None:
-        raise ReadingError("Gas", "nothing", "the gas by name or formula", "Choose the gas.")
-    given, couplings = _counted(sheet, taken)
-    warnings = [text for name in sheet.notes for text in NOTES[name](given, taken.readings)]
-    warnings += [text for reading in taken.readings.values() for text in reading.warnings]
-    values = travel(sheet, find, given, taken.gas)
+    Raises ReadingError, NoSolutionError or OutsideRangeError where there is none.
+    """
+    gas = taken.gas()
+    given, couplings = _counted(sheet, taken, gas)
+    warnings = _warnings(sheet, taken, given)
+    values = travel(sheet, find, given, gas)
     _refuse_outside(sheet, find, values)
     combined = _combined(sheet, find, values, taken, couplings)
-    ideal, ideal_says = _ideal(sheet, find, given, taken.gas)
-    value = values[find.row]
-    row = sheet.rows[find.row]
-    kind = KINDS[row.kind]
-    safe = value - combined.expanded if find.safe == "low" else value + combined.expanded
+    ideal, ideal_says = _ideal(sheet, find, given, gas)
+    value, row = values[find.row], sheet.rows[find.row]
+    safe, said = _safe_end(sheet, find, taken, value, combined.expanded)
     limit, verdict = _verdict(find, values, combined.expanded)
     units = {name: reading.unit for name, reading in taken.readings.items()} | ({find.row: show} if show else {})
     return SheetResult(
-        sheet.key,
-        find.row,
-        value,
-        kind.si,
-        combined.u,
-        combined.expanded,
-        combined.k,
-        combined.freedom,
-        safe,
-        combined.shares,
-        combined.shared,
-        combined.other_u,
-        ideal,
-        ideal_says,
-        taken.gas.title,
-        values,
-        taken.readings,
-        tuple(_working(sheet, find, values, units)),
-        tuple(dict.fromkeys(warnings)),
-        verdict,
-        limit,
-        row.low,
-        row.high,
-        _ends(find, taken, safe),
+        key=sheet.key,
+        find=find.row,
+        value=value,
+        unit=KINDS[row.kind].si,
+        u=combined.u,
+        expanded=combined.expanded,
+        k=combined.k,
+        freedom=combined.freedom,
+        safe=safe,
+        shares=combined.shares,
+        shared=combined.shared,
+        other_u=combined.other_u,
+        ideal=ideal,
+        ideal_says=ideal_says,
+        gas=gas.title,
+        values=values,
+        readings=taken.readings,
+        working=tuple(_working(sheet, find, values, units, mark)),
+        warnings=tuple(dict.fromkeys([*warnings, *said])),
+        verdict=verdict,
+        limit=limit,
+        low=row.low,
+        high=row.high,
+        ends=_ends(find, taken, safe),
     )
+
+
+def _warnings(sheet: Sheet, taken: Taken, given: dict[str, float]) -> list[str]:
+    kinds = {name: row.kind for name, row in sheet.rows.items() if row.reading}
+    said = [text for name in sheet.notes for text in NOTES[name](given, taken.readings)]
+    said += [text for reading in taken.readings.values() for text in reading.warnings]
+    return [*said, *conditions.check(taken.readings, given, kinds)]
+
+
+def _safe_end(sheet: Sheet, find: Find, taken: Taken, value: float, expanded: float) -> tuple[float, tuple[str, ...]]:
+    """Give the safe end in SI, no lower than the quantity can be, and say so where nothing is left to promise."""
+    if find.safe == "high":
+        return value + expanded, ()
+    kind = KINDS[sheet.rows[find.row].kind]
+    station = _station(sheet, taken)
+    least = -station.value if kind.reference == "gauge" and station else 0.0 if kind.low >= 0 else -math.inf
+    if value - expanded > least:
+        return value - expanded, ()
+    return least, ("The uncertainty is as large as the figure: with these instruments nothing can be promised.",)
 
 
 def _ends(find: Find, taken: Taken, safe: float) -> str:
@@ -213,16 +147,17 @@ def _ends(find: Find, taken: Taken, safe: float) -> str:
     return clock.later(taken.clocks[find.clock], safe) if find.clock in taken.clocks else ""
 
 
-def _counted(sheet: Sheet, taken: Taken) -> tuple[dict[str, float], dict[str, float]]:
+def _counted(sheet: Sheet, taken: Taken, gas: Gas) -> tuple[dict[str, float], dict[str, float]]:
     """Give every reading in SI as its row counts it, and its slope by the station pressure."""
     station = _station(sheet, taken)
     given: dict[str, float] = {}
     couplings: dict[str, float] = {}
     for name, reading in taken.readings.items():
         given[name], couplings[name] = to_reference(reading, KINDS[sheet.rows[name].kind].reference, station)
+        refuse_outside_row(sheet.rows[name], reading, given[name])
     for name, row in sheet.rows.items():
         if row.of_gas:
-            given[name] = getattr(taken.gas, row.of_gas)
+            given[name] = getattr(gas, row.of_gas)
     return given, couplings
 
 
@@ -233,9 +168,10 @@ def _station(sheet: Sheet, taken: Taken) -> Reading | None:
 def _refuse_outside(sheet: Sheet, find: Find, values: dict[str, float]) -> None:
     row = sheet.rows[find.row]
     value = values[find.row]
-    if not (row.low <= value <= row.high or row.whole):
+    least = 0.0 if row.whole else row.low  # half a cylinder is an answer: one is signed
+    if not least <= value <= row.high:
         kind = KINDS[row.kind]
-        low, high, found = (quantity.text_of(edge, kind, find.unit) for edge in (row.low, row.high, value))
+        low, high, found = (quantity.text_of(edge, kind, find.unit) for edge in (least, row.high, value))
         raise NoSolutionError(row.title, found, f"between {low} and {high}", "Check the readings and their units.")
 
 
@@ -243,9 +179,7 @@ def _combined(
     sheet: Sheet, find: Find, values: dict[str, float], taken: Taken, couplings: dict[str, float]
 ) -> Combined:
     """Combine the readings, and the gas equation's own uncertainty as one independent input for each state."""
-    gas = taken.gas
-    if gas is None:
-        raise ReadingError("Gas", "nothing", "the gas by name or formula", "Choose the gas.")
+    gas = taken.gas()
     found = slopes(sheet, find, values, gas)
     station = _station(sheet, taken)
     gradient: list[float] = []
@@ -265,24 +199,23 @@ def _combined(
 
 
 def _equation_reading(title: str, relative: float) -> Reading:
-    infinite = float("inf")
     return Reading(
-        f"Equation of the gas, {title.lower()}",
-        "",
-        0.0,
-        "1",
-        0.0,
-        "",
-        relative,
-        relative,
-        0.0,
-        infinite,
-        "stated by the equation’s authors",
-        "",
-        0.0,
-        "preset",
-        None,
-        (),
+        name=f"Equation of the gas, {title[:1].lower()}{title[1:]}",
+        text="",
+        number=0.0,
+        unit="1",
+        value=0.0,
+        reference="",
+        u=relative,
+        u_systematic=relative,
+        u_random=0.0,
+        freedom=math.inf,
+        by="stated by the equation’s authors",
+        instrument="",
+        span=0.0,
+        came_from="preset",
+        conditions=None,
+        warnings=(),
     )
 
 
@@ -304,21 +237,21 @@ def _verdict(find: Find, values: dict[str, float], expanded: float) -> tuple[flo
     return limit, "FAIL" if margin <= -expanded and margin < 0 else "CANNOT DECIDE"
 
 
-def _working(sheet: Sheet, find: Find, values: dict[str, float], units: dict[str, str]) -> list[Line]:
+def _working(sheet: Sheet, find: Find, values: dict[str, float], units: dict[str, str], mark: str) -> list[Line]:
     lines = []
     for part in find.route:
         steps = (part,) if isinstance(part, Step) else (*part.steps, Step(part.use, "", part.torn))
-        lines += [_line(sheet, step, values, units) for step in steps]
+        lines += [_line(sheet, step, values, units, mark) for step in steps]
     return lines
 
 
-def _line(sheet: Sheet, step: Step, values: dict[str, float], units: dict[str, str]) -> Line:
+def _line(sheet: Sheet, step: Step, values: dict[str, float], units: dict[str, str], mark: str) -> Line:
     use = sheet.uses[step.use]
     relation = finder.relation(use.relation)
     unknown = step.unknown or next(name for name, row in use.rows.items() if row in values)
     own = {name: values[row] for name, row in use.rows.items() if row in values}
     own_units = {name: units.get(row, "") for name, row in use.rows.items()}
-    text = working.line(relation, unknown, own, own_units)
+    text = working.line(relation, unknown, own, own_units, mark)
     return Line(f"{sheet.rows[step.row].title}: {text}", relation.key, relation.title)
 
 
@@ -331,8 +264,3 @@ def worked_example(key: str, row: str) -> SheetResult:
     answer = run_sheet(key, {"find": first, "readings": sheet.example})
     readings = {name: text for name, text in sheet.example.items() if name != row}
     return run_sheet(key, {"find": row, "readings": {**readings, first: answer.value}})
-
-
-def refusal(error: GaswrightError) -> str:
-    """Give the four parts of an error as one text for a page."""
-    return str(error)

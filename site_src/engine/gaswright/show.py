@@ -74,16 +74,18 @@ def places_of(step: float) -> int:
 
 def safe_low(value: float, expanded: float, mark: str = ".") -> str:
     """Give ``value`` - ``expanded`` rounded down to the step."""
-    return _safe(value - expanded, expanded, mark, down=True)
+    return safe_end(value - expanded, expanded, mark, down=True)
 
 
 def safe_high(value: float, expanded: float, mark: str = ".") -> str:
     """Give ``value`` + ``expanded`` rounded up to the step."""
-    return _safe(value + expanded, expanded, mark, down=False)
+    return safe_end(value + expanded, expanded, mark, down=False)
 
 
-def _safe(end: float, expanded: float, mark: str, *, down: bool) -> str:
+def safe_end(end: float, expanded: float, mark: str = ".", *, down: bool) -> str:
+    """Give the safe ``end`` of a figure rounded down or up to the step its uncertainty allows."""
     _refuse_infinite(end)
+    _refuse_infinite(expanded)
     step = step_for(expanded)
     if step is None:
         return tidy(end, 7, mark)
@@ -108,6 +110,7 @@ def scaled(value: float, step: float, mark: str = ".") -> str:
 
 def plus_minus(value: float, expanded: float, mark: str = ".") -> tuple[str, str]:
     """Give the best estimate and its ± as text, both to the step and to the same power of ten; the ± rounded up."""
+    _refuse_infinite(expanded)
     step = step_for(expanded)
     if step is None:
         return tidy(value, 7, mark), "0"
@@ -123,6 +126,8 @@ def plus_minus(value: float, expanded: float, mark: str = ".") -> tuple[str, str
 def duration(seconds: float, *, down: bool) -> str:
     """Give a time as hours and minutes, rounded down or up to a minute (to a second below an hour)."""
     _refuse_infinite(seconds)
+    if seconds < 0:
+        return f"{MINUS}{duration(-seconds, down=not down)}" if rounded_to(seconds, 1.0, down=down) else "0 s"
     whole = int(rounded_to(seconds, 1.0, down=down))
     if abs(whole) < 3600:
         minutes, rest = divmod(whole, 60)

@@ -5,6 +5,7 @@ gaswright.reading reads each part.
 """
 
 import re
+from collections.abc import Mapping
 from typing import NamedTuple
 
 from gaswright.errors import ReadingError
@@ -27,6 +28,12 @@ class Typed(NamedTuple):
     unit: str
     accuracy: str
     pair: tuple[str, str] | None
+
+
+def text_of(raw: object) -> str:
+    """Give the typed text of a row, bare or under ``text`` of a record; empty where there is none."""
+    text = raw.get("text") if isinstance(raw, Mapping) else raw
+    return "" if text is None else str(text).strip()
 
 
 def take_apart(text: str, where: str) -> Typed:

@@ -9,6 +9,7 @@ from collections.abc import Sequence
 from typing import NamedTuple
 
 from gaswright import student
+from gaswright.errors import NoSolutionError
 from gaswright.reading import Reading
 
 NEAR = 0.1
@@ -42,6 +43,10 @@ def combine(gradient: Sequence[float], readings: Sequence[Reading]) -> Combined:
     groups = _groups(readings)
     parts = [_part(group, gradient, readings) for group in groups]
     total = sum(parts)
+    if not math.isfinite(total):
+        raise NoSolutionError(
+            "Uncertainty", "no finite size", "readings on which the figure depends smoothly", "Check the readings.",
+        )
     u = math.sqrt(total)
     freedom = _freedom(u, gradient, readings)
     k = student.factor(freedom)

@@ -23,24 +23,25 @@ def verdict_words(sheet: Sheet, find: Find, result: SheetResult, text: str, mark
         return None
     row = sheet.rows[find.limit]
     unit = result.readings[find.limit].unit
-    limit = quantity.text_of(result.limit, KINDS[row.kind], unit, mark)
+    limit = quantity.text_of(result.limit, KINDS[row.kind], unit, mark) + Display(KINDS[row.kind], unit, mark).counted()
+    missed = "not reached" if find.safe == "low" else "exceeded"
     says = {
         "PASS": f"{find.limit_text} {limit}; the safe end is {text}.",
-        "FAIL": f"{find.limit_text} {limit}; not reached even at the favourable end of the uncertainty.",
+        "FAIL": f"{find.limit_text} {limit}; {missed} even at the favourable end of the uncertainty.",
         "CANNOT DECIDE": f"{find.limit_text} {limit}, which lies inside the uncertainty of these instruments. "
-        + _would_decide(result),
+        + _would_decide(result, mark),
     }[result.verdict]
     return {"word": result.verdict, "says": says}
 
 
-def _would_decide(result: SheetResult) -> str:
+def _would_decide(result: SheetResult, mark: str) -> str:
     """Say what would decide: how small U must be, and which reading to better first."""
     margin = abs(result.value - (result.limit or 0.0))
     if not result.shares or margin == 0:
         return "The best estimate stands on the limit itself: no instrument decides it."
     worst = result.shares[0]
     return (
-        f"An uncertainty {result.expanded / margin:.2g} times smaller would decide; "
+        f"An uncertainty {show.significant(result.expanded / margin, 2, mark)} times smaller would decide; "
         f"{worst.label} contributes {worst.fraction * 100:.0f} % of it, so better that first."
     )
 
@@ -55,10 +56,11 @@ def versus(result: SheetResult, display: Display) -> list[list[str]]:
     rows = [[f"Real {result.gas.lower()}", shown(result.value)]]
     if result.ideal is None:
         return [*rows, ["Ideal law", "no answer"]]
-    off = (result.ideal / result.value - 1) * 100 if result.value else 0.0
-    side = "more" if off > 0 else "less"
-    difference = f", {abs(off):.2g} % {side}".replace(".", mark) if kind.si not in ("K", "Cel") else ""
-    return [*rows, ["Ideal law", shown(result.ideal) + difference]]
+    if kind.si in ("K", "Cel") or result.value <= 0:  # a share of a temperature or of a vacuum says nothing
+        return [*rows, ["Ideal law", shown(result.ideal)]]
+    off = (result.ideal / result.value - 1) * 100
+    difference = f"{show.significant(abs(off), 2, mark)} % {'more' if off > 0 else 'less'}"
+    return [*rows, ["Ideal law", f"{shown(result.ideal)}, {difference}"]]
 
 
 def assumption(result: SheetResult, display: Display) -> list[str]:
@@ -83,13 +85,9 @@ def extra(sheet: Sheet, find: Find, result: SheetResult, mark: str) -> list[list
     for name in ("m", "n"):
         if find.row == "V_ref" and name in sheet.rows:
             kind = KINDS[sheet.rows[name].kind]
-            value = result.values[name] * result.safe / result.value
-            lines.append(
-                [
-                    f"{sheet.rows[name].title}, safe end",
-                    quantity.with_unit(show.significant(value, 4, mark), kind.units[0]),
-                ]
-            )
+            per = quantity.in_unit(result.values[name], kind, kind.units[0]) / result.value
+            text = show.safe_end(per * result.safe, per * result.expanded, mark, down=True)
+            lines.append([f"{sheet.rows[name].title}, safe end", quantity.with_unit(text, kind.units[0])])
     pair = [result.readings[name] for name in ("T_ref", "p_ref") if name in result.readings]
     if len(pair) == 2:
         lines.append(["Reference conditions", ", ".join(reading.text for reading in pair)])

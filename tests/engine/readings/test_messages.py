@@ -4,8 +4,9 @@ from typing import Any
 
 import pytest
 from gaswright import instrument
+from gaswright.counting import questioned, to_reference
 from gaswright.errors import ReadingError
-from gaswright.reading import questioned, read, to_reference
+from gaswright.reading import read
 from gaswright.tables import KINDS
 
 TOOLS: dict[str, dict[str, object]] = {

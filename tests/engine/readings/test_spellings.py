@@ -2,8 +2,9 @@
 
 import pytest
 from gaswright import number, product, unit
+from gaswright.counting import to_reference
 from gaswright.errors import ReadingError
-from gaswright.reading import read, to_reference
+from gaswright.reading import read
 from gaswright.tables import KINDS, UNITS
 
 PRESSURES = [
