@@ -6,6 +6,7 @@ A broken spec leaves the last good site in its folder; pages then show the build
 
 import errno
 import html
+import signal
 import subprocess
 import sys
 from collections.abc import Iterable, Iterator, Sequence
@@ -157,6 +158,8 @@ def serve(root: Path, *, port: int | None, build: Sequence[str]) -> int:
     Raises:
         SetUpError: the port asked for, or every usual one, is taken.
     """
+    # A shell that starts it in the background leaves the interrupt ignored; it is the way to stop here.
+    signal.signal(signal.SIGINT, signal.default_int_handler)
     builder = Builder(root, build)
     site = root / "build" / "site"
     try:
