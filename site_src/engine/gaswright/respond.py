@@ -9,14 +9,13 @@ from typing import Any, NamedTuple
 from gaswright import quantity, show
 from gaswright.conditions import CAME_FROM
 from gaswright.errors import GaswrightError, ReadingError
-from gaswright.reading import Reading
+from gaswright.reading import COUNTED, Reading
 from gaswright.records import Kind
 from gaswright.uncertainty import Share
 
 Response = dict[str, Any]
 FEWEST_PERCENT = 0.5
 ROW_DIGITS = 7
-COUNTED = ("absolute", "gauge", "vacuum")
 NO_U = "No uncertainty: every reading is exact."
 
 

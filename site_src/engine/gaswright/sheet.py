@@ -21,6 +21,7 @@ from gaswright.take import Taken, question, refuse_outside_row, take
 from gaswright.uncertainty import Combined, Share, combine
 
 STATION_KIND = "station_pressure"
+NEAR_CRITICAL = 1.2
 
 
 class Line(NamedTuple):
@@ -89,6 +90,7 @@ def work(sheet: Sheet, find: Find, taken: Taken, show: str = "", mark: str = "."
     warnings = _warnings(sheet, taken, given)
     values = travel(sheet, find, given, gas)
     _refuse_outside(sheet, find, values)
+    warnings += _near_critical(sheet, values, gas)
     combined = _combined(sheet, find, values, taken, couplings)
     ideal, ideal_says = _ideal(sheet, find, given, gas)
     value, row = values[find.row], sheet.rows[find.row]
@@ -140,6 +142,20 @@ def _safe_end(sheet: Sheet, find: Find, taken: Taken, value: float, expanded: fl
     if value - expanded > least:
         return value - expanded, ()
     return least, ("The uncertainty is as large as the figure: with these instruments nothing can be promised.",)
+
+
+def _near_critical(sheet: Sheet, values: dict[str, float], gas: Gas) -> list[str]:
+    """Say so where a gas stands above its critical point and near its critical temperature."""
+    said = []
+    for use in sheet.uses:
+        p, T = (values.get(use.rows.get(name, ""), 0.0) for name in ("p", "T"))
+        if p > gas.p_c and gas.T_c <= T < NEAR_CRITICAL * gas.T_c:
+            at = f"{gas.T_c - quantity.ZERO_CELSIUS:.0f} °C and {gas.p_c / 1e5:.0f} bar"
+            said.append(
+                f"{gas.title} is above its critical point ({at}): a small change of temperature moves the pressure "
+                "much. Weigh it to be sure."
+            )
+    return said
 
 
 def _ends(find: Find, taken: Taken, safe: float) -> str:

@@ -11,7 +11,7 @@ from gaswright.errors import ReadingError
 from gaswright.gas import Gas
 from gaswright.gas import find as find_gas
 from gaswright.model import Find, Row, Sheet
-from gaswright.reading import Instruments, Reading, read
+from gaswright.reading import COUNTED, Instruments, Reading, read
 from gaswright.tables import KINDS
 from gaswright.typed import text_of
 
@@ -99,4 +99,6 @@ def refuse_outside_row(row: Row, reading: Reading, value: float) -> None:
         return
     kind = KINDS[row.kind]
     low, high = (quantity.text_of(edge, kind, reading.unit) for edge in (row.low, row.high))
-    raise ReadingError(row.title, reading.text, f"between {low} and {high}", "Check the number and its unit.")
+    counted = f" {kind.reference}" if kind.reference in COUNTED else ""
+    expected = f"between {low} and {high}{counted}"
+    raise ReadingError(row.title, reading.text, expected, "Check the number and its unit.")
