@@ -73,7 +73,7 @@ def _untie(sheet: Sheet, block: Block, values: dict[str, float], gas: "Gas") -> 
         what = "no value" if not found else f"{len(found)} values"
         raise NoSolutionError(
             row.title,
-            f"{what} between {row.low:g} and {row.high:g} (SI) that agree with the readings",
+            f"{what} between {row.low:g} and {row.high:g} (SI) in agreement with the readings",
             "readings that exactly one value explains",
             "Check the readings, or ask for another row.",
         )

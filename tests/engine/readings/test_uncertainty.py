@@ -12,6 +12,7 @@ import GTC
 import metrolopy
 import pytest
 from gaswright import student
+from gaswright.errors import NoSolutionError
 from gaswright.reading import Reading, read
 from gaswright.tables import KINDS
 from gaswright.uncertainty import combine
@@ -197,3 +198,21 @@ def test_effective_freedom_is_that_of_gtc() -> None:
     a, b, c = (GTC.ureal(reading.value, reading.u, reading.freedom) for reading in readings)
     assert combined.freedom == pytest.approx(GTC.dof(a + 2 * b - c), rel=1e-12)
     assert combined.k == student.factor(combined.freedom) > 2
+
+
+def test_effective_freedom_of_the_guides_own_example() -> None:
+    # JCGM 100:2008, G.4.1, example: three inputs of 10, 5 and 15 observations with relative u of 0.25, 0.57 and
+    # 0.82 %, multiplied; effective degrees of freedom 19.0 (digits from memory)
+    plain = read("x", {"text": "1", "accuracy": "exact"}, KINDS["number"])
+    inputs = [(0.25, 9.0), (0.57, 4.0), (0.82, 14.0)]
+    readings = [plain._replace(u=u, u_random=u, freedom=freedom) for u, freedom in inputs]
+    assert round(combine([1.0, 1.0, 1.0], readings).freedom, 1) == 19.0
+
+
+def test_a_figure_without_bounds_has_no_uncertainty() -> None:
+    reading = read("x", "1.0", KINDS["number"])
+    with pytest.raises(NoSolutionError) as caught:
+        combine([math.inf], [reading])
+    assert str(caught.value) == (
+        "Uncertainty: found no finite size; expected readings on which the figure depends smoothly. Check the readings."
+    )

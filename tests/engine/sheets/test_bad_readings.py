@@ -18,8 +18,10 @@ ROWS: list[tuple[str, Any, str, str, tuple[str, ...]]] = [
         "pg_start",
         "9" * 10_000,
         "error",
-        "Found '99999999999999999999' and 9980 more signs; expected a number with its unit. "
-        "Type digits with a decimal comma or point, such as 12.5.",
+        (
+            "Found '99999999999999999999' and 9980 more signs; expected a number with its unit. "
+            "Type digits with a decimal comma or point, such as 12.5."
+        ),
         (),
     ),
     (
@@ -47,8 +49,10 @@ ROWS: list[tuple[str, Any, str, str, tuple[str, ...]]] = [
         "pg_start",
         "-1.2 bar gauge",
         "error",
-        "Found -1.2 bar gauge; expected no lower than −1013 mbar gauge, which is no pressure at all. "
-        "Read the gauge and the station pressure again.",
+        (
+            "Found -1.2 bar gauge; expected no lower than −1013 mbar gauge, which is no pressure at all. "
+            "Read the gauge and the station pressure again."
+        ),
         (),
     ),
     (
@@ -69,8 +73,10 @@ ROWS: list[tuple[str, Any, str, str, tuple[str, ...]]] = [
         "pg_start",
         "5 L",
         "error",
-        "Found L (volume); expected a unit of gauge pressure such as bar, kPa, MPa. "
-        "Choose another unit, or check which row this is.",
+        (
+            "Found L (volume); expected a unit of gauge pressure such as bar, kPa, MPa. "
+            "Choose another unit, or check which row this is."
+        ),
         (),
     ),
     (
@@ -94,8 +100,10 @@ ROWS: list[tuple[str, Any, str, str, tuple[str, ...]]] = [
         "q",
         "30 scfm",
         "question",
-        "Found 'scfm'; expected a unit with its reference conditions. "
-        "Which temperature and pressure does scfm count at?",
+        (
+            "Found 'scfm'; expected a unit with its reference conditions. "
+            "Which temperature and pressure does scfm count at?"
+        ),
         (
             "30 ft³/min (60 °F, 14.696 psi)",
             "30 ft³/min (60 °F, 14.73 psi)",
@@ -106,8 +114,10 @@ ROWS: list[tuple[str, Any, str, str, tuple[str, ...]]] = [
         "q",
         "30 L/min (0 °C, 101.325 kPa)",
         "question",
-        "Found 30 L/min (0 °C, 101.325 kPa); expected the reference conditions that stand in their own rows, "
-        "20 °C, 101.325 kPa. Correct those rows, or choose their conditions here.",
+        (
+            "Found 30 L/min (0 °C, 101.325 kPa); expected the reference conditions that stand in their own rows, "
+            "20 °C, 101.325 kPa. Correct those rows, or choose their conditions here."
+        ),
         ("30 L/min (20 °C, 101.325 kPa)",),
     ),
     (
@@ -121,8 +131,10 @@ ROWS: list[tuple[str, Any, str, str, tuple[str, ...]]] = [
         "rho_start",
         "1 kg/m³",
         "error",
-        "Found the row 'rho_start'; expected one of gas, count, V_each, pg_start, pg_end, T_gas, p_atm, q, T_ref, "
-        "p_ref, t, t_needed, start. Correct the name.",
+        (
+            "Found the row 'rho_start'; expected one of gas, count, V_each, pg_start, pg_end, T_gas, p_atm, q, T_ref, "
+            "p_ref, t, t_needed, start. Correct the name."
+        ),
         (),
     ),
 ]
@@ -156,24 +168,32 @@ def test_every_offer_gives_an_answer_when_taken(typed: str) -> None:
 REFUSED: list[tuple[dict[str, Any], str]] = [
     (
         {"gas": "carbon dioxide", "pg_start": "60 bar gauge", "pg_end": "5 bar gauge"},
-        "Carbon dioxide: found 61.013 bar absolute at 20.00 °C, where it is a liquid; expected a gas: below "
-        "57.2905 bar absolute, its saturation pressure at 20.00 °C. "
-        "Weigh it instead, or enter a lower pressure or a higher temperature.",
+        (
+            "Carbon dioxide: found 61.013 bar absolute at 20.00 °C, where it is a liquid; expected a gas: below "
+            "57.2905 bar absolute, its saturation pressure at 20.00 °C. "
+            "Weigh it instead, or enter a lower pressure or a higher temperature."
+        ),
     ),
     (
         {"gas": "oxygen", "pg_start": "950 bar gauge"},
-        "pressure of Oxygen: found 951.013 bar absolute; expected at most 800 bar absolute, the range of its "
-        "equation of state. Check the pressure and its unit.",
+        (
+            "pressure of Oxygen: found 951.013 bar absolute; expected at most 800 bar absolute, the range of its "
+            "equation of state. Check the pressure and its unit."
+        ),
     ),
     (
         {"pg_end": "210 bar gauge"},
-        "Pressure now: found 200 bar gauge; expected more than the changeover pressure 210 bar gauge. "
-        "The bank is already at changeover: change over, or read both again.",
+        (
+            "Pressure now: found 200 bar gauge; expected more than the changeover pressure 210 bar gauge. "
+            "The bank is already at changeover: change over, or read both again."
+        ),
     ),
     (
         {"q": "1e-9 L/min"},
-        "Time to changeover: found 3.5509 × 10¹³ min; expected between 0.0166667 min and 16\u202f666\u202f700 min. "
-        "Check the readings and their units.",
+        (
+            "Time to changeover: found 3.5509 × 10¹³ min; expected between 0.0166667 min and 16\u202f666\u202f700 min. "
+            "Check the readings and their units."
+        ),
     ),
 ]
 
@@ -205,8 +225,10 @@ def test_what_has_no_figure_is_refused(changes: dict[str, Any], refusal: str) ->
         (
             "cylinder_receipt",
             {"gas": "CO2", "pg": "100 bar gauge", "T_gas": "40 °C"},
-            "Carbon dioxide is above its critical point (31 °C and 74 bar): a small change of temperature moves the "
-            "pressure much. Weigh it to be sure.",
+            (
+                "Carbon dioxide is above its critical point (31 °C and 74 bar): a small change of temperature moves the "
+                "pressure much. Weigh it to be sure."
+            ),
         ),
         (
             "locked_in",
@@ -239,7 +261,8 @@ def test_a_gauge_off_its_scale_or_low_on_it() -> None:
     site = {"time": "2026-02-01T07:00:00+01:00"}
     high = bank({"pg_start": {"text": "260 bar gauge", "instrument": "G-1"}}, instruments=tools)
     assert high["rows"]["pg_start"]["says"] == (
-        "Found 260 bar gauge; expected a reading on the scale of G-1. Choose the instrument that was read, or read again."
+        "Found 260 bar gauge; expected a reading on the scale of G-1. "
+        "Choose the instrument that was read, or read again."
     )
     low = bank({"pg_start": {"text": "20 bar gauge", "instrument": "G-1"}}, instruments=tools, site=site)
     assert low["warnings"] == [
@@ -249,6 +272,8 @@ def test_a_gauge_off_its_scale_or_low_on_it() -> None:
 
 
 def test_an_empty_sheet_says_nothing_is_wrong() -> None:
-    response = bank(dict.fromkeys(("gas", "count", "V_each", "pg_start", "pg_end", "T_gas", "p_atm", "q", "T_ref", "p_ref")))
+    response = bank(
+        dict.fromkeys(("gas", "count", "V_each", "pg_start", "pg_end", "T_gas", "p_atm", "q", "T_ref", "p_ref"))
+    )
     assert response["state"] == "empty"
     assert {entry["state"] for entry in response["rows"].values()} == {"empty", "find"}

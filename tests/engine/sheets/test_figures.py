@@ -24,8 +24,14 @@ BANK: dict[str, Any] = {
     "T_ref": "20 °C",
     "p_ref": "101.325 kPa absolute",
 }
-FLUID = {"nitrogen": "Nitrogen", "oxygen": "Oxygen", "argon": "Argon", "methane": "Methane", "hydrogen": "Hydrogen",
-         "helium": "Helium"}
+FLUID = {
+    "nitrogen": "Nitrogen",
+    "oxygen": "Oxygen",
+    "argon": "Argon",
+    "methane": "Methane",
+    "hydrogen": "Hydrogen",
+    "helium": "Helium",
+}
 
 
 def density(gas: str, p: float, T: float) -> float:
@@ -41,8 +47,16 @@ def closed(gas: str, bar: float, at: str, hot: str) -> SheetResult:
 
 def held(gas: str, p_ref: str = "101.325 kPa absolute") -> SheetResult:
     """Work cylinder_receipt for 50 L at 200 bar absolute and 15 °C."""
-    readings = {"gas": gas, "count": "1", "V_each": "50 L", "pg": "200 bar absolute", "T_gas": "15 °C",
-                "p_atm": "1013.25 hPa", "T_ref": "15 °C", "p_ref": p_ref}
+    readings = {
+        "gas": gas,
+        "count": "1",
+        "V_each": "50 L",
+        "pg": "200 bar absolute",
+        "T_gas": "15 °C",
+        "p_atm": "1013.25 hPa",
+        "T_ref": "15 °C",
+        "p_ref": p_ref,
+    }
     return run_sheet("cylinder_receipt", {"find": "V_ref", "readings": readings})
 
 
