@@ -14,6 +14,7 @@ from gaswright.model import Relation
 if TYPE_CHECKING:
     from gaswright.gas.real import Gas
 
+ROUNDING = 4e-15
 SIGN_WORDS = {"positive": "a value above zero", "nonnegative": "zero or a value above it", "any": "a finite value"}
 
 
@@ -22,6 +23,8 @@ def evaluate(relation: Relation, unknown: str, values: dict[str, float], gas: "G
     form = relation.forms[unknown]
     value = _called(form.function, [gas if name == "gas" else values[name] for name in form.arguments])
     sign = relation.variable(unknown).sign
+    if sign == "nonnegative" and _is_rounding(relation, unknown, values, gas, value):
+        return 0.0
     if isinstance(value, complex) or not math.isfinite(value) or not _has_sign(sign, value):
         raise _no_answer(relation, where, sign, value)
     return float(value)
@@ -61,6 +64,21 @@ def no_slope(where: str) -> NoSolutionError:
         "readings on which it depends smoothly",
         "Check the readings: they stand on the edge of what the law covers.",
     )
+
+
+def _is_rounding(
+    relation: Relation, unknown: str, values: dict[str, float], gas: "Gas | None", value: complex
+) -> bool:
+    """Say whether ``value`` is below zero by no more than the rounding of the readings' own digits."""
+    if isinstance(value, complex) or not value < 0:
+        return False
+    at_zero = {**values, unknown: 0.0}
+    found = _called(relation.slopes, [gas if name == "gas" else at_zero[name] for name in relation.arguments])
+    if not isinstance(found, tuple):
+        return False
+    parts = {each.name: slope for each, slope in zip(relation.variables, found, strict=True)}
+    largest = max(abs(slope * at_zero[name]) for name, slope in parts.items())
+    return abs(value * parts[unknown]) <= ROUNDING * largest
 
 
 def _has_sign(sign: str, value: float) -> bool:

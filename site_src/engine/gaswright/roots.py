@@ -72,7 +72,7 @@ def _interpolated(a: Guess, b: Guess, c: Guess, half: float) -> tuple[float, flo
 
 
 def find_root(function: Function, low: float, high: float, where: str) -> float:
-    """Give the one root of a function that only rises or only falls between ``low`` and ``high`` (both positive).
+    """Give the one root of a function that only rises or only falls between ``low`` and ``high`` (both positive), or 0.
 
     Raises NoSolutionError where the function has one sign over the whole range.
     """
@@ -87,6 +87,8 @@ def find_root(function: Function, low: float, high: float, where: str) -> float:
     if at_end == 0:
         return high
     if (at_start > 0) == (at_end > 0):
+        if _heads_for_zero(function, at_start):
+            return 0.0
         raise NoSolutionError(
             where,
             f"no value between {low:g} and {high:g} (SI) that agrees with the readings",
@@ -94,6 +96,15 @@ def find_root(function: Function, low: float, high: float, where: str) -> float:
             "Check the readings and their units.",
         )
     return _polished(function, math.exp(brent(along, start, end, at_start, at_end)), low, high)
+
+
+def _heads_for_zero(function: Function, at_low: float) -> bool:
+    """Say whether the function, followed down from its low end, comes to nothing at zero."""
+    try:
+        at_zero = function(0.0)
+    except (ArithmeticError, ValueError):
+        return False
+    return abs(at_zero) <= abs(at_low) / 2
 
 
 def _polished(function: Function, near: float, low: float, high: float) -> float:

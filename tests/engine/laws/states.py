@@ -80,9 +80,8 @@ def arguments(relation: Relation, state: State) -> list[Any]:
     return [state.gas if name == "gas" else state.values[name] for name in relation.arguments]
 
 
-def weights(relation: Relation, state: State) -> dict[str, float]:
-    """Give how much of left - right each variable carries: its slope times its value."""
+def weights(relation: Relation, state: State, sizes: dict[str, float] | None = None) -> dict[str, float]:
+    """Give how much of left - right each variable carries: its slope times its value, or its size where given."""
     found = slopes(relation, arguments(relation, state), "state")
-    return {
-        each.name: abs(slope * state.values[each.name]) for each, slope in zip(relation.variables, found, strict=True)
-    }
+    sizes = sizes or state.values
+    return {each.name: abs(slope * sizes[each.name]) for each, slope in zip(relation.variables, found, strict=True)}

@@ -226,8 +226,8 @@ def test_what_has_no_figure_is_refused(changes: dict[str, Any], refusal: str) ->
             "cylinder_receipt",
             {"gas": "CO2", "pg": "100 bar gauge", "T_gas": "40 °C"},
             (
-                "Carbon dioxide is above its critical point (31 °C and 74 bar): a small change of temperature moves the "
-                "pressure much. Weigh it to be sure."
+                "Carbon dioxide is above its critical point (31 °C and 74 bar): a small change of temperature moves "
+                "the pressure much. Weigh it to be sure."
             ),
         ),
         (

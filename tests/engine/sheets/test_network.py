@@ -194,6 +194,20 @@ def test_a_root_over_many_powers_of_ten(root: float) -> None:
     assert find_root(lambda x: x / root - 1, 1e-15, 1e15, "x") == pytest.approx(root, rel=4e-15)
 
 
+def test_a_root_of_nothing_is_nothing() -> None:
+    # a release of nothing into a mixed room: c = c_0 exp(-q t / V), so G = 0
+    assert find_root(lambda G: 0.01 - G / (1 + G) - math.exp(math.log(0.01)), 1e-15, 1e6, "G") == 0.0
+
+
+def test_no_root_above_zero_is_refused() -> None:
+    with pytest.raises(NoSolutionError) as caught:
+        find_root(lambda x: 1 / x + 1, 1e-15, 1e6, "Time")
+    assert str(caught.value) == (
+        "Time: found no value between 1e-15 and 1e+06 (SI) that agrees with the readings; expected readings that one "
+        "value in that range can explain. Check the readings and their units."
+    )
+
+
 @pytest.mark.parametrize("seed", range(20))
 def test_polynomial_roots_are_those_of_numpy(seed: int) -> None:
     random = np.random.default_rng(seed)
