@@ -52,6 +52,12 @@ def _moved(random: Random, value: float, spread: float) -> float:
     return value * math.exp(random.uniform(-spread, spread)) if value else spread * random.uniform(0, NEAR_ZERO)
 
 
+def _is_readable(relation: Relation, values: dict[str, float]) -> bool:
+    """Say whether every value is one that could be typed: inside the range of its kind."""
+    kinds = ((KINDS[each.kind], values[each.name]) for each in relation.variables)
+    return all(kind.low <= value <= kind.high or value == 0 for kind, value in kinds)
+
+
 def states(relation: Relation, count: int, seed: str) -> Iterator[State]:
     """Yield up to ``count`` states inside the law's validity; the example itself comes first."""
     random = Random(f"{seed} {relation.key}")  # noqa: S311 - the same states each time, no secret
@@ -67,7 +73,7 @@ def states(relation: Relation, count: int, seed: str) -> Iterator[State]:
             warned = check_validity(relation, values, "state")
         except (NoSolutionError, OutsideRangeError):
             continue
-        if warned:
+        if warned or not _is_readable(relation, values):
             continue
         yield State(values, gas)
         found += 1

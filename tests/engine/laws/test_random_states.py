@@ -30,11 +30,15 @@ def test_the_value_comes_back(key: str, unknown: str, full_counts: bool) -> None
     assert looked >= FEWEST
 
 
-def _difference(key: str, state: State, name: str) -> float | None:
-    """Give the fourth-order central difference of the answer by one reading; None where an end leaves the law."""
+def _difference(key: str, state: State, name: str, slope: float) -> float | None:
+    """Give the fourth-order central difference of the answer by one reading; None where an end leaves the law.
+
+    The step moves reading and answer by a share of themselves at most, so that a steep place is looked at closely.
+    """
     relation = finder.relation(key)
     unknown = first_unknown(relation)
-    width = STEP * state.values[name]
+    steepness = abs(slope * state.values[name] / state.values[unknown]) if state.values[unknown] else 1.0
+    width = STEP * state.values[name] / max(1.0, steepness)
     ends = []
     for steps in (-2, -1, 1, 2):
         values = {**state.values, name: state.values[name] + steps * width}
@@ -55,7 +59,7 @@ def test_sensitivities_are_those_of_differences(key: str, full_counts: bool) -> 
         answer = abs(state.values[unknown])
         for name, slope in sensitivities(relation, unknown, state.values, state.gas).items():
             value = state.values[name]
-            expected = _difference(key, state, name) if value else None
+            expected = _difference(key, state, name, slope) if value else None
             if expected is None:
                 continue
             least = FLOOR * answer / abs(value)  # what rounding leaves of a slope that is nothing
