@@ -45,7 +45,9 @@ def test_the_published_figure_turned_round_gives_each_reading_back(case: Case, n
 
     Where the digits of the figure leave the law (a share rounded to nothing), the unrounded answer closes the interval.
     """
-    given = {key: reading_of(case, key).value for key in case.given if key not in (name, "gas")}
+    given: dict[str, float | str] = {
+        key: reading_of(case, key).value for key in case.given if key not in (name, "gas")
+    }
     if "gas" in case.given:
         given["gas"] = case.given["gas"]
     wanted = reading_of(case, name).value
