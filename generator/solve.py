@@ -69,6 +69,11 @@ def solve_relation(relation: Relation) -> SolvedRelation:
     return SolvedRelation(relation=relation, forms=forms, slopes=slopes, uses_gas=_uses_gas(left - right))
 
 
+def solve_for(relation: Relation, unknown: sympy.Symbol) -> Form:
+    """Solve one relation for one of its variables."""
+    return _form(relation, unknown, evaluated(relation.left), evaluated(relation.right))
+
+
 def evaluated(expression: sympy.Expr) -> sympy.Expr:
     """Give an unevaluated expression as sympy would have built it, for algebra."""
     if not expression.args:
@@ -116,6 +121,10 @@ def _isolated(relation: Relation, left: sympy.Expr, right: sympy.Expr, unknown: 
 
 
 def _linear(residual: sympy.Expr, unknown: sympy.Symbol) -> sympy.Expr | None:
+    slope = sympy.diff(residual, unknown)
+    has_open_power = any(not power.exp.is_number for power in residual.atoms(sympy.Pow))
+    if has_open_power and not slope.has(unknown):  # a common denominator would split (p/q)**N and overflow
+        return sympy.factor_terms(-residual.subs(unknown, 0) / slope)
     polynomial = _as_polynomial(residual, unknown)
     if polynomial is None or polynomial.degree() != 1:
         return None

@@ -333,8 +333,8 @@ HEAT_RATIO = Kind(
     high=5.0,
     note="1.40 for nitrogen and air, 1.67 for helium and argon, 1.31 for methane, near 15 °C and 1 bar.",
 )
-SHARE_OF_TIME = Kind(
-    key="mixing_share",
+MIXING = Kind(
+    key="mixing",
     title="mixing factor",
     dimension=dim.NUMBER,
     si="1",
@@ -342,6 +342,44 @@ SHARE_OF_TIME = Kind(
     low=0.1,
     high=1.0,
     note="1 is perfect mixing.",
+)
+CRITICAL = Kind(
+    key="critical_pressure_ratio",
+    title="critical pressure ratio",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=0.1,
+    high=0.607,
+)
+REYNOLDS = Kind(
+    key="reynolds_number",
+    title="Reynolds number",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=1.0,
+    high=1e10,
+)
+ROUGHNESS = Kind(
+    key="relative_roughness",
+    title="relative roughness",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=0.0,
+    high=0.1,
+)
+PRESSURE_CHANGE = Kind(
+    key="pressure_change",
+    title="pressure change",
+    dimension=dim.PRESSURE,
+    si="Pa",
+    reference="difference",
+    units=("mbar", "Pa", "kPa", "bar", "psi", "inH2O", "mmHg"),
+    low=-1e9,
+    high=1e9,
+    note="A difference needs no station pressure.",
 )
 EXPANSION = Kind(
     key="expansion",
@@ -528,7 +566,7 @@ FREQUENCY = Kind(
     title="turns per time",
     dimension=dim.NUMBER / dim.TIME,
     si="1/s",
-    units=("1/s", "1/min"),
+    units=("r/s", "r/min"),
     low=1e-6,
     high=1e6,
 )
@@ -541,6 +579,25 @@ LEAK_RATE = Kind(
     low=1e-15,
     high=1e9,
     note="Pressure times volume per time: it belongs to the temperature it was counted at.",
+)
+LEAK_RATE_EITHER_WAY = Kind(
+    key="leak_rate_either_way",
+    title="leak rate, out or in",
+    dimension=dim.PRESSURE * dim.FLOW,
+    si="Pa·m³/s",
+    units=("mbar·L/s", "Pa·m³/s", "torr·L/s", "atm·cm³/s"),
+    low=-1e9,
+    high=1e9,
+    note="Pressure times volume per time: it belongs to the temperature it was counted at.",
+)
+MOLAR_FLOW_EITHER_WAY = Kind(
+    key="molar_flow_either_way",
+    title="amount per time, out or in",
+    dimension=dim.MOLAR_FLOW,
+    si="mol/s",
+    units=("mol/s", "mol/h", "mmol/s"),
+    low=-1e9,
+    high=1e9,
 )
 PUMP_SPEED = Kind(
     key="pump_speed",

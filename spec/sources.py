@@ -98,9 +98,7 @@ GREENSPAN_1976 = Source(
 NACA_1135 = Source(
     key="naca1135", work="NACA Report 1135, Equations, tables and charts for compressible flow, 1953", note=FROM_MEMORY
 )
-ISO_9300 = Source(
-    key="iso9300", work="ISO 9300:2005, Gas flow by critical flow Venturi nozzles", note=FROM_MEMORY
-)
+ISO_9300 = Source(key="iso9300", work="ISO 9300:2005, Gas flow by critical flow Venturi nozzles", note=FROM_MEMORY)
 COLEBROOK_1939 = Source(
     key="colebrook",
     work="Colebrook, Turbulent flow in pipes, J. Inst. Civ. Eng. 11 (1939) 133",
@@ -125,11 +123,10 @@ KNUDSEN_1909 = Source(
 EN_1779 = Source(
     key="en1779", work="EN 1779:1999, Leak testing, Criteria for method and technique selection", note=FROM_MEMORY
 )
-ANSI_N14_5 = Source(
-    key="ansi_n14_5", work="ANSI N14.5-2014, Leakage tests on packages for shipment", note=FROM_MEMORY
-)
+ANSI_N14_5 = Source(key="ansi_n14_5", work="ANSI N14.5-2014, Leakage tests on packages for shipment", note=FROM_MEMORY)
 ISO_11929 = Source(
-    key="iso11929", work="ISO 11929-1:2019, Characteristic limits: decision threshold, detection limit",
+    key="iso11929",
+    work="ISO 11929-1:2019, Characteristic limits: decision threshold, detection limit",
     note=FROM_MEMORY,
 )
 CROWL_LOUVAR = Source(

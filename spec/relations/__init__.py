@@ -9,6 +9,9 @@ from spec.relations import (
     f_kinetic,
     g_real,
     h_humidity,
+    j_flow,
+    k_leak,
+    l_purging,
     m_vessels,
     r_balances,
 )
@@ -22,6 +25,9 @@ FAMILIES = (
     f_kinetic.FAMILY,
     g_real.FAMILY,
     h_humidity.FAMILY,
+    j_flow.FAMILY,
+    k_leak.FAMILY,
+    l_purging.FAMILY,
     m_vessels.FAMILY,
     r_balances.FAMILY,
 )

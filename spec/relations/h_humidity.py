@@ -237,9 +237,7 @@ with as_printed():
             p: PRESSURE,
         },
         assumes=("ideal gas", "the actual vapour pressure, not that of saturation"),
-        valid=(
-            Validity(holds=e_any <= p, says="The vapour pressure cannot be more than the pressure.", refuse=True),
-        ),
+        valid=(Validity(holds=e_any <= p, says="The vapour pressure cannot be more than the pressure.", refuse=True),),
         source=CFR_1065.at("1065.645(c)"),
         example={"e": "7.20 hPa", "p": "996.4 hPa absolute"},
         words=("water content", "ppm water", "moisture"),

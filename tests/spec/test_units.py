@@ -43,7 +43,7 @@ PINT = {
     "cal (IT)": "international_calorie", "W": "watt", "kW": "kilowatt", "mW": "milliwatt", "MW": "megawatt",
     "hp": "horsepower", "P": "poise", "cP": "centipoise", "µP": "micropoise",
     "1": "dimensionless", "%": "percent", "‰": "permille", "ppm": "ppm", "ppb": "ppm / 1000", "mol %": "percent",
-    "vol %": "percent", "wt %": "percent", "rad": "radian", "°": "degree",
+    "vol %": "percent", "wt %": "percent", "rad": "radian", "r": "count", "°": "degree",
 }
 # Units that pint has not, or has by another definition: they stand in PRINTED or SCIPY below.
 NOT_IN_PINT = {
