@@ -41,7 +41,7 @@ def run_tests(
         return 1
     # The tests' own summary shows the other parts and the time: what follows its closing line would hide it.
     environment = os.environ | {"GASWRIGHT_STARTED": repr(start), "GASWRIGHT_PARTS": "\n".join(map(str, parts))}
-    status = run([sys.executable, "-m", "pytest", "-n", "2", *others], cwd=root, env=environment)
+    status = run([sys.executable, "-m", "pytest", "-n", "2", "--dist", "worksteal", *others], cwd=root, env=environment)
     return int(status != 0 or any(part.status for part in parts))
 
 

@@ -75,7 +75,8 @@ NEIGHBOUR_FILES = (
 )
 ASK_NEIGHBOUR = """base => {
   const add = (tag, properties) => document.body.append(Object.assign(document.createElement(tag), properties));
-  const run = source => new Worker(URL.createObjectURL(new Blob([source], {type: "text/javascript"})));
+  const kept = window.kept = [];  // a worker that nothing holds may be collected before it has asked
+  const run = source => kept.push(new Worker(URL.createObjectURL(new Blob([source], {type: "text/javascript"}))));
   const fetching = name => `fetch("${base}${name}", {mode: "no-cors"});`;
   add("img", {src: `${base}picture.png`});
   add("link", {rel: "stylesheet", href: `${base}style.css`});
@@ -84,7 +85,8 @@ ASK_NEIGHBOUR = """base => {
   fetch(`${base}fetched.txt`, {mode: "no-cors"});
   run(`importScripts("${base}imported.js");`);
   run(fetching("worker-fetched.txt"));
-  run(`new Worker(URL.createObjectURL(new Blob(['${fetching("nested-fetched.txt")}'], {type: "text/javascript"})));`);
+  const nested = `new Blob(['${fetching("nested-fetched.txt")}'], {type: "text/javascript"})`;
+  run(`self.kept = new Worker(URL.createObjectURL(${nested}));`);
   const socket = base.replace("http", "ws");
   new WebSocket(`${socket}socket`);
   run(`new WebSocket("${socket}worker-socket");`);
