@@ -4,6 +4,7 @@ Takes ``Loaded``; gives ``Checked``, which only this stage makes. Every mistake 
 together as one ExceptionGroup. Next: generator.solve.
 """
 
+import re
 from collections import Counter
 from collections.abc import Iterator, Mapping
 from dataclasses import dataclass
@@ -17,6 +18,7 @@ from spec.dimensions import Dimension
 from spec.model import Constant, GasName, Nature, Relation, Variable
 
 WITHOUT_CASE = (Nature.BALANCE, Nature.DEFINITION, Nature.PROPERTY)
+LIST_TERM = re.compile(r"(_i)_\d+$")
 BASES = ("published", "published, digits from memory", "library", "common practice, no source")
 
 
@@ -154,7 +156,8 @@ def _cases(loaded: Loaded) -> Iterator[SpecError]:
             for symbol, meaning in relations[case.relation].where.items()
             if not isinstance(meaning, Constant)
         }
-        for name in [name for name in (*case.given, case.find) if name not in names]:
+        asked = (LIST_TERM.sub(r"\1", name) for name in (*case.given, case.find))
+        for name in [name for name in asked if name not in names]:
             yield SpecError(
                 where=case.name,
                 found=f"the variable {name}",

@@ -20,9 +20,11 @@ from generator.emit_engine import form_text, relation_python
 from generator.errors import SpecError
 from generator.printers import TextWriter, equation_mathml, latex, mathml, symbol_latex, symbol_text
 from generator.solve import Form, SolvedRelation, Way, order_of, solve_relation
+from generator.terms import slope_by_own, slope_by_term
 from spec.model import Relation
+from spec.symbols import is_list
 
-STAGES = ("arrange", "check", "describe", "emit_engine", "isolate", "printers", "prove", "solve")
+STAGES = ("arrange", "check", "describe", "emit_engine", "isolate", "printers", "prove", "solve", "terms")
 HERE = Path(__file__).parent
 
 
@@ -113,7 +115,11 @@ def _sensitivities(relation: Relation, form: Form) -> tuple[tuple[str, str], ...
     expression = sympy.sympify(form.expression)
     found = []
     for symbol in [symbol for symbol in variables_of(relation) if expression.has(symbol)]:
-        slope = arrange(sympy.factor_terms(sympy.diff(expression.doit(), symbol)), order_of(relation))
+        plain = expression.doit()
+        moved = slope_by_own(plain, symbol) + (slope_by_term(plain, symbol) if is_list(symbol) else 0)
+        if moved == 0:  # a list that stands only in the sum over the other terms
+            continue
+        slope = arrange(sympy.factor_terms(moved), order_of(relation))
         label = f"∂{symbol_text(form.unknown.name)}/∂{symbol_text(symbol.name)}"
         found.append((label, TextWriter().write(slope)))
     return tuple(found)

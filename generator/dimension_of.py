@@ -12,7 +12,7 @@ import sympy
 from generator.errors import SpecError
 from generator.printers import TextWriter
 from spec.dimensions import NUMBER, Dimension
-from spec.symbols import GAS_FUNCTIONS
+from spec.symbols import GAS_FUNCTIONS, Others, Total
 
 Meaning = Mapping[sympy.Symbol, Dimension]
 
@@ -66,6 +66,8 @@ def _of_power(expression: sympy.Pow, meaning: Meaning, where: str) -> Dimension:
 
 
 def _of_call(expression: sympy.Expr, meaning: Meaning, where: str) -> Dimension:
+    if isinstance(expression, (Total, Others)):
+        return dimension_of(expression.args[0], meaning, where)
     name = expression.func.__name__
     if name not in GAS_FUNCTIONS:
         for argument in expression.args:

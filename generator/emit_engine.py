@@ -11,9 +11,12 @@ from textwrap import wrap
 import sympy
 
 from generator.check import constants_of, variables_of
+from generator.parameters import OWN, Parameter, form_parameters, terms_name, whole_parameters
 from generator.printers import PythonWriter, TextWriter, symbol_text
 from generator.solve import Form, SolvedRelation, Way, evaluated
+from generator.terms import is_per_term, lists_of, own_symbol
 from spec.model import Constant, Family, Relation, Sign, Validity, Variable
+from spec.symbols import is_list
 
 MATH_NAMES = ("pow", "sqrt", "log", "exp", "sin", "cos", "asin", "erf", "pi")
 SIGNS = {Sign.POSITIVE: "positive", Sign.NONNEGATIVE: "nonnegative", Sign.ANY: "any"}
@@ -46,6 +49,8 @@ def _family(family: Family, python: Mapping[str, str]) -> str:
     names = [name for name in MATH_NAMES if _is_used(name, body)]
     if names:
         head += [f"from math import {', '.join(names)}", ""]
+    if "Sequence[" in body:
+        head += ["from collections.abc import Sequence", ""]
     uses_gas = '"Gas"' in body
     if uses_gas:
         head += ["from typing import TYPE_CHECKING", ""]
@@ -74,8 +79,8 @@ def relation_python(solved: SolvedRelation, family_key: str) -> str:
     return "\n\n\n".join([*functions, _value(solved, family_key)])
 
 
-def _parameters(arguments: tuple[sympy.Symbol, ...], *, is_gas: bool) -> str:
-    names = [f"{symbol.name}: float" for symbol in arguments]
+def _signature(parameters: tuple[Parameter, ...], *, is_gas: bool) -> str:
+    names = [f"{parameter.name}: {parameter.annotation}" for parameter in parameters]
     return ", ".join([*names, 'gas: "Gas"'] if is_gas else names)
 
 
@@ -89,9 +94,10 @@ def _form(solved: SolvedRelation, form: Form) -> str:
     relation = solved.relation
     variable = variables_of(relation)[form.unknown]
     name = f"{relation.key}_{form.unknown.name}"
+    parameters = form_parameters(relation, form.unknown, _expressions(relation, form))
     lines = [
-        f"def {name}({_parameters(form.arguments, is_gas=_needs_gas(form))}) -> float:",
-        *_docstring(relation, form, variable),
+        f"def {name}({_signature(parameters, is_gas=_needs_gas(form))}) -> float:",
+        *_docstring(relation, form, variable, parameters),
         *_constants(relation, _expressions(relation, form)),
         *_body(relation, form),
     ]
@@ -106,12 +112,16 @@ def _expressions(relation: Relation, form: Form) -> tuple[sympy.Expr, ...]:
     return form.coefficients or (form.expression,)
 
 
-def _docstring(relation: Relation, form: Form, variable: Variable) -> Iterator[str]:
+WHICH = {"": "", "terms": " of every term", "others": " of each other term"}
+
+
+def _docstring(relation: Relation, form: Form, variable: Variable, parameters: tuple[Parameter, ...]) -> Iterator[str]:
     yield f'    """Give the {variable.text} [{variable.kind.si}]: {form.way.value}.'
     yield ""
-    for symbol in form.arguments:
-        other = variables_of(relation)[symbol]
-        yield f"    {symbol.name}: {other.text} [{other.kind.si}], {other.sign.value}."
+    for parameter in parameters:
+        other = variables_of(relation)[parameter.symbol]
+        which = WHICH[parameter.terms]
+        yield f"    {parameter.name}: {other.text}{which} [{other.kind.si}], {other.sign.value}."
     for line in wrap(f"Assumes {'; '.join(relation.assumes)}. Source: {relation.source}.", WIDTH - 4):
         yield f"    {line}"
     yield '    """'
@@ -142,15 +152,28 @@ def _body(relation: Relation, form: Form) -> Iterator[str]:
         yield f"    return find_root(residual, {low!r}, {high!r}, {where!r})"
 
 
+def _whole(solved: SolvedRelation) -> tuple[Parameter, ...]:
+    relation = solved.relation
+    return whole_parameters(variables_of(relation), is_per_term=is_per_term(relation))
+
+
+def _own_terms(relation: Relation, *, is_named_own: bool = False) -> Iterator[str]:
+    """Take the term in question out of each list, where the relation speaks of one."""
+    if is_per_term(relation):
+        for symbol in lists_of(relation):
+            name = own_symbol(symbol).name if is_named_own else symbol.name
+            yield f"    {name} = {terms_name(symbol)}[{OWN}]"
+
+
 def _residual(solved: SolvedRelation) -> str:
     relation = solved.relation
-    variables = tuple(variables_of(relation))
     write = PythonWriter().write
     return "\n".join(
         [
-            f"def {relation.key}_residual({_parameters(variables, is_gas=solved.uses_gas)}) -> float:",
+            f"def {relation.key}_residual({_signature(_whole(solved), is_gas=solved.uses_gas)}) -> float:",
             '    """Give left - right of the relation, in SI."""',
             *_constants(relation, (relation.left, relation.right)),
+            *_own_terms(relation),
             f"    return {write(relation.left)} - ({write(relation.right)})",
         ]
     )
@@ -159,21 +182,43 @@ def _residual(solved: SolvedRelation) -> str:
 def _slopes(solved: SolvedRelation) -> str:
     relation = solved.relation
     variables = tuple(variables_of(relation))
-    write = PythonWriter().write
-    slopes = [solved.slopes[symbol.name] for symbol in variables]
-    lines = [f"        {write(slope)}," for slope in slopes]
     names = ", ".join(symbol.name for symbol in variables)
-    annotation = f"tuple[{', '.join(['float'] * len(variables))}]"
+    types = ["list[float]" if is_list(symbol) else "float" for symbol in variables]
+    signature = _signature(_whole(solved), is_gas=solved.uses_gas)
     return "\n".join(
         [
-            f"def {relation.key}_slopes({_parameters(variables, is_gas=solved.uses_gas)}) -> {annotation}:",
+            f"def {relation.key}_slopes({signature}) -> tuple[{', '.join(types)}]:",
             f'    """Give the partial derivatives of left - right by {names}."""',
-            *_constants(relation, tuple(slopes)),
+            *_constants(relation, (*solved.slopes.values(), *solved.own_slopes.values())),
+            *_own_terms(relation, is_named_own=True),
+            *_own_slopes(solved),
             "    return (",
-            *lines,
+            *(f"        {_slope(solved, symbol)}," for symbol in variables),
             "    )",
         ]
     )
+
+
+def _own_slopes(solved: SolvedRelation) -> Iterator[str]:
+    """Add to each list's slopes what the term in question does outside the sums."""
+    write = PythonWriter().write
+    for name, slope in solved.own_slopes.items():
+        symbol = sympy.Symbol(name)
+        yield f"    {terms_name(symbol, 'slopes')}: list[float] = {_each_slope(solved, name)}"
+        yield f"    {terms_name(symbol, 'slopes')}[{OWN}] += {write(slope)}"
+
+
+def _slope(solved: SolvedRelation, symbol: sympy.Symbol) -> str:
+    if symbol.name in solved.own_slopes:
+        return terms_name(symbol, "slopes")
+    return _each_slope(solved, symbol.name) if is_list(symbol) else PythonWriter().write(solved.slopes[symbol.name])
+
+
+def _each_slope(solved: SolvedRelation, name: str) -> str:
+    """Give the slopes by every term of a list: one expression, at each term's own values."""
+    slope = solved.slopes[name]
+    lists = [symbol for symbol in lists_of(solved.relation) if slope.has(symbol) or symbol.name == name]
+    return PythonWriter().each(slope, lists)
 
 
 def _validity_arguments(relation: Relation, validity: Validity) -> list[sympy.Symbol]:
@@ -181,7 +226,7 @@ def _validity_arguments(relation: Relation, validity: Validity) -> list[sympy.Sy
 
 
 def _validity_function(relation: Relation, place: int, validity: Validity) -> str:
-    names = ", ".join(f"{symbol.name}: float" for symbol in _validity_arguments(relation, validity))
+    names = _signature(whole_parameters(_validity_arguments(relation, validity), is_per_term=False), is_gas=False)
     write = PythonWriter().write
     sides = f"{write(evaluated(validity.holds.lhs))} {validity.holds.rel_op} {write(evaluated(validity.holds.rhs))}"
     return "\n".join(
@@ -231,9 +276,19 @@ def _value(solved: SolvedRelation, family_key: str) -> str:
             f"    source={str(relation.source)!r},",
             f"    example={dict(relation.example)!r},",
             f"    uses_gas={solved.uses_gas},",
+            *_list_fields(relation),
             ")",
         ]
     )
+
+
+def _list_fields(relation: Relation) -> Iterator[str]:
+    """Give the fields that only a relation over lists has."""
+    if lists_of(relation):
+        yield f"    lists={tuple(symbol.name for symbol in lists_of(relation))!r},"
+        yield f"    is_per_term={is_per_term(relation)},"
+    if relation.turned:
+        yield f"    turned={ {symbol.name: key for symbol, key in relation.turned.items()}!r},"
 
 
 def _variable(symbol: sympy.Symbol, meaning: Variable) -> str:
@@ -248,7 +303,8 @@ def _constant(symbol: sympy.Symbol, meaning: Constant) -> str:
 
 
 def _form_value(relation: Relation, form: Form) -> str:
-    names = tuple(symbol.name for symbol in form.arguments) + (("gas",) if _needs_gas(form) else ())
+    parameters = form_parameters(relation, form.unknown, _expressions(relation, form))
+    names = tuple(parameter.name for parameter in parameters) + (("gas",) if _needs_gas(form) else ())
     line = form_text(relation, form)
     name = form.unknown.name
     return f"        {name!r}: Form({name!r}, {relation.key}_{name}, {names!r}, {line!r}, {form.way.value!r}),"

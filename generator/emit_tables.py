@@ -59,7 +59,9 @@ def spellings(units: Iterable[Unit]) -> dict[str, str]:
             owner = found.setdefault(word, unit.key)
             if owner != unit.key:
                 raise SpecError(
-                    f"spec.units, {unit.key}", f"the spelling {word!r}, which {owner} has", "one unit for one spelling",
+                    f"spec.units, {unit.key}",
+                    f"the spelling {word!r}, which {owner} has",
+                    "one unit for one spelling",
                     "Take it from one of them, or ask about it in spec.unit_words.",
                 )
     return found

@@ -3,6 +3,9 @@
 Takes a relation, its texts and its cases; gives its RelationView. Next: generator.make_views.
 """
 
+import re
+from dataclasses import replace
+
 from gaswright.answer_law import answer_relation
 from gaswright.find import relation as find_law
 from gaswright.gas import find as find_gas
@@ -18,6 +21,7 @@ from generator.describe import FormText, RelationText
 from generator.load import Case
 from generator.printers import mathml, symbol_latex, symbol_text
 from generator.row_views import REFERENCES, may_be_negative, split, units_of
+from generator.terms import expand, lists_of
 from generator.views import CheckView, FormView, RelationView, RowView
 from spec import scenario
 from spec.kinds import STATION_PRESSURE
@@ -35,9 +39,10 @@ def law_view(
     cases: tuple[Case, ...],
     used_by: tuple[tuple[str, str], ...],
 ) -> RelationView:
-    """Give the view of one law."""
-    rows = _rows(relation)
-    find = _found(relation)
+    """Give the view of one law; one over lists is shown with the terms of its example."""
+    plain = shown(relation)
+    rows = _rows(plain)
+    find = _found(plain)
     request = {
         "do": "relation",
         "key": relation.key,
@@ -62,6 +67,8 @@ def law_view(
             for constant in constants_of(relation).values()
         ),
         find=find,
+        finds=tuple(row.name for row in rows if may_be_found(relation, row.name)),
+        is_over_lists=bool(lists_of(relation)),
         forms=tuple(_form(relation, form) for form in text.forms),
         checks=tuple(map(_check, cases)),
         answer=answer_relation(request),
@@ -69,6 +76,25 @@ def law_view(
         used_by=used_by,
         words=relation.words,
     )
+
+
+def shown(relation: Relation) -> Relation:
+    """Give the relation with its lists written out for the terms of its example."""
+    lists = lists_of(relation)
+    if not lists:
+        return relation
+    entries = {name: typed for name, typed in relation.example.items() if not isinstance(typed, str)}
+    count = max(map(len, entries.values()))
+    example = {name: typed for name, typed in relation.example.items() if isinstance(typed, str)}
+    for name, typed in entries.items():
+        example |= {f"{name}_{place}": text for place, text in enumerate(typed, 1) if text}
+    return replace(expand(relation, count, every=True), example=example)
+
+
+def may_be_found(relation: Relation, name: str) -> bool:
+    """Tell whether a row may be asked for."""
+    names = {symbol.name for symbol in variables_of(relation) if symbol not in relation.turned}
+    return re.sub(r"(_i)_\d+$", r"\1", name) in names
 
 
 def _found(relation: Relation) -> str:
@@ -85,7 +111,7 @@ def _rows(relation: Relation) -> tuple[RowView, ...]:
     rows = [_row(symbol.name, variable, relation, found) for symbol, variable in variables_of(relation).items()]
     if any(isinstance(meaning, GasName) for meaning in relation.where.values()):
         choices = tuple((key, f"{find_gas(key).title}, {find_gas(key).formula}") for key in gas_keys())
-        rows.insert(0, RowView(name="gas", title="Gas", is_gas=True, text=relation.example["gas"], choices=choices))
+        rows.insert(0, RowView(name="gas", title="Gas", is_gas=True, text=_typed(relation, "gas"), choices=choices))
     kinds = {variable.kind.key for variable in variables_of(relation).values()}
     if kinds & set(COUNTED) and "station_pressure" not in kinds:
         typed = split(scenario.STATION_PRESSURE, STATION_PRESSURE)
@@ -108,7 +134,7 @@ def _rows(relation: Relation) -> tuple[RowView, ...]:
 
 def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowView:
     default = "" if variable.default is None else f"{float(variable.default):g}"
-    typed = split(relation.example.get(name, default), variable.kind)
+    typed = split(_typed(relation, name, default), variable.kind)
     unit = typed.unit if name in relation.example else _like(relation, variable) or typed.unit
     return RowView(
         name=name,
@@ -124,7 +150,14 @@ def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowVi
         is_found=name == found,
         may_be_negative=variable.sign is Sign.ANY or may_be_negative(variable.kind),
         is_optional=variable.default is not None,
+        term=int(place) if (place := name.rpartition("_i_")[2]).isdigit() and "_i_" in name else 0,
     )
+
+
+def _typed(relation: Relation, name: str, default: str = "") -> str:
+    """Give the example's reading of one row."""
+    typed = relation.example.get(name, default)
+    return typed if isinstance(typed, str) else default
 
 
 def _like(relation: Relation, variable: Variable) -> str:
@@ -135,7 +168,7 @@ def _like(relation: Relation, variable: Variable) -> str:
         if other.kind == variable.kind and symbol.name in relation.example
     )
     name = next(same, "")
-    return split(relation.example[name], variable.kind).unit if name else ""
+    return split(_typed(relation, name), variable.kind).unit if name else ""
 
 
 def _form(relation: Relation, form: FormText) -> FormView:

@@ -85,4 +85,22 @@ def _case(entry: dict[str, Any], place: str) -> Case:
             expected=f"the keys {', '.join(REQUIRED)} and perhaps {', '.join(OPTIONAL)}",
             todo="correct the entry",
         )
-    return Case(name=place, **entry)
+    return Case(name=place, **_written_out(entry, place))
+
+
+def _written_out(entry: dict[str, Any], place: str) -> dict[str, Any]:
+    """Write lists of readings out as one for each term; an empty text marks the terms that are not given."""
+    given: dict[str, str] = {}
+    find = entry["find"]
+    for name, typed in entry["given"].items():
+        entries = {f"{name}_{place}": text for place, text in enumerate(typed, 1)} if isinstance(typed, list) else {}
+        if name == find and "" not in typed:
+            raise SpecError(
+                where=place,
+                found=f"the list {find} to find, with every term given",
+                expected="one term left empty",
+                todo='put "" in the place of the term to find',
+            )
+        find = next((key for key, text in entries.items() if name == entry["find"] and not text), find)
+        given |= {key: text for key, text in entries.items() if text} if entries else {name: typed}
+    return entry | {"given": given, "find": find}

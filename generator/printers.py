@@ -6,14 +6,14 @@ Next: generator.emit_engine and generator.make_views.
 """
 
 import re
-from collections.abc import Mapping
+from collections.abc import Mapping, Sequence
 
 import sympy
 from latex2mathml.converter import convert
 
 from generator.arrange import flatten
 from generator.errors import SpecError
-from spec.symbols import GAS_FUNCTIONS
+from spec.symbols import GAS_FUNCTIONS, Others, Total, is_list
 
 SUM, PRODUCT, SIGN, POWER, ATOM = range(5)
 FUNCTIONS = {"log": "log", "exp": "exp", "sin": "sin", "cos": "cos", "asin": "asin", "erf": "erf"}
@@ -34,7 +34,9 @@ GREEK = {
     "eps": "ε",
     "pi": "π",
 }
+TERMS = {Total: "terms", Others: "others"}
 LATEX = {"lam": r"\lambda", "eps": r"\varepsilon"}
+TERM = re.compile(r"_i_(\d+)$")
 LOW_DIGITS = str.maketrans("0123456789", "₀₁₂₃₄₅₆₇₈₉")
 DIGITS = str.maketrans("0123456789+-/", "⁰¹²³⁴⁵⁶⁷⁸⁹⁺⁻ᐟ")
 
@@ -184,9 +186,22 @@ class PythonWriter(LineWriter):
             )
         return super().call(FUNCTIONS[name], arguments)
 
+    def each(self, expression: sympy.Expr, lists: Sequence[sympy.Symbol], ending: str = "terms") -> str:
+        """Give a list: the expression at every term of ``lists``."""
+        return f"[{self._over(expression, lists, ending)}]"
+
+    def _over(self, expression: sympy.Expr, lists: Sequence[sympy.Symbol], ending: str) -> str:
+        names = [symbol.name for symbol in lists]
+        whole = [f"{name.removesuffix('_i')}_{ending}" for name in names]
+        source = whole[0] if len(whole) == 1 else f"zip({', '.join(whole)}, strict=True)"
+        return f"{self.write(expression)} for {', '.join(names)} in {source}"
+
     def _call(self, expression: sympy.Expr) -> str:
         if isinstance(expression, sympy.Derivative):
             return self._slope(expression)
+        if isinstance(expression, (Total, Others)):
+            lists = sorted((symbol for symbol in expression.free_symbols if is_list(symbol)), key=str)
+            return f"sum({self._over(expression.args[0], lists, TERMS[type(expression)])})"
         return super()._call(expression)
 
     def _slope(self, expression: sympy.Derivative) -> str:
@@ -230,7 +245,7 @@ class TextWriter(LineWriter):
 
     def call(self, name: str, arguments: list[str]) -> str:
         """Give a call, with ln for the natural logarithm and the gas model's functions by their symbols."""
-        word = {"log": "ln", "rho_gas": "ρ"}.get(name, name)
+        word = {"log": "ln", "rho_gas": "ρ", "Total": "Σ", "Others": "Σ′"}.get(name, name)
         return f"{word}({', '.join(arguments)})"
 
     def write(self, expression: sympy.Expr) -> str:
@@ -240,7 +255,7 @@ class TextWriter(LineWriter):
 
 def symbol_text(name: str) -> str:
     """Give a symbol's name with its Greek letter and digits set low: ``rho_0`` becomes ``ρ₀``."""
-    head, _, tail = name.partition("_")
+    head, _, tail = TERM.sub(r"_\1", name).partition("_")
     if head.startswith("d") and len(head) > 1 and head[1:] in ("p", "T", "p2"):
         head = "Δ" + head[1:]
     low = tail.translate(LOW_DIGITS) if tail.isdigit() else f"_{tail}"
@@ -249,7 +264,7 @@ def symbol_text(name: str) -> str:
 
 def symbol_latex(name: str) -> str:
     """Give a symbol in LaTeX: letters alone in italics, long subscripts upright."""
-    head, _, tail = name.partition("_")
+    head, _, tail = TERM.sub(r"_\1", name).partition("_")
     if head.startswith("d") and len(head) > 1:
         body = r"\Delta " + head[1:]
     elif head in GREEK:

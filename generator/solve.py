@@ -16,8 +16,20 @@ from generator.check import variables_of
 from generator.errors import SpecError
 from generator.isolate import isolate, peel
 from generator.prove import is_monotonic, prove_closed
+from generator.terms import (
+    PROVEN_TERMS,
+    expand,
+    is_per_term,
+    lists_of,
+    name_own,
+    single_out,
+    slope_by_own,
+    slope_by_term,
+    term,
+    write_out,
+)
 from spec.model import Nature, Relation, Root
-from spec.symbols import GAS_FUNCTIONS
+from spec.symbols import GAS_FUNCTIONS, is_list
 
 
 class Way(Enum):
@@ -50,11 +62,16 @@ class Form:
 
 @dataclass(frozen=True, slots=True, kw_only=True)
 class SolvedRelation:
-    """A relation with a form for every unknown and the slopes of its residual ``left - right``."""
+    """A relation with a form for every unknown and the slopes of its residual ``left - right``.
+
+    The slope by a list is that by one term through the sums; ``own_slopes`` add what the term in question does outside
+    them, where the relation speaks of one.
+    """
 
     relation: Relation
     forms: Mapping[str, Form]
     slopes: Mapping[str, sympy.Expr]
+    own_slopes: Mapping[str, sympy.Expr]
     uses_gas: bool
 
 
@@ -62,11 +79,19 @@ def solve_relation(relation: Relation) -> SolvedRelation:
     """Solve one relation for each of its variables."""
     variables = variables_of(relation)
     left, right = evaluated(relation.left), evaluated(relation.right)
-    unknowns = variables if relation.nature not in (Nature.DECISION, Nature.FIT) else [relation.left]
+    solved = [symbol for symbol in variables if symbol not in relation.turned]
+    unknowns = solved if relation.nature not in (Nature.DECISION, Nature.FIT) else [relation.left]
     forms = {symbol.name: _form(relation, symbol, left, right) for symbol in unknowns}
     order = order_of(relation)
-    slopes = {symbol.name: arrange(sympy.diff(left - right, symbol), order) for symbol in variables}
-    return SolvedRelation(relation=relation, forms=forms, slopes=slopes, uses_gas=_uses_gas(left - right))
+    slopes = {symbol.name: arrange(_slope(left - right, symbol), order) for symbol in variables}
+    own = {symbol.name: arrange(name_own(slope_by_own(left - right, symbol)), order) for symbol in lists_of(relation)}
+    return SolvedRelation(
+        relation=relation,
+        forms=forms,
+        slopes=slopes,
+        own_slopes=own if is_per_term(relation) else {},
+        uses_gas=_uses_gas(left - right),
+    )
 
 
 def solve_for(relation: Relation, unknown: sympy.Symbol) -> Form:
@@ -79,6 +104,11 @@ def evaluated(expression: sympy.Expr) -> sympy.Expr:
     if not expression.args:
         return expression
     return expression.func(*(evaluated(argument) for argument in expression.args))
+
+
+def _slope(residual: sympy.Expr, symbol: sympy.Symbol) -> sympy.Expr:
+    """Differentiate by a variable; by a list, differentiate by one term of it."""
+    return slope_by_term(residual, symbol) if is_list(symbol) else slope_by_own(residual, symbol)
 
 
 def order_of(relation: Relation) -> Mapping[sympy.Symbol, int]:
@@ -97,10 +127,33 @@ def _form(relation: Relation, unknown: sympy.Symbol, left: sympy.Expr, right: sy
         return inverse
     closed = _textbook(relation, unknown) or _isolated(relation, left, right, unknown)
     if closed is not None:
-        proof = prove_closed(relation, unknown, closed, left - right)
+        proof = _proof(relation, unknown, closed, left - right)
         return Form(unknown=unknown, way=Way.CLOSED, arguments=arguments, expression=closed, proof=proof)
+    if lists_of(relation):
+        raise _no_closed_form(relation, unknown)
     return _polynomial(relation, unknown, left - right, arguments) or _numeric(
         relation, unknown, left - right, arguments
+    )
+
+
+def _proof(relation: Relation, unknown: sympy.Symbol, form: sympy.Expr, residual: sympy.Expr) -> str:
+    """Prove a closed form; one over lists is proven written out for a few terms."""
+    lists = lists_of(relation)
+    if not lists:
+        return prove_closed(relation, unknown, form, residual)
+    plain = expand(relation, PROVEN_TERMS)
+    own = term(unknown, 1) if is_list(unknown) else unknown
+    residual = evaluated(plain.left) - evaluated(plain.right)
+    said = prove_closed(plain, own, write_out(form.doit(), lists, PROVEN_TERMS), residual)
+    return f"{said} (written out for {PROVEN_TERMS} terms)"
+
+
+def _no_closed_form(relation: Relation, unknown: sympy.Symbol) -> SpecError:
+    return SpecError(
+        where=f"relation {relation.key}, unknown {unknown}",
+        found="no closed form",
+        expected="a closed form, because the relation is over lists",
+        todo="write the equation so that the term stands once, or leave the sum out of it",
     )
 
 
@@ -113,11 +166,13 @@ def _textbook(relation: Relation, unknown: sympy.Symbol) -> sympy.Expr | None:
 
 
 def _isolated(relation: Relation, left: sympy.Expr, right: sympy.Expr, unknown: sympy.Symbol) -> sympy.Expr | None:
+    parted = single_out(left, right, unknown)
+    left, right = parted.left, parted.right
     found = isolate(left, right, unknown)
     if found is None:
         inside, outside = peel(left, right, unknown)
         found = _linear(left - right, unknown) or _linear(inside - outside, unknown)
-    return None if found is None else arrange(found, order_of(relation))
+    return None if found is None else arrange(found.xreplace(parted.rests), order_of(relation))
 
 
 def _linear(residual: sympy.Expr, unknown: sympy.Symbol) -> sympy.Expr | None:

@@ -35,6 +35,7 @@ class RowView:
     is_text: bool = False
     is_optional: bool = False
     choices: tuple[tuple[str, str], ...] = ()
+    term: int = 0
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -78,6 +79,8 @@ class RelationView:
     rows: tuple[RowView, ...]
     constants: tuple[tuple[str, str, str], ...]
     find: str
+    finds: tuple[str, ...] = ()
+    is_over_lists: bool = False
     forms: tuple[FormView, ...]
     checks: tuple[CheckView, ...]
     answer: Mapping[str, Any]

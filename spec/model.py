@@ -156,7 +156,8 @@ class Relation:
 
     ``source`` may only be missing until generator.check has asked for it. ``where`` maps each symbol to its meaning
     in textbook order, which labels, signatures and printing follow. ``example`` holds typed readings of the invented
-    demo scenario; the unknown that is left out is the one found.
+    demo scenario; the unknown that is left out is the one found. A symbol whose name ends in ``_i`` is a list of any
+    length; ``turned`` names the relation that gives such a list back whole.
     """
 
     key: str
@@ -165,12 +166,13 @@ class Relation:
     right: sympy.Expr
     where: Mapping[sympy.Symbol, Variable | Constant | GasName]
     assumes: tuple[str, ...]
-    example: Mapping[str, str]
+    example: Mapping[str, str | tuple[str, ...]]
     source: Citation | None = None
     valid: tuple[Validity, ...] = ()
     branches: tuple[Branch, ...] = ()
     nature: Nature = Nature.LAW
     words: tuple[str, ...] = ()
+    turned: Mapping[sympy.Symbol, str] = MappingProxyType({})
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)

@@ -65,6 +65,18 @@ EPA_METHOD_4 = Source(key="epa4", work="40 CFR 60 appendix A-3, Method 4, Moistu
 EPA_METHOD_5 = Source(key="epa5", work="40 CFR 60 appendix A-3, Method 5, Particulate matter from stationary sources")
 EPA_METHOD_2 = Source(key="epa2", work="40 CFR 60 appendix A-1, Method 2, Stack gas velocity and volumetric flow rate")
 EPA_METHOD_19 = Source(key="epa19", work="40 CFR 60 appendix A-7, Method 19", note=FROM_MEMORY)
+EPA_METHOD_3 = Source(
+    key="epa3", work="40 CFR 60 appendix A-2, Method 3, Gas analysis for dry molecular weight", note=FROM_MEMORY
+)
+AMAGAT_1880 = Source(key="amagat", work="Amagat, Ann. Chim. Phys. 19 (1880) 384", note=FROM_MEMORY)
+ISO_14912 = Source(
+    key="iso14912", work="ISO 14912:2003, Gas analysis, Conversion of gas mixture composition data", note=FROM_MEMORY
+)
+ISO_6142_1 = Source(
+    key="iso6142",
+    work="ISO 6142-1:2015, Gas analysis, Preparation of calibration gas mixtures, gravimetric method",
+    note=FROM_MEMORY,
+)
 DALTON_1801 = Source(
     key="dalton",
     work="Dalton, Experimental essays on the constitution of mixed gases, Mem. Manchester Lit. Phil. Soc. 5 (1802) 535",

@@ -5,6 +5,7 @@ Takes names; gives sympy symbols and functions. Next: the family files write the
 
 from contextlib import AbstractContextManager
 from dataclasses import dataclass
+from typing import Any
 
 import sympy
 
@@ -31,6 +32,48 @@ def nonnegative(names: str) -> tuple[sympy.Symbol, ...]:
 def real(names: str) -> tuple[sympy.Symbol, ...]:
     """Give one symbol of any sign for each name."""
     return tuple(sympy.Symbol(name, real=True) for name in names.split())
+
+
+class Total(sympy.Function):  # type: ignore[misc]  # sympy leaves it untyped
+    """The sum of an expression over all terms of the lists in it, whose names end in ``_i``."""
+
+    nargs = 1
+    is_real = True
+
+    def _eval_is_positive(self) -> bool | None:
+        positive: bool | None = self.args[0].is_positive
+        return positive
+
+    def _eval_is_nonnegative(self) -> bool | None:
+        nonnegative: bool | None = self.args[0].is_nonnegative
+        return nonnegative
+
+    def _latex(self, printer: Any) -> str:
+        return rf"\sum_{{i}} {_term_latex(self, printer)}"
+
+
+class Others(sympy.Function):  # type: ignore[misc]  # sympy leaves it untyped
+    """The sum over all terms but the one in question; solving for a term brings it in, the spec never writes it."""
+
+    nargs = 1
+    is_real = True
+
+    def _eval_is_nonnegative(self) -> bool | None:
+        nonnegative: bool | None = self.args[0].is_nonnegative
+        return nonnegative
+
+    def _latex(self, printer: Any) -> str:
+        return rf"\sum_{{\mathrm{{others}}}} {_term_latex(self, printer)}"
+
+
+def _term_latex(total: sympy.Expr, printer: Any) -> str:
+    text = printer.doprint(total.args[0])
+    return rf"\left({text}\right)" if isinstance(total.args[0], sympy.Add) else str(text)
+
+
+def is_list(symbol: sympy.Symbol) -> bool:
+    """Tell whether a symbol stands for a list of any length."""
+    return bool(symbol.name.endswith("_i"))
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)

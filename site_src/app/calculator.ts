@@ -181,6 +181,13 @@ export class Calculator {
     row.showWhere();
   }
 
+  /** Rows have come or gone: asks again. */
+  refresh(): void {
+    this.#sort();
+    this.askSoon();
+    this.onChange(undefined);
+  }
+
   /** Readings in the order of the sheet, the row to find at the foot. */
   #sort(): void {
     const sorted = [...this.rows].sort((one, two) => Number(one.isFound) - Number(two.isFound) || one.order - two.order);

@@ -3,6 +3,7 @@
 
 import { Calculator } from "./calculator";
 import { find } from "./dom";
+import { startTerms } from "./terms";
 
 /** The page stays as drawn, with its worked example, until something is typed or chosen. */
 export function startLaw(section: HTMLElement): void {
@@ -15,4 +16,5 @@ export function startLaw(section: HTMLElement): void {
   calculator.onChange = () => {
     isTouched = true;
   };
+  startTerms(section, calculator);
 }

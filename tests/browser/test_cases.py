@@ -82,11 +82,23 @@ def wait_figure(page: Tab, case: Case, unit: str) -> None:
     page.wait_until(look, done, step=f"row {case.find} of {case.relation}", expected=expected, timeout_s=START_S)
 
 
+def set_terms(page: Tab, case: Case) -> None:
+    """Add or take away terms until the page has as many as the case, where the law is over lists."""
+    counts = [int(found[1]) for name in (*case.given, case.find) if (found := re.search(r"_i_(\d+)$", name))]
+    if not counts:
+        return
+    while page.count(".row[data-term]") == 0 or not page.exists(f'.row[data-term="{max(counts)}"]'):
+        page.click("[data-add-term]")
+    while page.exists(f'.row[data-term="{max(counts) + 1}"]'):
+        page.click("[data-drop-term]")
+
+
 @pytest.mark.parametrize("law", LAWS)
 def test_the_published_figures_are_met_on_the_page(law: str, page: Tab) -> None:
     """Type each case of the law and read the row found."""
     page.open(f"laws/{law}.html")
     for case in [case for case in CASES if case.relation == law]:
+        set_terms(page, case)
         page.click(f"#{law}-find-{case.find}")
         unit = offered(case, case.find, reading_of(case, case.find).unit)
         if page.exists(f"select#{law}-{case.find}-unit"):

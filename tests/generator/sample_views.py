@@ -139,9 +139,7 @@ def make_sheet() -> SheetView:
         RowView(name="t", title="Time to changeover", units=("min", "h", "s"), unit="h", is_found=True),
     )
     finds = (
-        FindView(
-            row="t", ask="time to changeover", label="Time to changeover", unit="h", units=("min", "h", "s", "d")
-        ),
+        FindView(row="t", ask="time to changeover", label="Time to changeover", unit="h", units=("min", "h", "s", "d")),
         FindView(row="count", ask="cylinders needed", label="Cylinders", unit="1", units=("1",)),
         FindView(row="pg_start", ask="pressure needed now", label="Pressure", unit="bar", units=PRESSURES),
     )
@@ -205,6 +203,7 @@ def make_law(key: str, title: str) -> RelationView:
         rows=rows,
         constants=(("R", "8.314 J/(mol K)", "SI Brochure"),),
         find="p",
+        finds=("p", "F"),
         forms=forms,
         checks=(check,),
         answer=make_answer(),
@@ -237,9 +236,7 @@ def make_gas() -> GasView:
 def make_site() -> SiteView:
     """A whole small site."""
     laws = (make_law("force_pressure", "Pressure: force & area"), make_law("boyle", "Boyle’s law"))
-    family = FamilyView(
-        key="pressure", letter="A", title="Pressure & columns", lead="Forces on areas.", relations=laws
-    )
+    family = FamilyView(key="pressure", letter="A", title="Pressure & columns", lead="Forces on areas.", relations=laws)
     return SiteView(
         families=(family,),
         sheets=(make_sheet(),),

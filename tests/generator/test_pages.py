@@ -172,10 +172,7 @@ def test_every_field_has_a_name(pages: dict[str, Reader]) -> None:
 def test_no_field_is_a_spinner(pages: dict[str, Reader]) -> None:
     """Number fields are text fields: a glove or a wheel must not change a reading."""
     kinds = {
-        element.attributes.get("type")
-        for page in pages.values()
-        for element in page.elements
-        if element.tag == "input"
+        element.attributes.get("type") for page in pages.values() for element in page.elements if element.tag == "input"
     }
     assert kinds <= {"text", "hidden", "radio"}
 

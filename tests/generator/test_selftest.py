@@ -42,7 +42,7 @@ def test_every_part_runs_in_order_and_further_words_reach_pytest(project: Path) 
     runner = Runner()
     assert run_tests(project, build=["build"], others=["--all", "-k", "boyle"], run=runner) == 0
     assert runner.order() == ORDER
-    assert runner.commands[-1][-5:] == ["-n", "2", "--all", "-k", "boyle"]
+    assert runner.commands[-1][-7:] == ["-n", "2", "--dist", "worksteal", "--all", "-k", "boyle"]
     assert [line.split(" in ")[0] for line in runner.environment["GASWRIGHT_PARTS"].splitlines()] == [
         "ruff: ok",
         "build: ok",

@@ -6,7 +6,7 @@ gaswright.browser speaks JSON with the page; the worked examples of the pages ar
 
 from typing import Any
 
-from gaswright import conditions, quantity, show
+from gaswright import conditions, quantity, show, terms
 from gaswright import find as finder
 from gaswright.errors import NoSolutionError, OutsideRangeError, ReadingError
 from gaswright.gas import Gas
@@ -38,7 +38,8 @@ STATION_ROW = "p_station"
 def answer_relation(request: dict[str, Any]) -> Response:
     """Answer a law's page: rows with their states, the figure, ±, shares, working, warnings."""
     relation = finder.relation(str(request["key"]))
-    unknown = _unknown(relation, request.get("find"))
+    asked = terms.spread(relation, _unknown(relation, request.get("find")), request.get("rows") or {})
+    relation, unknown = asked.relation, asked.unknown
     unit = quantity.shown_unit(request.get("show"), KINDS[relation.variable(unknown).kind])
     mark = request.get("decimal") or "."
     taken, rows, warnings = _read_law(relation, unknown, request)
@@ -57,10 +58,11 @@ def answer_relation(request: dict[str, Any]) -> Response:
 
 
 def _unknown(relation: Relation, asked: Any) -> str:
-    if asked in relation.forms:
+    if terms.list_of(str(asked)) in (*relation.forms, *relation.turned):
         return str(asked)
     found = "no question" if asked is None else f"the question {str(asked)[:40]!r}"
-    raise ReadingError(relation.title, found, f"one of {', '.join(relation.forms)}", "Ask for one of these.")
+    names = ", ".join((*relation.forms, *relation.turned))
+    raise ReadingError(relation.title, found, f"one of {names}", "Ask for one of these.")
 
 
 def _station_row(request: dict[str, Any], rows: dict[str, Response]) -> Reading | None:
@@ -118,12 +120,15 @@ def _read_law(
 def _strangers(relation: Relation, raw: dict[str, Any]) -> dict[str, Response]:
     """Give the rows that are none of the law's, each as an error."""
     names = [variable.name for variable in relation.variables]
-    return {
+    spare = {
+        name: {"state": "spare", "says": "Plays no part in this question."} for name in raw if name in relation.spare
+    }
+    return spare | {
         name: problem_row(
             ReadingError(relation.title, repr(name[:40]), f"one of {', '.join(names)}", "Correct the name.")
         )
         for name in raw
-        if name not in (*names, STATION_ROW, "gas")
+        if name not in (*names, *relation.spare, STATION_ROW, "gas")
     }
 
 

@@ -27,6 +27,7 @@ def _relation(key: str) -> dict[str, Any]:
             "sign": variable.sign,
             "text": variable.text,
             "default": variable.default,
+            "is_list": variable.name in relation.lists,
         }
         for variable in relation.variables
     }
@@ -35,7 +36,7 @@ def _relation(key: str) -> dict[str, Any]:
         "family": relation.family,
         "equation": relation.text,
         "variables": variables,
-        "find": list(relation.forms),
+        "find": [*relation.forms, *relation.turned],
         "needs_gas": relation.uses_gas,
         "source": relation.source,
     }

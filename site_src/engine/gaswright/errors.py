@@ -24,9 +24,7 @@ class ReadingError(GaswrightError):
     ``offers`` then holds the spellings to choose from.
     """
 
-    def __init__(
-        self, where: str, found: str, expected: str, todo: str, *, offers: tuple[str, ...] = ()
-    ) -> None:
+    def __init__(self, where: str, found: str, expected: str, todo: str, *, offers: tuple[str, ...] = ()) -> None:
         """Keep the four parts and the spellings offered."""
         super().__init__(where, found, expected, todo)
         self.offers = offers

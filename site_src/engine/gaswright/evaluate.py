@@ -66,9 +66,7 @@ def no_slope(where: str) -> NoSolutionError:
     )
 
 
-def _is_rounding(
-    relation: Relation, unknown: str, values: dict[str, float], gas: "Gas | None", value: complex
-) -> bool:
+def _is_rounding(relation: Relation, unknown: str, values: dict[str, float], gas: "Gas | None", value: complex) -> bool:
     """Say whether ``value`` is below zero by no more than the rounding of the readings' own digits."""
     if isinstance(value, complex) or not value < 0:
         return False

@@ -73,7 +73,9 @@ def _percent(share: str, of: str, size: float, exponents: tuple[float, ...], whe
 
 def _unreadable(text: str, where: str) -> ReadingError:
     return ReadingError(
-        where, repr(text[:40]), "an accuracy such as class 1.6 of 250 bar, ± 1 %, ± 0.5 °C or exact",
+        where,
+        repr(text[:40]),
+        "an accuracy such as class 1.6 of 250 bar, ± 1 %, ± 0.5 °C or exact",
         "Type it as printed on the instrument.",
     )
 
@@ -88,7 +90,10 @@ def _limit(text: str, where: str) -> float:
 def _of_span(share: str, text: str, exponents: tuple[float, ...], where: str, says: str) -> Accuracy:
     if not text.strip():
         raise ReadingError(
-            where, f"{says} without its span", "the span it is counted on", f"Add it, such as {says} of 250 bar.",
+            where,
+            f"{says} without its span",
+            "the span it is counted on",
+            f"Add it, such as {says} of 250 bar.",
         )
     span = span_of(text, exponents, where)
     limit = _limit(share, where) / 100 * span.width
@@ -115,10 +120,15 @@ def of_record(record: Record, size: float, exponents: tuple[float, ...], where: 
     """Give the accuracy of an instrument's record with its keys accuracy and span, counted as ``parse`` counts."""
     words, span = str(record.get("accuracy") or "").strip(), str(record.get("span") or "").strip()
     if not words:
-        raise ReadingError(where, f"{record.get('name', 'the instrument')} without an accuracy", "its class or limit",
-                           "Add it to the instrument, such as class 1.6.")
-    lacks_span = re.search(r"(?:class|cl\.?|kl\.?|klasse)\s*[0-9.,]+\s*(?:of)?$|(?:span|full scale|f\.?s\.?|fsd)\.?$",
-                           words, re.IGNORECASE)
+        raise ReadingError(
+            where,
+            f"{record.get('name', 'the instrument')} without an accuracy",
+            "its class or limit",
+            "Add it to the instrument, such as class 1.6.",
+        )
+    lacks_span = re.search(
+        r"(?:class|cl\.?|kl\.?|klasse)\s*[0-9.,]+\s*(?:of)?$|(?:span|full scale|f\.?s\.?|fsd)\.?$", words, re.IGNORECASE
+    )
     accuracy = parse(f"{words} of {span}" if span and lacks_span else words, size, exponents, where)
     if accuracy.span or not span:
         return accuracy

@@ -4,10 +4,10 @@ Takes a key, an unknown and readings; gives a Result with the SI value, its unce
 gaswright.answer_law draws it for a page, gaswright.__main__ prints it.
 """
 
-from collections.abc import Mapping
+from collections.abc import Mapping, Sequence
 from typing import NamedTuple
 
-from gaswright import conditions, find, quantity, working
+from gaswright import conditions, find, quantity, terms, working
 from gaswright.counting import questioned, to_reference, turn
 from gaswright.errors import ReadingError
 from gaswright.evaluate import check_validity, evaluate, no_slope
@@ -45,7 +45,7 @@ class Result(NamedTuple):
 def solve(  # noqa: PLR0913 - what a caller may say, all by name but three
     key: str,
     unknown: str,
-    readings: Mapping[str, Raw],
+    readings: Mapping[str, Raw | Sequence[Raw | None]],
     *,
     station_pressure: Raw | None = None,
     gas: str | None = None,
@@ -56,17 +56,18 @@ def solve(  # noqa: PLR0913 - what a caller may say, all by name but three
     """Solve the law ``key`` for ``unknown``.
 
     ``readings`` maps variable names to typed text ("6.5 psia", "30 ± 0.2 mL"), SI floats or records; a variable with
-    a default may be left out. ``station_pressure`` is needed where a gauge reading meets an absolute variable.
+    a default may be left out. A variable that is a list takes a list of these, with None for the term to find.
+    ``station_pressure`` is needed where a gauge reading meets an absolute variable.
     Raises ReadingError, NoSolutionError or OutsideRangeError, each in four parts.
     """
-    relation = find.relation(key)
-    _check_names(relation, unknown, readings)
+    relation, unknown, given = terms.spread(find.relation(key), unknown, readings)
+    _check_names(relation, unknown, given)
     station = (
         None if station_pressure is None else read(NO_STATION, station_pressure, KINDS["station_pressure"], decimal)
     )
-    gas_name = gas or text_of(readings.get("gas"))
+    gas_name = gas or text_of(given.get("gas"))
     model = find_gas(gas_name) if relation.uses_gas and gas_name else None
-    taken, warnings = _read_all(relation, unknown, readings, decimal, instruments)
+    taken, warnings = _read_all(relation, unknown, given, decimal, instruments)
     shown = quantity.shown_unit({"unit": show}, KINDS[relation.variable(unknown).kind])
     return finish(relation, unknown, taken, Around(station, model, tuple(warnings), shown, decimal or "."))
 

@@ -54,7 +54,9 @@ class Relation(NamedTuple):
     """One equation with a form per unknown and the slopes of left - right.
 
     ``slopes(*arguments)`` gives the partial derivative of the residual by each variable, in the order of
-    ``variables``; ``residual(*arguments)`` gives left - right in SI.
+    ``variables``; ``residual(*arguments)`` gives left - right in SI. ``lists`` names the variables that are lists of
+    any length (gaswright.terms writes them out); with ``is_per_term`` the relation speaks of one of their terms, and
+    ``turned`` names the relation that gives a list back whole; ``spare`` are terms that play no part in the question.
     """
 
     key: str
@@ -64,19 +66,25 @@ class Relation(NamedTuple):
     variables: tuple[Variable, ...]
     constants: tuple[Constant, ...]
     forms: dict[str, Form]
-    slopes: Callable[..., tuple[float, ...]]
+    slopes: Callable[..., tuple[Any, ...]]
     residual: Number
     arguments: tuple[str, ...]
     validity: tuple[Validity, ...]
     assumes: tuple[str, ...]
     source: str
-    example: dict[str, str]
+    example: dict[str, Any]
     uses_gas: bool
+    lists: tuple[str, ...] = ()
+    is_per_term: bool = False
+    turned: dict[str, str] = {}  # noqa: RUF012 - never changed
+    spare: tuple[str, ...] = ()
 
     def variable(self, name: str) -> Variable:
-        """Give the variable called ``name``; KeyError where there is none."""
+        """Give the variable called ``name``, for a term of a list that list; KeyError where there is none."""
+        head, _, place = name.rpartition("_")
+        wanted = head if place.isdigit() and head in self.lists else name
         for variable in self.variables:
-            if variable.name == name:
+            if variable.name == wanted:
                 return variable
         raise KeyError(name)
 

@@ -77,7 +77,10 @@ def _asked(digits: str, mark: str, power: str, where: str, decimal: str | None) 
     as_decimal, as_group = digits.replace(mark, decimal or "."), digits.replace(mark, "")
     is_grouped = THOUSANDS.fullmatch(digits) is not None
     return ReadingError(
-        where, repr(digits + power), "one meaning", f"Is the {words} a decimal mark or does it group thousands?",
+        where,
+        repr(digits + power),
+        "one meaning",
+        f"Is the {words} a decimal mark or does it group thousands?",
         offers=(as_decimal + power, as_group + power) if is_grouped else (as_decimal + power,),
     )
 
@@ -88,7 +91,9 @@ def _grouped(digits: str, mark: str, where: str, decimal: str | None) -> str:
     grouping = THOUSANDS.fullmatch(whole)
     if not grouping or grouping[1] == mark or re.search("[.,]", part) or (decimal and _is_other(digits, mark, decimal)):
         raise ReadingError(
-            where, repr(digits[:40]), "digits grouped in threes and one decimal mark",
+            where,
+            repr(digits[:40]),
+            "digits grouped in threes and one decimal mark",
             "Type the number without grouping.",
         )
     return whole.replace(grouping[1], "") + ("." + part if part else "")

@@ -12,10 +12,30 @@ from gaswright.tables import ASKED_PAIR, PRODUCTS, QUESTIONS, SPELLINGS, UNITS, 
 
 RAISED = str.maketrans("⁰¹²³⁴⁵⁶⁷⁸⁹⁻⁺", "0123456789-+")
 LOWERED = str.maketrans("0123456789-", "⁰¹²³⁴⁵⁶⁷⁸⁹⁻")
-SAME = str.maketrans({
-    "μ": "µ", "º": "°", "˚": "°", "⋅": "·", "∙": "·", "•": "·", "*": "·", "×": "·", "−": "-", "–": "-", "″": '"',
-    "”": '"', "“": '"', "\u00a0": " ", "\u2009": " ", "\u202f": " ", "₂": "2", "∕": "/", "÷": "/", "∆": "Δ",
-})
+SAME = str.maketrans(
+    {
+        "μ": "µ",
+        "º": "°",
+        "˚": "°",
+        "⋅": "·",
+        "∙": "·",
+        "•": "·",
+        "*": "·",
+        "×": "·",
+        "−": "-",
+        "–": "-",
+        "″": '"',
+        "”": '"',
+        "“": '"',
+        "\u00a0": " ",
+        "\u2009": " ",
+        "\u202f": " ",
+        "₂": "2",
+        "∕": "/",
+        "÷": "/",
+        "∆": "Δ",
+    }
+)
 LEFT_OUT = str.maketrans("", "", " .")
 RUN = re.compile(r"[⁰¹²³⁴⁵⁶⁷⁸⁹⁻⁺]+")
 PARTS = re.compile(r"[()/·]|[^()/·]+")
@@ -119,7 +139,10 @@ def _bracketless(whole: str, where: str) -> ReadingError:
     above, below = whole.split("/", 1)
     first, rest = below.split("·", 1)
     return ReadingError(
-        where, repr(whole), "brackets that say what is divided by", "Which is meant?",
+        where,
+        repr(whole),
+        "brackets that say what is divided by",
+        "Which is meant?",
         offers=(f"{above}/({below})", f"{above}·{rest}/{first}"),
     )
 
@@ -193,8 +216,10 @@ def _spelt(part: str) -> set[str]:
 
 def _one_each(words: set[str]) -> set[str]:
     """Give one word for each meaning."""
-    meanings = {repr(SPELLINGS.get(word) or PRODUCTS.get(word) or WITH_PAIR.get(word) or ASKED_PAIR.get(word)): word
-                for word in sorted(words)}
+    meanings = {
+        repr(SPELLINGS.get(word) or PRODUCTS.get(word) or WITH_PAIR.get(word) or ASKED_PAIR.get(word)): word
+        for word in sorted(words)
+    }
     return set(meanings.values())
 
 
@@ -217,8 +242,9 @@ def _shown(powers: tuple[tuple[str, int], ...]) -> str:
         side = sides[power < 0]
         if key != "1":
             side[key] = side.get(key, 0) + abs(power)
-    above, below = ("·".join(key + (str(n).translate(LOWERED) if n > 1 else "") for key, n in side.items())
-                    for side in sides)
+    above, below = (
+        "·".join(key + (str(n).translate(LOWERED) if n > 1 else "") for key, n in side.items()) for side in sides
+    )
     if not below:
         return above or "1"
     return f"{above or '1'}/{below if len(sides[1]) == 1 else f'({below})'}"

@@ -74,9 +74,15 @@ def read(
     good = _accuracy(where, said_of, typed, found, kind)
     conditions, pair = _conditions(parts, found, where, decimal)
     return Reading(
-        name=where, text=said + (f" {reference}" if reference in COUNTED else "") + (f" ({pair})" if pair else ""),
-        number=typed.value, unit=found.text, value=value, reference=reference, **good,
-        came_from=str(record.get("from") or "read"), conditions=conditions,
+        name=where,
+        text=said + (f" {reference}" if reference in COUNTED else "") + (f" ({pair})" if pair else ""),
+        number=typed.value,
+        unit=found.text,
+        value=value,
+        reference=reference,
+        **good,
+        came_from=str(record.get("from") or "read"),
+        conditions=conditions,
         warnings=_bare_warning(where, found, record, kind, reference),
     )
 
@@ -96,8 +102,24 @@ def _of_number(where: str, raw: float, kind: Kind) -> Reading:
     value = float(raw)
     own = unit.UnitReading(kind.si, 1.0, ZERO_CELSIUS if kind.si == "Cel" else 0.0, None, None, "")
     _refuse_impossible(where, value, kind, kind.reference, f"{value:g} {kind.si}", own)
-    return Reading(where, f"{value:g} {kind.si}", value, kind.si, value, kind.reference, 0.0, 0.0, 0.0, math.inf,
-                   "given as an exact SI value", "", 0.0, "read", None, ())
+    return Reading(
+        where,
+        f"{value:g} {kind.si}",
+        value,
+        kind.si,
+        value,
+        kind.reference,
+        0.0,
+        0.0,
+        0.0,
+        math.inf,
+        "given as an exact SI value",
+        "",
+        0.0,
+        "read",
+        None,
+        (),
+    )
 
 
 def _conditions(
@@ -115,19 +137,26 @@ def _conditions(
     except ReadingError as error:
         is_hot = error.where.endswith("temperature")
         error.offers = tuple(
-            f"{parts.digits} {parts.unit} ({offer}, {pressure_text})" if is_hot
-            else f"{parts.digits} {parts.unit} ({temperature_text}, {offer})" for offer in error.offers
+            f"{parts.digits} {parts.unit} ({offer}, {pressure_text})"
+            if is_hot
+            else f"{parts.digits} {parts.unit} ({temperature_text}, {offer})"
+            for offer in error.offers
         )
         raise
     if pressure.reference != "absolute":
         raise ReadingError(
-            pressure.name, pressure.text, "an absolute pressure", "Give the pressure of the pair as absolute.",
+            pressure.name,
+            pressure.text,
+            "an absolute pressure",
+            "Give the pressure of the pair as absolute.",
         )
     pair = f"{temperature.text}, {pressure.text.removesuffix(' absolute')}"
     given = (temperature.value, pressure.value)
     if found.conditions and any(abs(a - b) > 1e-6 * b for a, b in zip(given, found.conditions, strict=True)):
         raise ReadingError(
-            where, f"{parts.unit} with the pair ({pair})", f"one pair: {parts.unit} means ({found.pair})",
+            where,
+            f"{parts.unit} with the pair ({pair})",
+            f"one pair: {parts.unit} means ({found.pair})",
             "Which reference conditions are meant?",
             offers=tuple(f"{parts.digits} {found.text} ({each})" for each in (found.pair, pair)),
         )
@@ -145,7 +174,10 @@ def _unit(parts: Typed, chosen: str, where: str, kind: Kind) -> unit.UnitReading
     field = _one_unit(parts, chosen, where, kind)
     if (own.factor, own.zero) != (field.factor, field.zero):
         raise ReadingError(
-            where, f"{parts.digits} {parts.unit} in a field set to {chosen}", "one unit", "Which unit was read?",
+            where,
+            f"{parts.digits} {parts.unit} in a field set to {chosen}",
+            "one unit",
+            "Which unit was read?",
             offers=(f"{parts.digits} {parts.unit}", f"{parts.digits} {chosen}"),
         )
     return own._replace(reference=own.reference or field.reference)
@@ -172,7 +204,10 @@ def _reference(found: unit.UnitReading, chosen: str, kind: Kind, where: str, par
     said = found.reference
     if said and chosen and said != chosen:
         raise ReadingError(
-            where, f"{parts.digits} {parts.unit} in a field set to {chosen}", "one way of counting", "Which was read?",
+            where,
+            f"{parts.digits} {parts.unit} in a field set to {chosen}",
+            "one way of counting",
+            "Which was read?",
             offers=tuple(f"{parts.digits} {found.text} {each}" for each in (said, chosen)),
         )
     counted = said or chosen or kind.reference
@@ -229,9 +264,7 @@ class Said(NamedTuple):
     mark: str
 
 
-def _accuracy(
-    where: str, said: Said, typed: number.Number, found: unit.UnitReading, kind: Kind
-) -> dict[str, Any]:
+def _accuracy(where: str, said: Said, typed: number.Number, found: unit.UnitReading, kind: Kind) -> dict[str, Any]:
     """Give the fields of a Reading about its uncertainty. A limit is rectangular (JCGM 100:2008, 4.3.7)."""
     name = str(said.record.get("instrument") or "")
     words = said.typed or str(said.record.get("accuracy") or "")
@@ -253,8 +286,14 @@ def _accuracy(
         by = f"half the last digit typed: ± {size_shown} {found.text}".removesuffix(" 1")
     u_systematic = accuracy.limit / ROOT_3
     return {
-        "u": math.hypot(u_systematic, u_random), "u_systematic": u_systematic, "u_random": u_random,
-        "freedom": math.inf, "by": by, "instrument": name, "span": accuracy.span, "scale": accuracy.scale,
+        "u": math.hypot(u_systematic, u_random),
+        "u_systematic": u_systematic,
+        "u_random": u_random,
+        "freedom": math.inf,
+        "by": by,
+        "instrument": name,
+        "span": accuracy.span,
+        "scale": accuracy.scale,
     }
 
 

@@ -45,14 +45,20 @@ def combine(gradient: Sequence[float], readings: Sequence[Reading]) -> Combined:
     total = sum(parts)
     if not math.isfinite(total):
         raise NoSolutionError(
-            "Uncertainty", "no finite size", "readings on which the figure depends smoothly", "Check the readings.",
+            "Uncertainty",
+            "no finite size",
+            "readings on which the figure depends smoothly",
+            "Check the readings.",
         )
     u = math.sqrt(total)
     freedom = _freedom(u, gradient, readings)
     k = student.factor(freedom)
     shares = sorted(
-        (Share(_label([readings[place] for place in group]), part / total if total else 0.0, math.sqrt(part))
-         for group, part in zip(groups, parts, strict=True) if part > 0),
+        (
+            Share(_label([readings[place] for place in group]), part / total if total else 0.0, math.sqrt(part))
+            for group, part in zip(groups, parts, strict=True)
+            if part > 0
+        ),
         key=lambda share: -share.fraction,
     )
     shared = tuple(readings[group[0]].instrument for group in groups if len(group) > 1)

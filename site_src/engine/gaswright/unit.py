@@ -13,9 +13,23 @@ from gaswright.product import Product
 from gaswright.tables import KINDS
 
 WORDS = {
-    "gauge": "gauge", "gage": "gauge", "relative": "gauge", "rel": "gauge", "ga": "gauge", "g": "gauge", "ü": "gauge",
-    "absolute": "absolute", "abs": "absolute", "a": "absolute", "vacuum": "vacuum", "vac": "vacuum", "v": "vacuum",
-    "difference": "difference", "differential": "difference", "diff": "difference", "d": "difference",
+    "gauge": "gauge",
+    "gage": "gauge",
+    "relative": "gauge",
+    "rel": "gauge",
+    "ga": "gauge",
+    "g": "gauge",
+    "ü": "gauge",
+    "absolute": "absolute",
+    "abs": "absolute",
+    "a": "absolute",
+    "vacuum": "vacuum",
+    "vac": "vacuum",
+    "v": "vacuum",
+    "difference": "difference",
+    "differential": "difference",
+    "diff": "difference",
+    "d": "difference",
 }
 SUFFIX = re.compile(rf"(.*\S)\s*[(\[]?\b({'|'.join(WORDS)})\b\.?[)\]]?", re.IGNORECASE)
 JOINED = re.compile(r"(.*[^\s(\[])(ga|vac|abs|[gavdü])", re.IGNORECASE)
@@ -35,7 +49,10 @@ class UnitReading(NamedTuple):
 
 
 def parse(
-    text: str, where: str, exponents: tuple[float, ...], title: str = "the quantity asked for",
+    text: str,
+    where: str,
+    exponents: tuple[float, ...],
+    title: str = "the quantity asked for",
     offered: tuple[str, ...] = (),
 ) -> UnitReading:
     """Give the unit ``text`` says, for a quantity called ``title`` for which the units ``offered`` are usual.
@@ -43,7 +60,7 @@ def parse(
     Raises ReadingError: unknown, of another kind, with two meanings, or without its reference conditions.
     """
     body = product.normal(text)
-    expected = f"a unit of {title}{f' such as {', '.join(offered[:3])}' if offered else ''}"
+    expected = f"a unit of {title}{f' such as {", ".join(offered[:3])}' if offered else ''}"
     if not body:
         raise ReadingError(where, "no unit", expected, "Add the unit.")
     found, reference = _counted(body, where, expected)

@@ -9,6 +9,7 @@ from random import Random
 from typing import Any, NamedTuple
 
 from gaswright import find as finder
+from gaswright import terms
 from gaswright.errors import NoSolutionError, OutsideRangeError
 from gaswright.evaluate import check_validity, evaluate, slopes
 from gaswright.gas import Gas, find
@@ -17,7 +18,8 @@ from gaswright.model import Relation
 from gaswright.reading import read
 from gaswright.tables import KINDS
 
-PAIRS = [(key, unknown) for key in FAMILY_OF for unknown in finder.relation(key).forms]
+LAWS = {key: terms.as_shown(finder.relation(key)) for key in FAMILY_OF}
+PAIRS = [(key, unknown) for key, law in LAWS.items() for unknown in law.forms]
 GASES = ("nitrogen", "oxygen", "argon", "helium", "methane")
 TRIES = 40
 WARMER = 1.2
@@ -52,6 +54,16 @@ def _moved(random: Random, value: float, spread: float) -> float:
     return value * math.exp(random.uniform(-spread, spread)) if value else spread * random.uniform(0, NEAR_ZERO)
 
 
+def _shared_out(relation: Relation, values: dict[str, float], base: dict[str, float]) -> dict[str, float]:
+    """Scale each list of shares whose example sums to 1 so that the moved one does, too."""
+    for name in {terms.list_of(each.name) for each in relation.variables if each.kind == "fraction"}:
+        shares = [key for key in base if key.startswith(f"{name}_") and name != key]
+        if shares and abs(sum(base[key] for key in shares) - 1) <= NEAR_ZERO:
+            whole = sum(values[key] for key in shares)
+            values |= {key: values[key] / whole for key in shares}
+    return values
+
+
 def _is_readable(relation: Relation, values: dict[str, float]) -> bool:
     """Say whether every value is one that could be typed: inside the range of its kind."""
     kinds = ((KINDS[each.kind], values[each.name]) for each in relation.variables)
@@ -67,6 +79,7 @@ def states(relation: Relation, count: int, seed: str) -> Iterator[State]:
     for turn in range(count * TRIES):
         spread = 0.0 if turn == 0 else 1.0
         values = {name: _moved(random, value, spread * math.log(spans[name])) for name, value in base.items()}
+        values = _shared_out(relation, values, base)
         gas = find(random.choice(GASES)) if relation.uses_gas else None
         try:
             values[unknown] = evaluate(relation, unknown, values, gas, "state")

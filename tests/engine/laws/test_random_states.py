@@ -1,12 +1,11 @@
 """Random states of every law: each unknown solved for comes back, and slopes are those of differences."""
 
 import pytest
-from gaswright import find as finder
 from gaswright.errors import NoSolutionError, OutsideRangeError
 from gaswright.evaluate import evaluate
 from gaswright.law import sensitivities
 
-from tests.engine.laws.states import PAIRS, State, first_unknown, states, weights
+from tests.engine.laws.states import LAWS, PAIRS, State, first_unknown, states, weights
 
 CLOSE = 1e-9
 FEWEST = 10
@@ -16,7 +15,7 @@ FLOOR = 1e-9
 
 @pytest.mark.parametrize(("key", "unknown"), PAIRS)
 def test_the_value_comes_back(key: str, unknown: str, full_counts: bool) -> None:  # noqa: FBT001 - a fixture
-    relation = finder.relation(key)
+    relation = LAWS[key]
     looked = 0
     for state in states(relation, 1_000 if full_counts else 200, "back"):
         parts = weights(relation, state)
@@ -35,7 +34,7 @@ def _difference(key: str, state: State, name: str, slope: float) -> float | None
 
     The step moves reading and answer by a share of themselves at most, so that a steep place is looked at closely.
     """
-    relation = finder.relation(key)
+    relation = LAWS[key]
     unknown = first_unknown(relation)
     steepness = abs(slope * state.values[name] / state.values[unknown]) if state.values[unknown] else 1.0
     width = STEP * state.values[name] / max(1.0, steepness)
@@ -52,7 +51,7 @@ def _difference(key: str, state: State, name: str, slope: float) -> float | None
 
 @pytest.mark.parametrize("key", dict(PAIRS))
 def test_sensitivities_are_those_of_differences(key: str, full_counts: bool) -> None:  # noqa: FBT001 - a fixture
-    relation = finder.relation(key)
+    relation = LAWS[key]
     unknown = first_unknown(relation)
     looked = 0
     for state in states(relation, 100 if full_counts else 20, "slope"):

@@ -10,6 +10,7 @@ from gaswright.browser import answer
 from gaswright.jobs.index import TITLE_OF
 from gaswright.laws.index import FAMILY_OF
 from gaswright.sheet import run_sheet
+from gaswright.terms import as_shown
 from hypothesis import HealthCheck, given, settings
 from hypothesis import strategies as st
 
@@ -139,7 +140,7 @@ def _nearly(key: str) -> st.SearchStrategy[Any]:
 
 def _nearly_law(key: str) -> st.SearchStrategy[Any]:
     """Give a law's worked example with one row changed."""
-    relation = finder.relation(key)
+    relation = as_shown(finder.relation(key))
     unknown = next(name for name in relation.forms if name not in relation.example)
     return st.builds(
         lambda row, raw: {
@@ -155,7 +156,7 @@ def _nearly_law(key: str) -> st.SearchStrategy[Any]:
 
 
 def _law(key: str) -> st.SearchStrategy[Any]:
-    relation = finder.relation(key)
+    relation = as_shown(finder.relation(key))
     rows = {name: st.just(relation.example.get(name, "1")) | READING for name in [v.name for v in relation.variables]}
     return st.fixed_dictionaries(
         {
