@@ -8,13 +8,14 @@ import re
 from collections import Counter
 from collections.abc import Iterator, Mapping
 from dataclasses import dataclass
+from fractions import Fraction
 
 import sympy
 
 from generator.dimension_of import dimension_of
 from generator.errors import SpecError
 from generator.load import Case, Loaded
-from spec.dimensions import Dimension
+from spec.dimensions import NUMBER, Dimension
 from spec.model import Constant, GasName, Nature, Relation, Variable
 
 WITHOUT_CASE = (Nature.BALANCE, Nature.DEFINITION, Nature.PROPERTY)
@@ -107,8 +108,10 @@ def _source(relation: Relation, where: str) -> Iterator[SpecError]:
 def _dimensions(relation: Relation, where: str) -> Iterator[SpecError]:
     meaning = meanings_of(relation)
     try:
-        left = dimension_of(relation.left, meaning, where)
-        right = dimension_of(relation.right, meaning, where)
+        if _has_open_power(relation):
+            left, right = _joined(relation, meaning, where), NUMBER
+        else:
+            left, right = (dimension_of(side, meaning, where) for side in (relation.left, relation.right))
     except SpecError as mistake:
         yield mistake
         return
@@ -119,6 +122,30 @@ def _dimensions(relation: Relation, where: str) -> Iterator[SpecError]:
             expected="the same dimension on both sides",
             todo="correct the equation or the kinds of its variables",
         )
+
+
+def _has_open_power(relation: Relation) -> bool:
+    """Tell whether a variable stands alone under an exponent that is one, too, as in ``p V**gamma``."""
+    powers = relation.left.atoms(sympy.Pow) | relation.right.atoms(sympy.Pow)
+    return any(power.base in meanings_of(relation) and not power.exp.is_number for power in powers)
+
+
+def _joined(relation: Relation, meaning: Mapping[sympy.Symbol, Dimension], where: str) -> Dimension:
+    """Give the dimension of left over right, where each is a product of powers whose exponents may be variables."""
+    totals: list[sympy.Expr] = [sympy.S.Zero] * len(NUMBER.exponents())
+    for factor in sympy.Mul.make_args((relation.left / relation.right).doit()):
+        base, exponent = factor.as_base_exp()
+        parts = dimension_of(base, meaning, where).exponents()
+        totals = [total + exponent * sympy.Rational(part) for total, part in zip(totals, parts, strict=True)]
+    simple = [sympy.expand(total) for total in totals]
+    if any(not total.is_Rational for total in simple):
+        raise SpecError(
+            where=where,
+            found="powers whose dimensions do not cancel",
+            expected="the same dimension on both sides, whatever the exponent",
+            todo="correct the equation or the kinds of its variables",
+        )
+    return Dimension.of(Fraction(int(total.p), int(total.q)) for total in simple)
 
 
 def meanings_of(relation: Relation) -> Mapping[sympy.Symbol, Dimension]:

@@ -21,6 +21,7 @@ from spec.symbols import is_list
 MATH_NAMES = ("pow", "sqrt", "log", "exp", "sin", "cos", "asin", "erf", "pi")
 SIGNS = {Sign.POSITIVE: "positive", Sign.NONNEGATIVE: "nonnegative", Sign.ANY: "any"}
 WIDTH = 110
+SIDE = "side"
 
 
 def emit_relations(families: tuple[Family, ...], python: Mapping[str, str]) -> Mapping[str, str]:
@@ -55,7 +56,7 @@ def _family(family: Family, python: Mapping[str, str]) -> str:
     if uses_gas:
         head += ["from typing import TYPE_CHECKING", ""]
     head += ["from gaswright.model import Constant, Form, Relation, Validity, Variable"]
-    roots = [name for name in ("find_root", "polynomial_root") if _is_used(name, body)]
+    roots = [name for name in ("find_root", "find_root_beside", "polynomial_root") if _is_used(name, body)]
     if roots:
         head += [f"from gaswright.roots import {', '.join(roots)}"]
     if uses_gas:
@@ -95,6 +96,8 @@ def _form(solved: SolvedRelation, form: Form) -> str:
     variable = variables_of(relation)[form.unknown]
     name = f"{relation.key}_{form.unknown.name}"
     parameters = form_parameters(relation, form.unknown, _expressions(relation, form))
+    if _is_asked(form):
+        parameters = (*parameters, Parameter(SIDE, "str", sympy.Symbol(SIDE), ""))
     lines = [
         f"def {name}({_signature(parameters, is_gas=_needs_gas(form))}) -> float:",
         *_docstring(relation, form, variable, parameters),
@@ -106,7 +109,7 @@ def _form(solved: SolvedRelation, form: Form) -> str:
 
 def _expressions(relation: Relation, form: Form) -> tuple[sympy.Expr, ...]:
     if form.way is Way.NUMERIC:
-        return (relation.left, relation.right)
+        return (relation.left, relation.right, *([form.split.at] if form.split else []))
     if form.way is Way.GAS:
         return form.method_arguments
     return form.coefficients or (form.expression,)
@@ -119,6 +122,13 @@ def _docstring(relation: Relation, form: Form, variable: Variable, parameters: t
     yield f'    """Give the {variable.text} [{variable.kind.si}]: {form.way.value}.'
     yield ""
     for parameter in parameters:
+        if parameter.name == SIDE:
+            yield (
+                f"    {SIDE}: {form.split.below} or {form.split.above}, the side of the turning point."
+                if form.split
+                else ""
+            )
+            continue
         other = variables_of(relation)[parameter.symbol]
         which = WHICH[parameter.terms]
         yield f"    {parameter.name}: {other.text}{which} [{other.kind.si}], {other.sign.value}."
@@ -136,7 +146,7 @@ def _constants(relation: Relation, expressions: tuple[sympy.Expr, ...]) -> Itera
 def _body(relation: Relation, form: Form) -> Iterator[str]:
     write = PythonWriter().write
     kind = variables_of(relation)[form.unknown].kind
-    low, high = max(kind.low, 1e-300), kind.high
+    low, high = (kind.low if kind.low < 0 else max(kind.low, 1e-300)), kind.high
     where = f"{relation.title}, {form.unknown.name}"
     if form.way is Way.CLOSED and form.expression is not None:
         yield f"    return {write(form.expression)}"
@@ -149,7 +159,7 @@ def _body(relation: Relation, form: Form) -> Iterator[str]:
         yield f"    def residual({form.unknown.name}: float) -> float:"
         yield f"        return {write(relation.left)} - ({write(relation.right)})"
         yield ""
-        yield f"    return find_root(residual, {low!r}, {high!r}, {where!r})"
+        yield from _search(form, low, high, where)
 
 
 def _whole(solved: SolvedRelation) -> tuple[Parameter, ...]:
@@ -163,6 +173,23 @@ def _own_terms(relation: Relation, *, is_named_own: bool = False) -> Iterator[st
         for symbol in lists_of(relation):
             name = own_symbol(symbol).name if is_named_own else symbol.name
             yield f"    {name} = {terms_name(symbol)}[{OWN}]"
+
+
+def _search(form: Form, low: float, high: float, where: str) -> Iterator[str]:
+    """Seek the root over the whole range, or on one side of the turning point."""
+    if form.split is None:
+        yield f"    return find_root(residual, {low!r}, {high!r}, {where!r})"
+        return
+    yield "    def turn() -> float:"
+    yield f"        return {PythonWriter().write(form.split.at)}"
+    yield ""
+    is_above = f"{SIDE} == {form.split.above!r}" if _is_asked(form) else repr(bool(form.split.above))
+    yield f"    return find_root_beside(residual, turn, {low!r}, {high!r}, {where!r}, is_above={is_above})"
+
+
+def _is_asked(form: Form) -> bool:
+    """Tell whether both sides of the turning point are physical, so that one must be chosen."""
+    return form.split is not None and bool(form.split.below and form.split.above)
 
 
 def _residual(solved: SolvedRelation) -> str:
@@ -233,6 +260,7 @@ def _validity_function(relation: Relation, place: int, validity: Validity) -> st
         [
             f"def {relation.key}_holds_{place}({names}) -> bool:",
             '    """Tell whether the relation holds there."""',
+            *_constants(relation, (validity.holds.lhs, validity.holds.rhs)),
             f"    return {sides}",
         ]
     )
@@ -307,7 +335,9 @@ def _form_value(relation: Relation, form: Form) -> str:
     names = tuple(parameter.name for parameter in parameters) + (("gas",) if _needs_gas(form) else ())
     line = form_text(relation, form)
     name = form.unknown.name
-    return f"        {name!r}: Form({name!r}, {relation.key}_{name}, {names!r}, {line!r}, {form.way.value!r}),"
+    values = (repr(name), f"{relation.key}_{name}", repr(names), repr(line), repr(form.way.value))
+    sides = f", {(form.split.below, form.split.above)!r}" if form.split and _is_asked(form) else ""
+    return f"        {name!r}: Form({', '.join(values)}{sides}),"
 
 
 def form_text(relation: Relation, form: Form) -> str:

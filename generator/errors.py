@@ -16,6 +16,10 @@ class GeneratorError(ValueError):
         self.todo = todo
         super().__init__("{}: found {}; expected {}. {}".format(where, found, expected, todo))
 
+    def __reduce__(self) -> "tuple[type, tuple[str, str, str, str]]":
+        """Travel between the processes of a build whole."""
+        return type(self), (self.where, self.found, self.expected, self.todo)
+
 
 class SpecError(GeneratorError):
     """A mistake in the spec, or in what the build makes of it."""

@@ -6,7 +6,9 @@ Takes a relation, its texts and its cases; gives its RelationView. Next: generat
 import re
 from dataclasses import replace
 
-from gaswright.answer_law import answer_relation
+from gaswright import any_kind
+from gaswright.answer_law import SIDE_ROW, answer_relation
+from gaswright.evaluate import words
 from gaswright.find import relation as find_law
 from gaswright.gas import find as find_gas
 from gaswright.gas import keys as gas_keys
@@ -20,12 +22,12 @@ from generator.check import constants_of, variables_of
 from generator.describe import FormText, RelationText
 from generator.load import Case
 from generator.printers import mathml, symbol_latex, symbol_text
-from generator.row_views import REFERENCES, may_be_negative, split, units_of
+from generator.row_views import REFERENCES, may_be_negative, settled, split, units_of
 from generator.terms import expand, lists_of
 from generator.views import CheckView, FormView, RelationView, RowView
 from spec import scenario
 from spec.kinds import STATION_PRESSURE
-from spec.model import Family, GasName, Relation, Sign, Variable
+from spec.model import Family, GasName, Kind, Relation, Sign, Variable
 
 STATION = "p_station"
 COUNTED = ("absolute_pressure", "gauge_pressure", "vacuum_pressure")
@@ -112,6 +114,8 @@ def _rows(relation: Relation) -> tuple[RowView, ...]:
     if any(isinstance(meaning, GasName) for meaning in relation.where.values()):
         choices = tuple((key, f"{find_gas(key).title}, {find_gas(key).formula}") for key in gas_keys())
         rows.insert(0, RowView(name="gas", title="Gas", is_gas=True, text=_typed(relation, "gas"), choices=choices))
+    if any(split.below and split.above for split in relation.splits):
+        rows.append(_side_row(relation))
     kinds = {variable.kind.key for variable in variables_of(relation).values()}
     if kinds & set(COUNTED) and "station_pressure" not in kinds:
         typed = split(scenario.STATION_PRESSURE, STATION_PRESSURE)
@@ -132,8 +136,21 @@ def _rows(relation: Relation) -> tuple[RowView, ...]:
     return tuple(rows)
 
 
+def _side_row(relation: Relation) -> RowView:
+    """Give the row that says which of two values is meant."""
+    sides = dict.fromkeys(name for split in relation.splits for name in (split.below, split.above) if name)
+    return RowView(
+        name=SIDE_ROW,
+        title="Which of two answers",
+        note="asked where two values fit",
+        is_optional=True,
+        choices=tuple((name, words(name)) for name in sides),
+    )
+
+
 def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowView:
     default = "" if variable.default is None else f"{float(variable.default):g}"
+    variable = replace(variable, kind=_kind_shown(relation, variable))
     typed = split(_typed(relation, name, default), variable.kind)
     unit = typed.unit if name in relation.example else _like(relation, variable) or typed.unit
     return RowView(
@@ -152,6 +169,12 @@ def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowVi
         is_optional=variable.default is not None,
         term=int(place) if (place := name.rpartition("_i_")[2]).isdigit() and "_i_" in name else 0,
     )
+
+
+def _kind_shown(relation: Relation, variable: Variable) -> Kind:
+    """Give the kind of a row; where it may be any, that of the example."""
+    alike = [symbol.name for symbol, each in variables_of(relation).items() if each.kind == variable.kind]
+    return settled(next((typed for name in alike if (typed := _typed(relation, name))), ""), variable.kind)
 
 
 def _typed(relation: Relation, name: str, default: str = "") -> str:
@@ -203,5 +226,5 @@ def _check(case: Case) -> CheckView:
 
 
 def _kind_of(case: Case) -> str:
-    kind: str = find_law(case.relation).variable(case.find).kind
-    return kind
+    law = any_kind.settled(find_law(case.relation), case.given)
+    return law.variable(case.find).kind

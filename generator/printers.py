@@ -16,7 +16,7 @@ from generator.errors import SpecError
 from spec.symbols import GAS_FUNCTIONS, Others, Total, is_list
 
 SUM, PRODUCT, SIGN, POWER, ATOM = range(5)
-FUNCTIONS = {"log": "log", "exp": "exp", "sin": "sin", "cos": "cos", "asin": "asin", "erf": "erf"}
+FUNCTIONS = {"log": "log", "exp": "exp", "sin": "sin", "cos": "cos", "asin": "asin", "erf": "erf", "Abs": "abs"}
 GREEK = {
     "alpha": "α",
     "beta": "β",

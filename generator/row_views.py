@@ -5,9 +5,12 @@ Takes a typed reading and a kind; gives the fields of a RowView. generator.law_v
 
 from typing import NamedTuple
 
+from gaswright.any_kind import ANY, kind_of
 from gaswright.reading import read
 from gaswright.tables import KINDS
+from gaswright.typed import take_apart
 
+from spec import kinds
 from spec.model import Kind
 
 REFERENCES = {
@@ -36,8 +39,17 @@ class Typed(NamedTuple):
     reference: str
 
 
+def settled(text: str, kind: Kind) -> Kind:
+    """Give the kind of a typed reading where ``kind`` is any, ``kind`` itself otherwise."""
+    if kind.key != ANY or not text:
+        return kind
+    key = kind_of(take_apart(text, kind.title).unit or "1", kind.title)
+    return next(each for each in kinds.ALL if each.key == key)
+
+
 def split(text: str, kind: Kind) -> Typed:
     """Split a typed reading such as ``200 bar gauge`` into digits, unit and reference."""
+    kind = settled(text, kind)
     if not text:
         return Typed("", kind.units[0], REFERENCES.get(kind.key, ("",))[0])
     reading = read(kind.title, text, KINDS[kind.key])

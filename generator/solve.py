@@ -15,7 +15,7 @@ from generator.arrange import arrange, flatten
 from generator.check import variables_of
 from generator.errors import SpecError
 from generator.isolate import isolate, peel
-from generator.prove import is_monotonic, prove_closed
+from generator.prove import is_monotonic, is_monotonic_beside, prove_closed
 from generator.terms import (
     PROVEN_TERMS,
     expand,
@@ -28,7 +28,7 @@ from generator.terms import (
     term,
     write_out,
 )
-from spec.model import Nature, Relation, Root
+from spec.model import Nature, Relation, Root, Split
 from spec.symbols import GAS_FUNCTIONS, is_list
 
 
@@ -58,6 +58,7 @@ class Form:
     method: str = ""
     method_arguments: tuple[sympy.Expr, ...] = ()
     proof: str = ""
+    split: Split | None = None
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -79,7 +80,7 @@ def solve_relation(relation: Relation) -> SolvedRelation:
     """Solve one relation for each of its variables."""
     variables = variables_of(relation)
     left, right = evaluated(relation.left), evaluated(relation.right)
-    solved = [symbol for symbol in variables if symbol not in relation.turned]
+    solved = [symbol for symbol in variables if symbol not in relation.turned and symbol not in relation.data]
     unknowns = solved if relation.nature not in (Nature.DECISION, Nature.FIT) else [relation.left]
     forms = {symbol.name: _form(relation, symbol, left, right) for symbol in unknowns}
     order = order_of(relation)
@@ -131,8 +132,11 @@ def _form(relation: Relation, unknown: sympy.Symbol, left: sympy.Expr, right: sy
         return Form(unknown=unknown, way=Way.CLOSED, arguments=arguments, expression=closed, proof=proof)
     if lists_of(relation):
         raise _no_closed_form(relation, unknown)
-    return _polynomial(relation, unknown, left - right, arguments) or _numeric(
-        relation, unknown, left - right, arguments
+    residual = left - right
+    return (
+        _split(relation, unknown, residual, arguments)
+        or _polynomial(relation, unknown, residual, arguments)
+        or _numeric(relation, unknown, residual, arguments)
     )
 
 
@@ -171,7 +175,7 @@ def _isolated(relation: Relation, left: sympy.Expr, right: sympy.Expr, unknown: 
     found = isolate(left, right, unknown)
     if found is None:
         inside, outside = peel(left, right, unknown)
-        found = _linear(left - right, unknown) or _linear(inside - outside, unknown)
+        found = _linear(left - right, unknown) or _linear(inside - outside, unknown) or _exponent(left / right, unknown)
     return None if found is None else arrange(found.xreplace(parted.rests), order_of(relation))
 
 
@@ -185,6 +189,19 @@ def _linear(residual: sympy.Expr, unknown: sympy.Symbol) -> sympy.Expr | None:
         return None
     slope, rest = polynomial.all_coeffs()
     return sympy.factor_terms(sympy.cancel(-rest / slope))
+
+
+def _exponent(quotient: sympy.Expr, unknown: sympy.Symbol) -> sympy.Expr | None:
+    """Solve a product of powers for an unknown that stands in exponents only: its logarithm is linear in it."""
+    powers = [power for power in quotient.atoms(sympy.Pow) if power.exp.has(unknown)]
+    if not powers or any(power.base.has(unknown) for power in powers):
+        return None
+    logarithm = sympy.expand_log(sympy.log(quotient), force=True)
+    slope = sympy.expand(sympy.diff(logarithm, unknown))
+    if slope.has(unknown):
+        return None
+    rest = sympy.expand(logarithm.subs(unknown, 0))
+    return sympy.logcombine(-rest, force=True) / sympy.logcombine(slope, force=True)
 
 
 def _as_polynomial(residual: sympy.Expr, unknown: sympy.Symbol) -> sympy.Poly | None:
@@ -235,6 +252,29 @@ def _polynomial(
         coefficients=coefficients,
         root=branch.root,
         proof=f"all real roots bracketed by those of the derivative; the {branch.root.value} taken: {branch.why}",
+    )
+
+
+def _split(
+    relation: Relation, unknown: sympy.Symbol, residual: sympy.Expr, arguments: tuple[sympy.Symbol, ...]
+) -> Form | None:
+    """Give the form of an unknown with one value on each side of a turning point, if the spec names one."""
+    split = next((split for split in relation.splits if split.unknown == unknown), None)
+    if split is None:
+        return None
+    if not is_monotonic_beside(relation, unknown, residual, split):
+        raise SpecError(
+            where=f"relation {relation.key}, unknown {unknown}",
+            found="a residual that turns elsewhere than at the split",
+            expected="one that only rises or only falls on each side that is named",
+            todo=f"correct Split(unknown={unknown}, at=...)",
+        )
+    return Form(
+        unknown=unknown,
+        way=Way.NUMERIC,
+        arguments=arguments,
+        split=split,
+        proof="residual monotonic over sampled states on each side of its turning point: one root at most on each",
     )
 
 

@@ -7,7 +7,7 @@ from fractions import Fraction
 
 from spec import dimensions as dim
 from spec.model import Constant
-from spec.sources import CODATA, ISO_80000_4, SI_BROCHURE
+from spec.sources import CODATA, ICAO_ATMOSPHERE, ISO_80000_4, SI_BROCHURE, WMO_8
 
 BOLTZMANN_CONSTANT = Constant(
     title="Boltzmann constant",
@@ -43,4 +43,39 @@ ICE_POINT = Constant(
     unit="K",
     dimension=dim.TEMPERATURE,
     source=SI_BROCHURE.at("section 2.3.1, definition of Celsius temperature, exact"),
+)
+FREE_AIR_GRADIENT = Constant(
+    title="free-air gradient of free fall",
+    value=Fraction("3.086e-6"),
+    unit="1/s²",
+    dimension=dim.ACCELERATION / dim.LENGTH,
+    source=WMO_8.at("part I, chapter 3, local acceleration of gravity"),
+)
+STANDARD_SEA_PRESSURE = Constant(
+    title="pressure of the standard atmosphere at sea level",
+    value=Fraction(101325),
+    unit="Pa",
+    dimension=dim.PRESSURE,
+    source=ICAO_ATMOSPHERE.at("primary constants, exact"),
+)
+STANDARD_SEA_TEMPERATURE = Constant(
+    title="temperature of the standard atmosphere at sea level",
+    value=Fraction("288.15"),
+    unit="K",
+    dimension=dim.TEMPERATURE,
+    source=ICAO_ATMOSPHERE.at("primary constants, exact"),
+)
+STANDARD_LAPSE_RATE = Constant(
+    title="fall of temperature with height in the standard atmosphere, to 11 km",
+    value=Fraction("0.0065"),
+    unit="K/m",
+    dimension=dim.TEMPERATURE / dim.LENGTH,
+    source=ICAO_ATMOSPHERE.at("primary constants, exact"),
+)
+STANDARD_AIR_CONSTANT = Constant(
+    title="specific gas constant of the standard atmosphere",
+    value=Fraction("287.05287"),
+    unit="J/(kg·K)",
+    dimension=dim.ENERGY / (dim.MASS * dim.TEMPERATURE),
+    source=ICAO_ATMOSPHERE.at("primary constants"),
 )

@@ -19,32 +19,33 @@ class Dimension:
     temperature: Fraction = Fraction(0)
     amount: Fraction = Fraction(0)
 
+    @staticmethod
+    def of(exponents: Iterable[Fraction]) -> "Dimension":
+        """Give the dimension with these exponents, in the order mass, length, time, temperature, amount."""
+        mass, length, time, temperature, amount = exponents
+        return Dimension(mass=mass, length=length, time=time, temperature=temperature, amount=amount)
+
     def exponents(self) -> tuple[Fraction, ...]:
         """Give the exponents in the order mass, length, time, temperature, amount."""
         return (self.mass, self.length, self.time, self.temperature, self.amount)
 
     def __mul__(self, other: "Dimension") -> "Dimension":
         """Add the exponents."""
-        return _of(a + b for a, b in zip(self.exponents(), other.exponents(), strict=True))
+        return Dimension.of(a + b for a, b in zip(self.exponents(), other.exponents(), strict=True))
 
     def __truediv__(self, other: "Dimension") -> "Dimension":
         """Subtract the exponents."""
-        return _of(a - b for a, b in zip(self.exponents(), other.exponents(), strict=True))
+        return Dimension.of(a - b for a, b in zip(self.exponents(), other.exponents(), strict=True))
 
     def __pow__(self, power: Fraction | int) -> "Dimension":
         """Multiply the exponents."""
-        return _of(a * power for a in self.exponents())
+        return Dimension.of(a * power for a in self.exponents())
 
     def __str__(self) -> str:
         """Give the dimension in SI base units, such as ``kg m^-1 s^-2``; ``1`` for a number."""
         units = zip(("kg", "m", "s", "K", "mol"), self.exponents(), strict=True)
         parts = [unit if power == 1 else f"{unit}^{power}" for unit, power in units if power]
         return " ".join(parts) or "1"
-
-
-def _of(exponents: Iterable[Fraction]) -> Dimension:
-    mass, length, time, temperature, amount = exponents
-    return Dimension(mass=mass, length=length, time=time, temperature=temperature, amount=amount)
 
 
 NUMBER = Dimension()

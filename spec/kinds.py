@@ -4,6 +4,8 @@ Takes dimensions; gives one frozen Kind each, with the units a page offers (the 
 range of the field in SI, inside which numeric solutions are sought and outside which a reading is refused.
 """
 
+from fractions import Fraction
+
 from spec import dimensions as dim
 from spec.model import Kind
 
@@ -655,6 +657,176 @@ ACCURACY_CLASS = Kind(
     low=1e-3,
     high=20.0,
     note="The class printed on the dial: per cent of the span.",
+)
+CHOKED_FACTOR = Kind(
+    key="choked_factor",
+    title="choked-flow factor",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=0.5,
+    high=1.0,
+    note="0.6847 at a heat capacity ratio of 1.40, 0.7262 at 1.667.",
+)
+HEIGHT = Kind(
+    key="height",
+    title="height above sea level, not below it",
+    dimension=dim.LENGTH,
+    si="m",
+    units=("m", "km", "ft"),
+    low=1e-3,
+    high=9e4,
+)
+LIFT = Kind(
+    key="lift",
+    title="lift",
+    dimension=dim.FORCE,
+    si="N",
+    units=("N", "kN", "kgf", "lbf"),
+    low=-1e9,
+    high=1e9,
+)
+ANY_QUANTITY = Kind(
+    key="any_quantity",
+    title="quantity, the same kind in every row",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=1e-12,
+    high=1e12,
+    note="The same kind in every row; type the unit behind the number.",
+)
+CRITICAL_PRESSURE = Kind(
+    key="critical_pressure",
+    title="critical pressure",
+    dimension=dim.PRESSURE,
+    si="Pa",
+    reference="absolute",
+    units=("bar", "MPa", "kPa", "atm", "psi", "Pa"),
+    low=1e5,
+    high=1e9,
+)
+CRITICAL_TEMPERATURE = Kind(
+    key="critical_temperature",
+    title="critical temperature",
+    dimension=dim.TEMPERATURE,
+    si="K",
+    units=("K", "°C", "°F"),
+    low=1.0,
+    high=2000.0,
+)
+MOLECULAR_SPEED = Kind(
+    key="molecular_speed",
+    title="speed of a molecule",
+    dimension=dim.SPEED,
+    si="m/s",
+    units=("m/s", "km/s"),
+    low=0.0,
+    high=1e6,
+)
+SPEED_DENSITY = Kind(
+    key="speed_density",
+    title="share of the molecules for each metre per second",
+    dimension=dim.NUMBER / dim.SPEED,
+    si="s/m",
+    units=("s/m", "s/km"),
+    low=1e-300,
+    high=1e3,
+)
+FREEDOM = Kind(
+    key="freedom",
+    title="degrees of freedom",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=0.5,
+    high=1e9,
+)
+SHARE_OF_LIMIT = Kind(
+    key="share_of_limit",
+    title="share of a limit",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("%", "1"),
+    low=1e-9,
+    high=1e3,
+)
+FACTOR = Kind(
+    key="factor",
+    title="factor of a rule",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=1e-3,
+    high=1e3,
+    note="From the rule that asks for it, its source named.",
+)
+WORK = Kind(
+    key="work",
+    title="work",
+    dimension=dim.ENERGY,
+    si="J",
+    units=("kJ", "J", "MJ", "kWh"),
+    low=-1e15,
+    high=1e15,
+    note="Below zero: work is done on the gas.",
+)
+SCALED_LENGTH = Kind(
+    key="scaled_length",
+    title="scaled distance",
+    dimension=dim.LENGTH / dim.MASS ** Fraction(1, 3),
+    si="m/∛kg",
+    units=("m/∛kg",),
+    low=1e-3,
+    high=1e4,
+    note="Metres for each cube root of a kilogram of TNT.",
+)
+LATITUDE = Kind(
+    key="latitude",
+    title="latitude",
+    dimension=dim.NUMBER,
+    si="rad",
+    units=("°", "rad"),
+    low=0.0,
+    high=1.5707963267948966,
+    note="North or south alike.",
+)
+VENTURI_CONSTANT = Kind(
+    key="venturi_constant",
+    title="calibration constant of a critical-flow venturi",
+    dimension=dim.FLOW * dim.TEMPERATURE ** Fraction(1, 2) / dim.PRESSURE,
+    si="m³·√K/(s·Pa)",
+    units=("m³·√K/(s·Pa)", "m³·√K/(s·kPa)"),
+    low=1e-12,
+    high=1e3,
+)
+KNUDSEN = Kind(
+    key="knudsen_number",
+    title="Knudsen number",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=1e-9,
+    high=1e9,
+    note="Below 0.01 viscous, above 0.5 molecular flow, between them neither.",
+)
+ACENTRIC = Kind(
+    key="acentric_factor",
+    title="acentric factor",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=-0.5,
+    high=1.5,
+)
+GAS_MOLAR_VOLUME = Kind(
+    key="gas_molar_volume",
+    title="molar volume of a gas",
+    dimension=dim.MOLAR_VOLUME,
+    si="m³/mol",
+    units=("L/mol", "m³/mol", "cm³/mol"),
+    low=1e-5,
+    high=1e6,
 )
 
 ALL = tuple(value for value in vars().values() if isinstance(value, Kind))

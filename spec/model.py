@@ -151,13 +151,28 @@ class Branch:
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
+class Split:
+    """Two values of an unknown may satisfy the relation, one on each side of ``at``, where it turns.
+
+    ``below`` and ``above`` name the sides, which the user is asked to choose from; a side without a name is not
+    physical, and the other one is taken.
+    """
+
+    unknown: sympy.Symbol
+    at: sympy.Expr
+    below: str = ""
+    above: str = ""
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
 class Relation:
     """One equation ``left = right``, written once.
 
     ``source`` may only be missing until generator.check has asked for it. ``where`` maps each symbol to its meaning
     in textbook order, which labels, signatures and printing follow. ``example`` holds typed readings of the invented
     demo scenario; the unknown that is left out is the one found. A symbol whose name ends in ``_i`` is a list of any
-    length; ``turned`` names the relation that gives such a list back whole.
+    length; ``turned`` names the relation that gives such a list back whole. ``data`` are constants of the substance,
+    which are looked up and never asked for.
     """
 
     key: str
@@ -170,6 +185,8 @@ class Relation:
     source: Citation | None = None
     valid: tuple[Validity, ...] = ()
     branches: tuple[Branch, ...] = ()
+    splits: tuple[Split, ...] = ()
+    data: tuple[sympy.Symbol, ...] = ()
     nature: Nature = Nature.LAW
     words: tuple[str, ...] = ()
     turned: Mapping[sympy.Symbol, str] = MappingProxyType({})

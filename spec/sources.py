@@ -21,6 +21,9 @@ ISO_6976 = Source(key="iso6976", work="ISO 6976:2016, Natural gas, Calculation f
 DIN_1343 = Source(key="din1343", work="DIN 1343:1990, Reference state, normal state, normal volume", note=FROM_MEMORY)
 EN_837_1 = Source(key="en837_1", work="EN 837-1:1996, Pressure gauges, Bourdon tube gauges", note=FROM_MEMORY)
 JCGM_100 = Source(key="jcgm100", work="JCGM 100:2008, Guide to the expression of uncertainty in measurement")
+JCGM_106 = Source(
+    key="jcgm106", work="JCGM 106:2012, The role of measurement uncertainty in conformity assessment", note=FROM_MEMORY
+)
 OPENSTAX_CHEMISTRY = Source(key="openstax_chemistry", work="OpenStax, Chemistry 2e, 2019 (CC BY 4.0)")
 OPENSTAX_PHYSICS_1 = Source(key="openstax_physics_1", work="OpenStax, University Physics volume 1, 2016 (CC BY 4.0)")
 OPENSTAX_PHYSICS_2 = Source(key="openstax_physics_2", work="OpenStax, University Physics volume 2, 2016 (CC BY 4.0)")
@@ -50,6 +53,12 @@ VAN_DER_WAALS_1873 = Source(
     key="van_der_waals",
     work="van der Waals, Over de continuiteit van den gas- en vloeistoftoestand, Leiden 1873",
     note=FROM_MEMORY,
+)
+PENG_ROBINSON_1976 = Source(
+    key="peng_robinson", work="Peng, Robinson, Ind. Eng. Chem. Fundam. 15 (1976) 59", note=FROM_MEMORY
+)
+DYMOND_SMITH = Source(
+    key="dymond", work="Dymond, Smith, The virial coefficients of pure gases and mixtures, 1980", note=FROM_MEMORY
 )
 SUTHERLAND_1893 = Source(
     key="sutherland",
@@ -185,6 +194,12 @@ IEC_80079 = Source(
     work="ISO/IEC 80079-20-1:2017, Material characteristics for gas and vapour classification",
     note=FROM_MEMORY,
 )
+ARCHIMEDES = Source(key="archimedes", work="Archimedes, On floating bodies", note=FROM_MEMORY)
+ISO_3529 = Source(key="iso3529", work="ISO 3529-1:2019, Vacuum technology, Vocabulary, part 1", note=FROM_MEMORY)
+POISEUILLE_1840 = Source(key="poiseuille", work="Poiseuille, C. R. Acad. Sci. 11 (1840) 961", note=FROM_MEMORY)
+FLUID_MECHANICS = Source(key="fluid_mechanics", work="Fluid mechanics textbooks", note=FROM_MEMORY)
+GAS_DYNAMICS = Source(key="gas_dynamics", work="Gas dynamics textbooks", note=FROM_MEMORY)
+GEOMETRY = Source(key="geometry", work="Geometry")
 DEFINITION = Source(key="definition", work="Definition of the quantity")
 CONSERVATION = Source(key="conservation", work="Conservation of amount of substance")
 COMMON_PRACTICE = Source(key="common_practice", work="Common practice, no source")

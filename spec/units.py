@@ -37,6 +37,7 @@ UCUM_PERCENT = UCUM.at("percent; the UCUM code does not say what is counted")
 DEGREE = Fraction(math.pi) / 180  # π to the nearest double; every other factor is exact or as printed
 POWER = dim.ENERGY / dim.TIME
 PRINTED = SP811.at("appendix B.8, as printed there")
+ROOT = SI_BROCHURE.at("section 2.3; UCUM has no roots, so its code is an annotation")
 PRACTICE = COMMON_PRACTICE.at("named so in the trade")
 
 
@@ -162,6 +163,7 @@ TEMPERATURE = (
         "degrees F",
         zero="459.67",
     ),
+    _unit("√K", dim.TEMPERATURE ** Fraction(1, 2), 1, "{sqrt(K)}", ROOT, "sqrt K", "sqrt(K)"),
     _unit("°R", dim.TEMPERATURE, "5/9", "[degR]", B8, "R", "deg R", "°Ra", "rankine"),
     _unit("Δ°C", dim.TEMPERATURE, 1, "K", SI, "ΔK", "delta K", "delta C", "delta °C", "K difference", "°C difference"),
     _unit("Δ°F", dim.TEMPERATURE, "5/9", "[degR]", B8, "delta F", "delta °F", "°F difference"),
@@ -190,6 +192,7 @@ SPACE = (
 )
 MATTER = (
     _unit("kg", dim.MASS, 1, "kg", SI, "kgs", "kilo", "kilos", "kilogram", "kilograms"),
+    _unit("∛kg", dim.MASS ** Fraction(1, 3), 1, "{cbrt(kg)}", ROOT, "cbrt kg", "cbrt(kg)"),
     _unit("g", dim.MASS, "1/1000", "g", SI, "gram", "grams", "gramme"),
     _unit("mg", dim.MASS, "1/1000000", "mg", SI, "milligram"),
     _unit("µg", dim.MASS, "1/1000000000", "ug", SI, "ug", "microgram"),

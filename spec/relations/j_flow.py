@@ -24,6 +24,7 @@ from spec.sources import (
 from spec.symbols import as_printed, nonnegative, positive
 
 q_m, rho, v, A, C_p, dp, r, gamma, C_d, p_0, R, M, T_0 = positive("q_m rho v A C_p dp r gamma C_d p_0 R M T_0")
+K_v = positive("K_v")[0]
 q_0, N, V_rev, p, T, q_read, rho_cal, q, K_gas, K_cal = positive("q_0 N V_rev p T q_read rho_cal q K_gas K_cal")
 Q, d, p_1, mu, L, Re, D, f, Z, V, t, a, kappa = positive("Q d p_1 mu L Re D f Z V t a kappa")
 p_2, eps_r = nonnegative("p_2 eps_r")
@@ -132,6 +133,22 @@ with as_printed():
             "T_0": "12.0 °C",
         },
         words=("release", "leak through a hole", "sonic nozzle", "relief"),
+    )
+    CRITICAL_VENTURI = Relation(
+        key="critical_venturi",
+        title="Flow through a critical-flow venturi",
+        left=q,
+        right=K_v * p / sqrt(T),
+        where={
+            q: Variable(kinds.REFERENCE_FLOW, "flow at the conditions of the calibration"),
+            K_v: Variable(kinds.VENTURI_CONSTANT, "calibration constant"),
+            p: Variable(kinds.ABSOLUTE_PRESSURE, "pressure at the inlet"),
+            T: Variable(kinds.ABSOLUTE_TEMPERATURE, "temperature at the inlet"),
+        },
+        assumes=("choked", "the gas it was calibrated with"),
+        source=CFR_1066.at("1066.625 and 1066.630, critical-flow venturi"),
+        example={"K_v": "3.70e-5 m³·√K/(s·Pa)", "p": "98.3 kPa absolute", "T": "24.0 °C"},
+        words=("sonic nozzle", "CFV"),
     )
     POSITIVE_DISPLACEMENT = Relation(
         key="positive_displacement",
@@ -346,6 +363,7 @@ FAMILY = Family(
         PITOT,
         CRITICAL_RATIO,
         CHOKED_FLOW,
+        CRITICAL_VENTURI,
         POSITIVE_DISPLACEMENT,
         ROTAMETER,
         THERMAL_METER,

@@ -2,15 +2,19 @@
 
 from fractions import Fraction
 
+from sympy import exp, pi, sqrt
+
 from spec import kinds
+from spec.constants import MOLAR_GAS_CONSTANT
 from spec.model import Family, Relation, Sign, Validity, Variable
-from spec.sources import CONSERVATION
+from spec.sources import CONSERVATION, GAS_DYNAMICS, GEOMETRY
 from spec.symbols import as_printed, nonnegative, positive
 from spec.validity import ideal_at
 
 p, p_1, p_2, V_1, V_2, t, V, p_ref, q_ref, T, T_ref = positive("p p_1 p_2 V_1 V_2 t V p_ref q_ref T T_ref")
 T_1, T_2, Z_1, Z_2 = positive("T_1 T_2 Z_1 Z_2")
-(p_min,) = nonnegative("p_min")
+p_min, p_x = nonnegative("p_min p_x")
+p_0, C_d, A, psi, R, M, V_x, V_r, d, L = positive("p_0 C_d A psi R M V_x V_r d L")
 
 with as_printed():
     EQUALISE = Relation(
@@ -82,10 +86,85 @@ with as_printed():
         words=("trapped gas", "sun on a pipe"),
     )
 
+with as_printed():
+    BLOWDOWN = Relation(
+        key="blowdown",
+        title="Pressure while a vessel blows down",
+        left=p,
+        right=p_0 * exp(-C_d * A * psi * sqrt(R * T / M) * t / V),
+        where={
+            p: Variable(kinds.ABSOLUTE_PRESSURE, "pressure after the time"),
+            p_0: Variable(kinds.ABSOLUTE_PRESSURE, "pressure at the start"),
+            C_d: Variable(kinds.COEFFICIENT, "discharge coefficient of the opening"),
+            A: Variable(kinds.AREA, "area of the opening"),
+            psi: Variable(kinds.CHOKED_FACTOR, "choked-flow factor √γ·(2/(γ + 1))^((γ + 1)/(2·(γ − 1)))"),
+            R: MOLAR_GAS_CONSTANT,
+            T: Variable(kinds.ABSOLUTE_TEMPERATURE, "temperature of the gas"),
+            M: Variable(kinds.MOLAR_MASS, "molar mass of the gas"),
+            t: Variable(kinds.TIME, "time"),
+            V: Variable(kinds.VOLUME, "volume of the vessel"),
+        },
+        assumes=(
+            "the flow stays choked: twice the pressure outside, at least",
+            "the walls hold the temperature",
+            "ideal gas",
+        ),
+        valid=(Validity(holds=p <= p_0, says="A vessel that blows down cannot gain pressure.", refuse=True),),
+        source=GAS_DYNAMICS.at("isothermal blowdown of a vessel through a choked opening"),
+        example={
+            "p_0": "8.01 bar absolute",
+            "C_d": "0.80",
+            "A": "12.6 mm²",
+            "psi": "0.6847",
+            "T": "12.0 °C",
+            "M": "28.013 g/mol",
+            "t": "5.0 min",
+            "V": "640 L",
+        },
+        words=("vent", "depressurise"),
+    )
+    VOLUME_BY_EXPANSION = Relation(
+        key="volume_by_expansion",
+        title="Volume by expansion from a known one",
+        left=V_x,
+        right=V_r * (p_1 - p_2) / (p_2 - p_x),
+        where={
+            V_x: Variable(kinds.VOLUME, "volume to be known"),
+            V_r: Variable(kinds.VOLUME, "known volume"),
+            p_1: Variable(kinds.ABSOLUTE_PRESSURE, "pressure in the known volume before"),
+            p_2: Variable(kinds.ABSOLUTE_PRESSURE, "pressure in both after"),
+            p_x: Variable(kinds.ABSOLUTE_PRESSURE, "pressure in the other volume before", Sign.NONNEGATIVE),
+        },
+        assumes=("ideal gas", "one temperature before and after, waited for"),
+        source=CONSERVATION.at("amount before and after opening the valve"),
+        example={
+            "V_r": "2.000 L",
+            "p_1": "5.012 bar absolute",
+            "p_2": "1.873 bar absolute",
+            "p_x": "996.4 hPa absolute",
+        },
+        words=("expansion method", "dead volume", "section volume"),
+    )
+    PIPE_VOLUME = Relation(
+        key="pipe_volume",
+        title="Volume of a pipe",
+        left=V,
+        right=pi / 4 * d**2 * L,
+        where={
+            V: Variable(kinds.VOLUME, "volume inside"),
+            d: Variable(kinds.LENGTH, "inside bore, not the nominal size"),
+            L: Variable(kinds.LENGTH, "length"),
+        },
+        assumes=("round and of one bore",),
+        source=GEOMETRY.at("volume of a cylinder"),
+        example={"d": "54.5 mm", "L": "120 m"},
+        words=("bore", "line volume"),
+    )
+
 FAMILY = Family(
     key="m_vessels",
     letter="M",
     title="Vessels",
     lead="Cylinders, banks and sections: what joins, empties, warms up.",
-    relations=(EQUALISE, ENDURANCE, LOCKED_IN),
+    relations=(EQUALISE, ENDURANCE, LOCKED_IN, BLOWDOWN, VOLUME_BY_EXPANSION, PIPE_VOLUME),
 )

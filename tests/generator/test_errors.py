@@ -1,5 +1,7 @@
 """The generator's errors: four parts, kept and told; and how a command shows them."""
 
+import pickle
+
 import pytest
 
 from generator import commands
@@ -42,3 +44,9 @@ def test_a_word_too_many_is_refused_before_anything_runs(capsys: pytest.CaptureF
     assert capsys.readouterr().err == (
         "command build: found --fast; expected nothing more. Run it with --help for its options.\n"
     )
+
+
+def test_a_mistake_travels_between_processes_whole() -> None:
+    mistake = SpecError("relation boyle", "no source", "a work", "name it")
+    back = pickle.loads(pickle.dumps(mistake))  # noqa: S301 - our own bytes
+    assert (type(back), str(back)) == (SpecError, str(mistake))

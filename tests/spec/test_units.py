@@ -44,6 +44,8 @@ PINT = {
     "cmHg": "centimeter_Hg",
     "inHg": "inch_Hg",
     "K": "kelvin",
+    "√K": "kelvin ** 0.5",
+    "∛kg": "kilogram ** (1 / 3)",
     "°C": "delta_degree_Celsius",
     "°F": "delta_degree_Fahrenheit",
     "°R": "degree_Rankine",

@@ -5,7 +5,7 @@ Takes ``spec/cases``; gives the cases and, for each, the interval in which an an
 
 from pathlib import Path
 
-from gaswright import number, unit
+from gaswright import any_kind, number, unit
 from gaswright.find import relation
 from gaswright.reading import Reading, read
 from gaswright.records import Kind
@@ -26,7 +26,7 @@ def name_of(case: Case) -> str:
 
 def kind_of(case: Case, name: str) -> Kind:
     """Give the kind of one variable of the case's relation."""
-    return KINDS[relation(case.relation).variable(name).kind]
+    return KINDS[any_kind.settled(relation(case.relation), case.given | {case.find: case.expect}).variable(name).kind]
 
 
 def reading_of(case: Case, name: str) -> Reading:

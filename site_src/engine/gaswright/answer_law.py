@@ -6,7 +6,7 @@ gaswright.browser speaks JSON with the page; the worked examples of the pages ar
 
 from typing import Any
 
-from gaswright import conditions, quantity, show, terms
+from gaswright import any_kind, conditions, quantity, show, terms
 from gaswright import find as finder
 from gaswright.errors import NoSolutionError, OutsideRangeError, ReadingError
 from gaswright.gas import Gas
@@ -33,13 +33,16 @@ from gaswright.tables import KINDS
 from gaswright.typed import text_of
 
 STATION_ROW = "p_station"
+SIDE_ROW = "branch"
 
 
 def answer_relation(request: dict[str, Any]) -> Response:
     """Answer a law's page: rows with their states, the figure, ±, shares, working, warnings."""
     relation = finder.relation(str(request["key"]))
     asked = terms.spread(relation, _unknown(relation, request.get("find")), request.get("rows") or {})
-    relation, unknown = asked.relation, asked.unknown
+    side = str(request.get("branch") or text_of(asked.readings.pop(SIDE_ROW, None)))
+    relation, unknown = any_kind.settled(asked.relation, asked.readings), asked.unknown
+    request = {**request, "rows": asked.readings}
     unit = quantity.shown_unit(request.get("show"), KINDS[relation.variable(unknown).kind])
     mark = request.get("decimal") or "."
     taken, rows, warnings = _read_law(relation, unknown, request)
@@ -49,8 +52,10 @@ def answer_relation(request: dict[str, Any]) -> Response:
     if is_open or (relation.uses_gas and gas is None):
         return with_state(response, "empty" if not taken else "incomplete")
     try:
-        result = finish(relation, unknown, taken, Around(station, gas, tuple(warnings), unit, mark))
+        result = finish(relation, unknown, taken, Around(station, gas, tuple(warnings), unit, mark, side))
     except ReadingError as error:
+        if error.offers == relation.forms[unknown].sides:
+            rows[SIDE_ROW] = problem_row(error)
         return place_error(response, error, taken)
     except (NoSolutionError, OutsideRangeError) as error:
         return with_state({**response, "refusal": str(error)}, "refused")

@@ -8,8 +8,8 @@ import math
 from collections.abc import Callable
 from typing import TYPE_CHECKING, Any
 
-from gaswright.errors import NoSolutionError, OutsideRangeError
-from gaswright.model import Relation
+from gaswright.errors import NoSolutionError, OutsideRangeError, ReadingError
+from gaswright.model import Form, Relation
 
 if TYPE_CHECKING:
     from gaswright.gas.real import Gas
@@ -18,16 +18,50 @@ ROUNDING = 4e-15
 SIGN_WORDS = {"positive": "a value above zero", "nonnegative": "zero or a value above it", "any": "a finite value"}
 
 
-def evaluate(relation: Relation, unknown: str, values: dict[str, float], gas: "Gas | None", where: str) -> float:
-    """Give the SI value of ``unknown``. Raises NoSolutionError or OutsideRangeError, never another exception."""
+def evaluate(  # noqa: PLR0913, PLR0917 - the state, and which of two answers
+    relation: Relation, unknown: str, values: dict[str, float], gas: "Gas | None", where: str, side: str = ""
+) -> float:
+    """Give the SI value of ``unknown``.
+
+    Raises NoSolutionError or OutsideRangeError; ReadingError where two values fit and ``side`` names neither.
+    """
     form = relation.forms[unknown]
-    value = _called(form.function, [gas if name == "gas" else values[name] for name in form.arguments])
+    arguments = [gas if name == "gas" else values[name] for name in form.arguments]
+    if form.sides:
+        return _on_side(relation, form, arguments, where, side)
+    value = _called(form.function, arguments)
     sign = relation.variable(unknown).sign
     if sign == "nonnegative" and _is_rounding(relation, unknown, values, gas, value):
         return 0.0
     if isinstance(value, complex) or not math.isfinite(value) or not _has_sign(sign, value):
         raise _no_answer(relation, where, sign, value)
     return float(value)
+
+
+def _on_side(relation: Relation, form: Form, arguments: list[Any], where: str, side: str) -> float:
+    """Give the value on the side named, or the only one there is; ask where there are two."""
+    found: dict[str, float] = {}
+    missing: NoSolutionError | None = None
+    for each in (side,) if side in form.sides else form.sides:
+        try:
+            value = _called(form.function, [*arguments, each])
+        except NoSolutionError as error:
+            missing = error
+            continue
+        if math.isfinite(value) and value > 0:
+            found[each] = value
+    if len(found) == 1:
+        return next(iter(found.values()))
+    if found:
+        both = " or ".join(f"{value:.6g} ({words(each)})" for each, value in found.items())
+        raise ReadingError(where, f"two values that fit (SI): {both}", "one of them", "Say which.", offers=form.sides)
+    raise missing or _no_answer(relation, where, "positive", math.nan)
+
+
+def words(side: str) -> str:
+    """Give the name of a side in words: ``above_peak`` becomes ``above the peak``."""
+    head, _, tail = side.partition("_")
+    return f"{head} the {tail}"
 
 
 def _called(function: Callable[..., Any], arguments: list[Any]) -> Any:

@@ -7,7 +7,7 @@ gaswright.answer_law draws it for a page, gaswright.__main__ prints it.
 from collections.abc import Mapping, Sequence
 from typing import NamedTuple
 
-from gaswright import conditions, find, quantity, terms, working
+from gaswright import any_kind, conditions, find, quantity, terms, working
 from gaswright.counting import questioned, to_reference, turn
 from gaswright.errors import ReadingError
 from gaswright.evaluate import check_validity, evaluate, no_slope
@@ -52,15 +52,18 @@ def solve(  # noqa: PLR0913 - what a caller may say, all by name but three
     decimal: str | None = None,
     instruments: Instruments | None = None,
     show: str = "",
+    branch: str = "",
 ) -> Result:
     """Solve the law ``key`` for ``unknown``.
 
     ``readings`` maps variable names to typed text ("6.5 psia", "30 ± 0.2 mL"), SI floats or records; a variable with
     a default may be left out. A variable that is a list takes a list of these, with None for the term to find.
     ``station_pressure`` is needed where a gauge reading meets an absolute variable.
+    Where two values may satisfy the law, ``branch`` says which (such as "above_peak"); without it, two are asked about.
     Raises ReadingError, NoSolutionError or OutsideRangeError, each in four parts.
     """
     relation, unknown, given = terms.spread(find.relation(key), unknown, readings)
+    relation = any_kind.settled(relation, given)
     _check_names(relation, unknown, given)
     station = (
         None if station_pressure is None else read(NO_STATION, station_pressure, KINDS["station_pressure"], decimal)
@@ -69,7 +72,7 @@ def solve(  # noqa: PLR0913 - what a caller may say, all by name but three
     model = find_gas(gas_name) if relation.uses_gas and gas_name else None
     taken, warnings = _read_all(relation, unknown, given, decimal, instruments)
     shown = quantity.shown_unit({"unit": show}, KINDS[relation.variable(unknown).kind])
-    return finish(relation, unknown, taken, Around(station, model, tuple(warnings), shown, decimal or "."))
+    return finish(relation, unknown, taken, Around(station, model, tuple(warnings), shown, decimal or ".", branch))
 
 
 def _check_names(relation: Relation, unknown: str, readings: Mapping[str, Raw]) -> None:
@@ -119,18 +122,22 @@ def _refuse_sign(variable: Variable, reading: Reading, value: float) -> None:
 
 
 class Around(NamedTuple):
-    """What stands around the readings of a law: station pressure, gas, warnings so far, unit and decimal mark shown."""
+    """What stands around the readings of a law.
+
+    Station pressure, gas, warnings so far, unit and decimal mark shown; the side asked for, where two answers fit.
+    """
 
     station: Reading | None
     gas: Gas | None
     warnings: tuple[str, ...]
     show: str
     mark: str
+    side: str = ""
 
 
 def finish(relation: Relation, unknown: str, taken: dict[str, Reading], around: Around) -> Result:
     """Give the Result of readings already taken."""
-    station, gas, said_before, show, mark = around
+    station, gas, said_before, show, mark, side = around
     if relation.uses_gas and gas is None:
         raise ReadingError("gas", "nothing", "the gas by name or formula", "Choose the gas.")
     station = next(
@@ -143,7 +150,8 @@ def finish(relation: Relation, unknown: str, taken: dict[str, Reading], around: 
     )
     values, couplings = _counted(relation, taken, station)
     where = f"{relation.variable(unknown).symbol}, {relation.variable(unknown).text}"
-    values[unknown] = evaluate(relation, unknown, values, gas, where)
+    check_validity(relation, values, relation.title)
+    values[unknown] = evaluate(relation, unknown, values, gas, where, side)
     said = (*conditions.check(taken, values, kinds_of(relation)), *check_validity(relation, values, relation.title))
     slopes = sensitivities(relation, unknown, values, gas)
     combined = _combined(relation, taken, station, slopes, couplings)

@@ -32,13 +32,18 @@ class Constant(NamedTuple):
 
 
 class Form(NamedTuple):
-    """A relation solved for one unknown: ``function(*arguments)`` gives its SI value."""
+    """A relation solved for one unknown: ``function(*arguments)`` gives its SI value.
+
+    Where two values may satisfy the relation, ``sides`` names the two sides of its turning point, one of which is the
+    function's last argument.
+    """
 
     unknown: str
     function: Number
     arguments: tuple[str, ...]
     text: str
     way: str
+    sides: tuple[str, ...] = ()
 
 
 class Validity(NamedTuple):

@@ -13,6 +13,7 @@ Function = Callable[[float], float]
 
 STEPS = 200
 TIGHT = 4e-16
+TINY = 1e-12
 
 
 class Guess(NamedTuple):
@@ -72,10 +73,13 @@ def _interpolated(a: Guess, b: Guess, c: Guess, half: float) -> tuple[float, flo
 
 
 def find_root(function: Function, low: float, high: float, where: str) -> float:
-    """Give the one root of a function that only rises or only falls between ``low`` and ``high`` (both positive), or 0.
+    """Give the one root of a function that only rises or only falls between ``low`` and ``high``, or 0.
 
-    Raises NoSolutionError where the function has one sign over the whole range.
+    Where ``low`` is above zero it is sought by ratio, else by difference. Raises NoSolutionError where the function
+    has one sign over the whole range.
     """
+    if low < 0:
+        return _find_by_difference(function, low, high, where)
 
     def along(logarithm: float) -> float:
         return function(math.exp(logarithm))
@@ -89,13 +93,48 @@ def find_root(function: Function, low: float, high: float, where: str) -> float:
     if (at_start > 0) == (at_end > 0):
         if _heads_for_zero(function, at_start):
             return 0.0
-        raise NoSolutionError(
-            where,
-            f"no value between {low:g} and {high:g} (SI) that agrees with the readings",
-            "readings that one value in that range can explain",
-            "Check the readings and their units.",
-        )
+        raise _none_between(low, high, where)
     return _polished(function, math.exp(brent(along, start, end, at_start, at_end)), low, high)
+
+
+def _none_between(low: float, high: float, where: str) -> NoSolutionError:
+    return NoSolutionError(
+        where,
+        f"no value between {low:g} and {high:g} (SI) that agrees with the readings",
+        "readings that one value in that range can explain",
+        "Check the readings and their units.",
+    )
+
+
+def _find_by_difference(function: Function, low: float, high: float, where: str) -> float:
+    """Give the root over a range that reaches below zero; at zero itself the function may be undefined."""
+    least = (high - low) * TINY
+
+    def away(x: float) -> float:
+        return function(x if abs(x) >= least else math.copysign(least, x))
+
+    at_low, at_high = away(low), away(high)
+    if (at_low > 0) == (at_high > 0) and at_low and at_high:
+        raise _none_between(low, high, where)
+    return brent(away, low, high, at_low, at_high)
+
+
+def find_root_beside(  # noqa: PLR0913 - a function, where it turns, and a range
+    function: Function, turn: Callable[[], float], low: float, high: float, where: str, *, is_above: bool
+) -> float:
+    """Give the root above or below the point where the function turns; ``turn`` gives that point.
+
+    A point that cannot be worked out, or lies outside the range, leaves one side: the whole range.
+    Raises NoSolutionError where that side has none.
+    """
+    try:
+        at = min(max(turn(), low), high)
+    except (ArithmeticError, ValueError):
+        at = low
+    start, end = (at, high) if is_above else (low, at)
+    if not start < end:
+        raise _none_between(start, end, where)
+    return find_root(function, start, end, where)
 
 
 def _heads_for_zero(function: Function, at_low: float) -> bool:

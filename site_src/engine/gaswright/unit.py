@@ -63,7 +63,7 @@ def parse(
     expected = f"a unit of {title}{f' such as {", ".join(offered[:3])}' if offered else ''}"
     if not body:
         raise ReadingError(where, "no unit", expected, "Add the unit.")
-    found, reference = _counted(body, where, expected)
+    found, reference = counted(body, where, expected)
     if found.exponents != exponents:
         kind = name_of(found.exponents)
         said = f"{found.text} ({kind})" if kind else found.text
@@ -76,7 +76,7 @@ def is_pressure(text: str) -> bool:
     """Say whether a number with a unit, such as ``1 atm``, is a pressure by its unit."""
     body = product.normal(text.lstrip("+-−–0123456789., \u00a0\u2009\u202f"))
     try:
-        found, _ = _counted(body, "unit", "a unit")
+        found, _ = counted(body, "unit", "a unit")
     except ReadingError:
         return False
     return found.exponents == PRESSURE
@@ -98,7 +98,7 @@ def name_of(exponents: tuple[float, ...]) -> str:
     return SIMPLE_NAMES.get(exponents) or next(names, "")
 
 
-def _counted(body: str, where: str, expected: str) -> tuple[Product, str | None]:
+def counted(body: str, where: str, expected: str) -> tuple[Product, str | None]:
     """Read ``bar gauge``, ``bar(g)``, ``barg``: the unit and how it is counted; other units have no such word."""
     if product.knows(body):
         return product.read(body, where, expected), None
