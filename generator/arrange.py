@@ -11,7 +11,7 @@ import sympy
 
 def flatten(expression: sympy.Expr) -> sympy.Expr:
     """Join products of products and sums of sums, which ``evaluate(False)`` leaves nested, keeping their order."""
-    if not expression.args:
+    if not expression.args or isinstance(expression, sympy.Piecewise):
         return expression
     arguments = [flatten(argument) for argument in expression.args]
     if isinstance(expression, (sympy.Mul, sympy.Add)):
@@ -27,7 +27,7 @@ def flatten(expression: sympy.Expr) -> sympy.Expr:
 
 def arrange(expression: sympy.Expr, order: Mapping[sympy.Symbol, int]) -> sympy.Expr:
     """Sort the factors of every product into ``order`` (unevaluated); sums put their positive terms first."""
-    if not expression.args:
+    if not expression.args or isinstance(expression, sympy.Piecewise):
         return expression
     arguments = [arrange(argument, order) for argument in expression.args]
     if isinstance(expression, sympy.Mul):

@@ -66,6 +66,8 @@ def _of_power(expression: sympy.Pow, meaning: Meaning, where: str) -> Dimension:
 
 
 def _of_call(expression: sympy.Expr, meaning: Meaning, where: str) -> Dimension:
+    if isinstance(expression, sympy.Piecewise):
+        return _of_sum(sympy.Add(*(part for part, _ in expression.args), evaluate=False), meaning, where)
     if isinstance(expression, (Total, Others)):
         return dimension_of(expression.args[0], meaning, where)
     name = expression.func.__name__

@@ -94,9 +94,21 @@ class LineWriter:
                 found = self._product(expression)
             case sympy.Pow():
                 found = self._power(expression)
+            case sympy.Piecewise():
+                found = self._choice(expression), ATOM
             case _:
                 found = self._call(expression), ATOM
         return found
+
+    def _choice(self, expression: sympy.Piecewise) -> str:
+        """Give an expression with two cases."""
+        (first, condition), (other, _) = expression.args
+        left, right = (self._walk(side)[0] for side in (condition.lhs, condition.rhs))
+        return self.choice(self._walk(first)[0], f"{left} {condition.rel_op} {right}", self._walk(other)[0])
+
+    def choice(self, first: str, condition: str, other: str) -> str:
+        """Give ``first`` where the condition holds, ``other`` elsewhere."""
+        return f"({first} if {condition} else {other})"
 
     def _sum(self, expression: sympy.Add) -> str:
         text = ""

@@ -66,6 +66,7 @@ USUAL = {
     "critical_temperature": (50.0, 600.0),
     "acentric_factor": (-0.2, 0.6),
     "molecular_speed": (50.0, 2000.0),
+    "subsonic_ratio": (0.3, 0.999),
     "choked_factor": (0.6, 0.75),
     "latitude": (0.01, 1.5),
     "height": (1.0, 3e4),

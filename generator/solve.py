@@ -102,7 +102,7 @@ def solve_for(relation: Relation, unknown: sympy.Symbol) -> Form:
 
 def evaluated(expression: sympy.Expr) -> sympy.Expr:
     """Give an unevaluated expression as sympy would have built it, for algebra."""
-    if not expression.args:
+    if not expression.args or isinstance(expression, sympy.Piecewise):
         return expression
     return expression.func(*(evaluated(argument) for argument in expression.args))
 

@@ -274,7 +274,7 @@ ANGLE = Kind(
     si="rad",
     units=("°", "rad"),
     low=1e-6,
-    high=1.570796326794896,
+    high=1.5707963267948966,
     note="Between 0 and 90 degrees.",
 )
 FRACTION = Kind(
@@ -741,6 +741,15 @@ FREEDOM = Kind(
     units=("1",),
     low=0.5,
     high=1e9,
+)
+SUBSONIC_RATIO = Kind(
+    key="subsonic_ratio",
+    title="pressure ratio below choking",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=0.2,
+    high=0.9999999999,
 )
 SHARE_OF_LIMIT = Kind(
     key="share_of_limit",

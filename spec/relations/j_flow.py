@@ -8,7 +8,7 @@ from sympy import log, pi, sqrt
 from spec import kinds
 from spec.constants import MOLAR_GAS_CONSTANT
 from spec.dimensions import NUMBER
-from spec.model import Constant, Family, Relation, Sign, Validity, Variable
+from spec.model import Constant, Family, Relation, Sign, Split, Validity, Variable
 from spec.sources import (
     CFR_1066,
     COLEBROOK_1939,
@@ -24,7 +24,7 @@ from spec.sources import (
 from spec.symbols import as_printed, nonnegative, positive
 
 q_m, rho, v, A, C_p, dp, r, gamma, C_d, p_0, R, M, T_0 = positive("q_m rho v A C_p dp r gamma C_d p_0 R M T_0")
-K_v = positive("K_v")[0]
+K_v, r_sub = positive("K_v r")
 q_0, N, V_rev, p, T, q_read, rho_cal, q, K_gas, K_cal = positive("q_0 N V_rev p T q_read rho_cal q K_gas K_cal")
 Q, d, p_1, mu, L, Re, D, f, Z, V, t, a, kappa = positive("Q d p_1 mu L Re D f Z V t a kappa")
 p_2, eps_r = nonnegative("p_2 eps_r")
@@ -133,6 +133,51 @@ with as_printed():
             "T_0": "12.0 °C",
         },
         words=("release", "leak through a hole", "sonic nozzle", "relief"),
+    )
+    SUBSONIC_FLOW = Relation(
+        key="subsonic_flow",
+        title="Flow through a hole or nozzle below choking",
+        left=q_m,
+        right=C_d
+        * A
+        * p_0
+        * sqrt(2 * gamma * M / ((gamma - 1) * R * T_0) * (r_sub ** (2 / gamma) - r_sub ** ((gamma + 1) / gamma))),
+        where={
+            q_m: Variable(kinds.MASS_FLOW, "mass flow"),
+            C_d: Variable(kinds.COEFFICIENT, "discharge coefficient"),
+            A: Variable(kinds.AREA, "area of the hole"),
+            p_0: STAGNATION_PRESSURE,
+            gamma: HEAT_RATIO,
+            M: MOLAR_MASS,
+            R: MOLAR_GAS_CONSTANT,
+            T_0: STAGNATION_TEMPERATURE,
+            r_sub: Variable(kinds.SUBSONIC_RATIO, "pressure behind the hole over that before it, both absolute"),
+        },
+        assumes=(
+            "the pressure behind the hole is above the critical ratio",
+            "the bore before the hole is more than four times the area",
+            "ideal gas",
+        ),
+        valid=(
+            ABOVE_ONE,
+            Validity(
+                holds=r_sub >= (2 / (gamma + 1)) ** (gamma / (gamma - 1)),
+                says="Below the critical ratio the flow is choked: take the law of choked flow.",
+                refuse=True,
+            ),
+        ),
+        splits=(Split(unknown=r_sub, at=(2 / (gamma + 1)) ** (gamma / (gamma - 1)), above="above_critical"),),
+        source=NACA_1135.at("isentropic flow, equations 44 to 48; 40 CFR 1065.640"),
+        example={
+            "C_d": "0.80",
+            "A": "0.79 mm²",
+            "p_0": "1.20 bar absolute",
+            "gamma": "1.40",
+            "M": "28.013 g/mol",
+            "T_0": "12.0 °C",
+            "r": "0.83",
+        },
+        words=("nozzle", "leak through a hole", "subsonic"),
     )
     CRITICAL_VENTURI = Relation(
         key="critical_venturi",
@@ -363,6 +408,7 @@ FAMILY = Family(
         PITOT,
         CRITICAL_RATIO,
         CHOKED_FLOW,
+        SUBSONIC_FLOW,
         CRITICAL_VENTURI,
         POSITIVE_DISPLACEMENT,
         ROTAMETER,

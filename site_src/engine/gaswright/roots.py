@@ -107,16 +107,43 @@ def _none_between(low: float, high: float, where: str) -> NoSolutionError:
 
 
 def _find_by_difference(function: Function, low: float, high: float, where: str) -> float:
-    """Give the root over a range that reaches below zero; at zero itself the function may be undefined."""
+    """Give the root over a range that reaches below zero.
+
+    At zero itself the function may be undefined, and from some place outwards, too: the range is cut there.
+    """
     least = (high - low) * TINY
 
     def away(x: float) -> float:
         return function(x if abs(x) >= least else math.copysign(least, x))
 
-    at_low, at_high = away(low), away(high)
-    if (at_low > 0) == (at_high > 0) and at_low and at_high:
+    start, end = _edge(away, low, -least), _edge(away, high, least)
+    at_start, at_end = away(start), away(end)
+    if (at_start > 0) == (at_end > 0) and at_start and at_end:
         raise _none_between(low, high, where)
-    return brent(away, low, high, at_low, at_high)
+    return brent(away, start, end, at_start, at_end)
+
+
+def _edge(function: Function, outer: float, inner: float) -> float:
+    """Give the place nearest to ``outer`` where the function is defined, seen from ``inner``."""
+    if _is_defined(function, outer):
+        return outer
+    for _ in range(STEPS):
+        middle = (outer + inner) / 2
+        if middle in (outer, inner):
+            break
+        if _is_defined(function, middle):
+            inner = middle
+        else:
+            outer = middle
+    return inner
+
+
+def _is_defined(function: Function, x: float) -> bool:
+    try:
+        value = function(x)
+    except (ArithmeticError, ValueError):
+        return False
+    return not isinstance(value, complex) and math.isfinite(value)
 
 
 def find_root_beside(  # noqa: PLR0913 - a function, where it turns, and a range

@@ -8,8 +8,8 @@ from collections.abc import Iterator
 from random import Random
 from typing import Any, NamedTuple
 
+from gaswright import any_kind, terms
 from gaswright import find as finder
-from gaswright import terms
 from gaswright.errors import NoSolutionError, OutsideRangeError
 from gaswright.evaluate import check_validity, evaluate, slopes
 from gaswright.gas import Gas, find
@@ -18,7 +18,10 @@ from gaswright.model import Relation
 from gaswright.reading import read
 from gaswright.tables import KINDS
 
-LAWS = {key: terms.as_shown(finder.relation(key)) for key in FAMILY_OF}
+LAWS = {
+    key: any_kind.settled(law, law.example)
+    for key, law in ((key, terms.as_shown(finder.relation(key))) for key in FAMILY_OF)
+}
 PAIRS = [(key, unknown) for key, law in LAWS.items() for unknown in law.forms]
 GASES = ("nitrogen", "oxygen", "argon", "helium", "methane")
 TRIES = 40
@@ -104,3 +107,15 @@ def weights(relation: Relation, state: State, sizes: dict[str, float] | None = N
     found = slopes(relation, arguments(relation, state), "state")
     sizes = sizes or state.values
     return {each.name: abs(slope * sizes[each.name]) for each, slope in zip(relation.variables, found, strict=True)}
+
+
+def nearest(relation: Relation, unknown: str, state: State, wanted: float) -> float:
+    """Solve for an unknown; where two values fit, each side is asked for and the nearer one given."""
+    found = []
+    for side in relation.forms[unknown].sides or ("",):
+        try:
+            found.append(evaluate(relation, unknown, state.values, state.gas, relation.key, side))
+        except NoSolutionError:
+            if not side:
+                raise
+    return min(found, key=lambda value: abs(value - wanted))
