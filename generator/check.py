@@ -15,6 +15,7 @@ import sympy
 from generator.dimension_of import dimension_of
 from generator.errors import SpecError
 from generator.load import Case, Loaded
+from generator.parts import written_out
 from spec.dimensions import NUMBER, Dimension
 from spec.model import Constant, GasName, Nature, Relation, Variable
 
@@ -55,6 +56,7 @@ def _names(loaded: Loaded) -> Iterator[SpecError]:
 
 def _relation(relation: Relation, cases: tuple[Case, ...]) -> Iterator[SpecError]:
     where = f"relation {relation.key}"
+    relation = written_out(relation)
     unbound = _symbols(relation) - set(relation.where)
     for symbol in sorted(unbound, key=str):
         yield SpecError(

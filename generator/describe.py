@@ -18,13 +18,26 @@ from generator.arrange import arrange
 from generator.check import Checked, variables_of
 from generator.emit_engine import form_text, relation_python
 from generator.errors import SpecError
+from generator.parts import slope, used_parts
 from generator.printers import TextWriter, equation_mathml, latex, mathml, symbol_latex, symbol_text
 from generator.solve import Form, SolvedRelation, Way, order_of, solve_relation
-from generator.terms import slope_by_own, slope_by_term
+from generator.terms import slope_by_term
 from spec.model import Relation
 from spec.symbols import is_list
 
-STAGES = ("arrange", "check", "describe", "emit_engine", "isolate", "printers", "prove", "solve", "terms")
+STAGES = (
+    "arrange",
+    "check",
+    "describe",
+    "emit_engine",
+    "isolate",
+    "parameters",
+    "parts",
+    "printers",
+    "prove",
+    "solve",
+    "terms",
+)
 HERE = Path(__file__).parent
 
 
@@ -50,6 +63,7 @@ class RelationText:
     text: str
     mathml: str
     forms: tuple[FormText, ...]
+    parts: tuple[tuple[str, str], ...] = ()
 
 
 def describe(checked: Checked, cache: Path) -> Mapping[str, RelationText]:
@@ -93,6 +107,10 @@ def describe_relation(relation: Relation, family: str) -> RelationText:
         text=f"{text(relation.left)} = {text(relation.right)}",
         mathml=equation_mathml(relation.left, relation.right),
         forms=tuple(_form(solved, form) for form in solved.forms.values()),
+        parts=tuple(
+            (f"{text(symbol)} = {text(value)}", equation_mathml(symbol, value))
+            for symbol, value in relation.parts.items()
+        ),
     )
 
 
@@ -114,14 +132,15 @@ def _form(solved: SolvedRelation, form: Form) -> FormText:
 def _sensitivities(relation: Relation, form: Form) -> tuple[tuple[str, str], ...]:
     expression = sympy.sympify(form.expression)
     found = []
-    for symbol in [symbol for symbol in variables_of(relation) if expression.has(symbol)]:
+    inside = [expression, *used_parts(relation.parts, [expression]).values()]
+    for symbol in [symbol for symbol in variables_of(relation) if any(part.has(symbol) for part in inside)]:
         plain = expression.doit()
-        moved = slope_by_own(plain, symbol) + (slope_by_term(plain, symbol) if is_list(symbol) else 0)
+        moved = slope(plain, symbol, relation.parts) + (slope_by_term(plain, symbol) if is_list(symbol) else 0)
         if moved == 0:  # a list that stands only in the sum over the other terms
             continue
-        slope = arrange(sympy.factor_terms(moved), order_of(relation))
+        by_symbol = arrange(sympy.factor_terms(moved), order_of(relation))
         label = f"∂{symbol_text(form.unknown.name)}/∂{symbol_text(symbol.name)}"
-        found.append((label, TextWriter().write(slope)))
+        found.append((label, TextWriter().write(by_symbol)))
     return tuple(found)
 
 
@@ -134,6 +153,8 @@ def stage_digest() -> str:
 def _digest(relation: Relation, code: str) -> str:
     facts = [sympy.srepr(relation.left), sympy.srepr(relation.right), repr(relation), code]
     facts += [sympy.srepr(item.holds) for item in relation.valid]
+    facts += [sympy.srepr(item.at) for item in relation.splits]
+    facts += [sympy.srepr(part) for part in relation.parts.values()]
     return hashlib.sha256("\0".join(facts).encode()).hexdigest()
 
 
@@ -145,7 +166,8 @@ def _from_cache(path: Path) -> RelationText | None:
         FormText(**{**form, "sensitivities": tuple(tuple(pair) for pair in form["sensitivities"])})
         for form in facts.pop("forms")
     )
-    return RelationText(**facts, forms=forms)
+    parts = tuple((text, element) for text, element in facts.pop("parts"))
+    return RelationText(**facts, forms=forms, parts=parts)
 
 
 def _to_cache(path: Path, text: RelationText | None) -> None:

@@ -12,6 +12,7 @@ import sympy
 
 from generator.check import constants_of, variables_of
 from generator.parameters import OWN, Parameter, form_parameters, terms_name, whole_parameters
+from generator.parts import put_in, used_parts
 from generator.printers import PythonWriter, TextWriter, symbol_text
 from generator.solve import Form, SolvedRelation, Way, evaluated
 from generator.terms import is_per_term, lists_of, own_symbol
@@ -137,10 +138,18 @@ def _docstring(relation: Relation, form: Form, variable: Variable, parameters: t
     yield '    """'
 
 
-def _constants(relation: Relation, expressions: tuple[sympy.Expr, ...]) -> Iterator[str]:
+def _constants(relation: Relation, expressions: tuple[sympy.Basic, ...]) -> Iterator[str]:
+    """Set the constants that the expressions and their parts need."""
+    needed = (*expressions, *used_parts(relation.parts, expressions).values())
     for symbol, constant in constants_of(relation).items():
-        if any(expression.has(symbol) for expression in expressions):
+        if any(expression.has(symbol) for expression in needed):
             yield f"    {symbol.name} = {float(constant.value)!r}"
+
+
+def _parts(relation: Relation, expressions: tuple[sympy.Basic, ...], indent: str = "    ") -> Iterator[str]:
+    """Work out the parts that the expressions need."""
+    for symbol, value in used_parts(relation.parts, expressions).items():
+        yield f"{indent}{symbol.name} = {PythonWriter().write(value)}"
 
 
 def _body(relation: Relation, form: Form) -> Iterator[str]:
@@ -148,6 +157,8 @@ def _body(relation: Relation, form: Form) -> Iterator[str]:
     kind = variables_of(relation)[form.unknown].kind
     low, high = (kind.low if kind.low < 0 else max(kind.low, 1e-300)), kind.high
     where = f"{relation.title}, {form.unknown.name}"
+    if form.way is not Way.NUMERIC:
+        yield from _parts(relation, _expressions(relation, form))
     if form.way is Way.CLOSED and form.expression is not None:
         yield f"    return {write(form.expression)}"
     elif form.way is Way.GAS:
@@ -157,6 +168,7 @@ def _body(relation: Relation, form: Form) -> Iterator[str]:
         yield f"    return polynomial_root(({coefficients}), {low!r}, {high!r}, {form.root.value!r}, {where!r})"
     else:
         yield f"    def residual({form.unknown.name}: float) -> float:"
+        yield from _parts(relation, (relation.left, relation.right), "        ")
         yield f"        return {write(relation.left)} - ({write(relation.right)})"
         yield ""
         yield from _search(form, low, high, where)
@@ -201,6 +213,7 @@ def _residual(solved: SolvedRelation) -> str:
             '    """Give left - right of the relation, in SI."""',
             *_constants(relation, (relation.left, relation.right)),
             *_own_terms(relation),
+            *_parts(relation, (relation.left, relation.right)),
             f"    return {write(relation.left)} - ({write(relation.right)})",
         ]
     )
@@ -219,6 +232,7 @@ def _slopes(solved: SolvedRelation) -> str:
             *_constants(relation, (*solved.slopes.values(), *solved.own_slopes.values())),
             *_own_terms(relation, is_named_own=True),
             *_own_slopes(solved),
+            *_parts(relation, tuple(solved.slopes.values())),
             "    return (",
             *(f"        {_slope(solved, symbol)}," for symbol in variables),
             "    )",
@@ -249,7 +263,8 @@ def _each_slope(solved: SolvedRelation, name: str) -> str:
 
 
 def _validity_arguments(relation: Relation, validity: Validity) -> list[sympy.Symbol]:
-    return [symbol for symbol in variables_of(relation) if validity.holds.has(symbol)]
+    whole = put_in(validity.holds, relation.parts)
+    return [symbol for symbol in variables_of(relation) if whole.has(symbol)]
 
 
 def _validity_function(relation: Relation, place: int, validity: Validity) -> str:
@@ -260,7 +275,8 @@ def _validity_function(relation: Relation, place: int, validity: Validity) -> st
         [
             f"def {relation.key}_holds_{place}({names}) -> bool:",
             '    """Tell whether the relation holds there."""',
-            *_constants(relation, (validity.holds.lhs, validity.holds.rhs)),
+            *_constants(relation, (validity.holds,)),
+            *_parts(relation, (validity.holds,)),
             f"    return {sides}",
         ]
     )
@@ -321,7 +337,8 @@ def _list_fields(relation: Relation) -> Iterator[str]:
 
 def _variable(symbol: sympy.Symbol, meaning: Variable) -> str:
     default = None if meaning.default is None else float(meaning.default)
-    values = (symbol.name, symbol_text(symbol.name), meaning.kind.key, meaning.text, SIGNS[meaning.sign], default)
+    facts = (symbol.name, symbol_text(symbol.name), meaning.kind.key, meaning.text, SIGNS[meaning.sign], default)
+    values: tuple[object, ...] = (*facts, meaning.choices) if meaning.choices else facts
     return f"        Variable({', '.join(map(repr, values))}),"
 
 
@@ -344,5 +361,6 @@ def form_text(relation: Relation, form: Form) -> str:
     """Give the right side of a solved form as a plain line; the relation itself where it is found numerically."""
     text = TextWriter().write
     if form.way is Way.CLOSED and form.expression is not None:
-        return text(form.expression)
-    return f"from {text(relation.left)} = {text(relation.right)}"
+        return text(put_in(form.expression, relation.parts))
+    parts = ", ".join(f"{text(symbol)} = {text(value)}" for symbol, value in relation.parts.items())
+    return f"from {text(relation.left)} = {text(relation.right)}{f', with {parts}' if parts else ''}"

@@ -22,7 +22,7 @@ from generator.check import constants_of, variables_of
 from generator.describe import FormText, RelationText
 from generator.load import Case
 from generator.printers import mathml, symbol_latex, symbol_text
-from generator.row_views import REFERENCES, may_be_negative, settled, split, units_of
+from generator.row_views import REFERENCES, Typed, may_be_negative, settled, split, units_of
 from generator.terms import expand, lists_of
 from generator.views import CheckView, FormView, RelationView, RowView
 from spec import scenario
@@ -60,6 +60,7 @@ def law_view(
         family=family.title,
         mathml=text.mathml,
         text=text.text,
+        parts=text.parts,
         assumes=relation.assumes,
         validity=tuple(dict.fromkeys(item.says for item in relation.valid)),
         source=str(relation.source),
@@ -151,7 +152,11 @@ def _side_row(relation: Relation) -> RowView:
 def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowView:
     default = "" if variable.default is None else f"{float(variable.default):g}"
     variable = replace(variable, kind=_kind_shown(relation, variable))
-    typed = split(_typed(relation, name, default), variable.kind)
+    typed = (
+        Typed(_typed(relation, name), "", "")
+        if variable.choices
+        else split(_typed(relation, name, default), variable.kind)
+    )
     unit = typed.unit if name in relation.example else _like(relation, variable) or typed.unit
     return RowView(
         name=name,
@@ -159,7 +164,7 @@ def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowVi
         symbol=symbol_text(name),
         mathml=mathml(symbol_latex(name), display="inline"),
         kind=variable.kind.key,
-        units=units_of(variable.kind, unit),
+        units=() if variable.choices else units_of(variable.kind, unit),
         references=REFERENCES.get(variable.kind.key, ()),
         text=typed.text,
         unit=unit,
@@ -167,6 +172,7 @@ def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowVi
         is_found=name == found,
         may_be_negative=variable.sign is Sign.ANY or may_be_negative(variable.kind),
         is_optional=variable.default is not None,
+        choices=tuple((word, word) for word in variable.choices),
         term=int(place) if (place := name.rpartition("_i_")[2]).isdigit() and "_i_" in name else 0,
     )
 

@@ -7,6 +7,7 @@ Next: generator.emit_engine and generator.make_views.
 
 import re
 from collections.abc import Mapping, Sequence
+from decimal import Decimal
 
 import sympy
 from latex2mathml.converter import convert
@@ -34,6 +35,7 @@ GREEK = {
     "eps": "ε",
     "pi": "π",
 }
+TENS = 10**12
 TERMS = {Total: "terms", Others: "others"}
 LATEX = {"lam": r"\lambda", "eps": r"\varepsilon"}
 TERM = re.compile(r"_i_(\d+)$")
@@ -101,10 +103,20 @@ class LineWriter:
         return found
 
     def _choice(self, expression: sympy.Piecewise) -> str:
-        """Give an expression with two cases."""
-        (first, condition), (other, _) = expression.args
+        """Give an expression with cases, the last of which holds where no other does."""
+        *cases, (other, _) = expression.args
+        text = self._walk(other)[0]
+        for value, condition in reversed(cases):
+            text = self.choice(self._walk(value)[0], self._condition(condition), text)
+        return text
+
+    def _condition(self, condition: sympy.Basic) -> str:
+        """Give a comparison, or several joined by and / or."""
+        if isinstance(condition, (sympy.Or, sympy.And)):
+            word = " or " if isinstance(condition, sympy.Or) else " and "
+            return word.join(self._condition(part) for part in sorted(condition.args, key=str))
         left, right = (self._walk(side)[0] for side in (condition.lhs, condition.rhs))
-        return self.choice(self._walk(first)[0], f"{left} {condition.rel_op} {right}", self._walk(other)[0])
+        return f"{left} {condition.rel_op} {right}"
 
     def choice(self, first: str, condition: str, other: str) -> str:
         """Give ``first`` where the condition holds, ``other`` elsewhere."""
@@ -250,6 +262,10 @@ class TextWriter(LineWriter):
         """Give π."""
         return GREEK[name]
 
+    def choice(self, first: str, condition: str, other: str) -> str:
+        """Give the case and its condition in words."""
+        return f"[{first} where {condition.replace('>=', '≥').replace('<=', '≤')}, else {other}]"
+
     def _call(self, expression: sympy.Expr) -> str:
         if isinstance(expression, sympy.Derivative):
             return f"∂{self._walk(expression.expr)[0]}/∂{self._walk(expression.variables[0])[0]}"
@@ -262,7 +278,20 @@ class TextWriter(LineWriter):
 
     def write(self, expression: sympy.Expr) -> str:
         """Give the expression as one line with a true minus sign."""
-        return super().write(expression).replace(" - ", " − ").replace("-", "−")
+        return super().write(with_decimals(expression)).replace(" - ", " − ").replace("-", "−")
+
+
+def with_decimals(expression: sympy.Expr) -> sympy.Expr:
+    """Write fractions over tens, hundreds and so on as decimals, 0.5961 rather than 5961/10000; thirds stay."""
+    if isinstance(expression, sympy.Rational) and expression.q % 5 == 0 and TENS % expression.q == 0:
+        digits = sympy.Symbol(f"{Decimal(abs(expression.p)) / expression.q:f}", positive=True)
+        return digits if expression > 0 else sympy.Mul(-1, digits, evaluate=False)
+    if not expression.args or isinstance(expression, sympy.Derivative):
+        return expression
+    arguments = [with_decimals(argument) for argument in expression.args]
+    if isinstance(expression, (sympy.Add, sympy.Mul, sympy.Pow)):
+        return expression.func(*arguments, evaluate=False)
+    return expression.func(*arguments)
 
 
 def symbol_text(name: str) -> str:
@@ -294,7 +323,7 @@ def symbol_latex(name: str) -> str:
 def latex(expression: sympy.Expr) -> str:
     """Give an unevaluated expression in LaTeX, in the order it was written."""
     names = {symbol: symbol_latex(symbol.name) for symbol in expression.free_symbols}
-    text = sympy.latex(flatten(expression), order="none", symbol_names=names)
+    text = sympy.latex(flatten(with_decimals(expression)), order="none", symbol_names=names)
     return (
         str(text)
         .replace(r"\operatorname{rho_{gas}}", r"\rho_{\mathrm{gas}}")

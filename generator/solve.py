@@ -15,6 +15,7 @@ from generator.arrange import arrange, flatten
 from generator.check import variables_of
 from generator.errors import SpecError
 from generator.isolate import isolate, peel
+from generator.parts import Parts, depends, put_in, slope, written_out
 from generator.prove import is_monotonic, is_monotonic_beside, prove_closed
 from generator.terms import (
     PROVEN_TERMS,
@@ -23,7 +24,6 @@ from generator.terms import (
     lists_of,
     name_own,
     single_out,
-    slope_by_own,
     slope_by_term,
     term,
     write_out,
@@ -84,14 +84,15 @@ def solve_relation(relation: Relation) -> SolvedRelation:
     unknowns = solved if relation.nature not in (Nature.DECISION, Nature.FIT) else [relation.left]
     forms = {symbol.name: _form(relation, symbol, left, right) for symbol in unknowns}
     order = order_of(relation)
-    slopes = {symbol.name: arrange(_slope(left - right, symbol), order) for symbol in variables}
-    own = {symbol.name: arrange(name_own(slope_by_own(left - right, symbol)), order) for symbol in lists_of(relation)}
+    parts = relation.parts
+    slopes = {symbol.name: arrange(_slope(left - right, symbol, parts), order) for symbol in variables}
+    own = {symbol.name: arrange(name_own(slope(left - right, symbol, parts)), order) for symbol in lists_of(relation)}
     return SolvedRelation(
         relation=relation,
         forms=forms,
         slopes=slopes,
         own_slopes=own if is_per_term(relation) else {},
-        uses_gas=_uses_gas(left - right),
+        uses_gas=_uses_gas(put_in(left - right, parts)),
     )
 
 
@@ -107,9 +108,9 @@ def evaluated(expression: sympy.Expr) -> sympy.Expr:
     return expression.func(*(evaluated(argument) for argument in expression.args))
 
 
-def _slope(residual: sympy.Expr, symbol: sympy.Symbol) -> sympy.Expr:
+def _slope(residual: sympy.Expr, symbol: sympy.Symbol, parts: Parts) -> sympy.Expr:
     """Differentiate by a variable; by a list, differentiate by one term of it."""
-    return slope_by_term(residual, symbol) if is_list(symbol) else slope_by_own(residual, symbol)
+    return slope_by_term(residual, symbol) if is_list(symbol) else slope(residual, symbol, parts)
 
 
 def order_of(relation: Relation) -> Mapping[sympy.Symbol, int]:
@@ -126,16 +127,18 @@ def _form(relation: Relation, unknown: sympy.Symbol, left: sympy.Expr, right: sy
     inverse = _gas_form(left, right, unknown, arguments)
     if inverse is not None:
         return inverse
-    closed = _textbook(relation, unknown) or _isolated(relation, left, right, unknown)
+    is_inside = depends(left - right, unknown, relation.parts)  # then no one operation undoes it
+    closed = None if is_inside else _textbook(relation, unknown) or _isolated(relation, left, right, unknown)
     if closed is not None:
         proof = _proof(relation, unknown, closed, left - right)
         return Form(unknown=unknown, way=Way.CLOSED, arguments=arguments, expression=closed, proof=proof)
     if lists_of(relation):
         raise _no_closed_form(relation, unknown)
-    residual = left - right
+    relation = written_out(relation)
+    residual = evaluated(relation.left) - evaluated(relation.right)
     return (
         _split(relation, unknown, residual, arguments)
-        or _polynomial(relation, unknown, residual, arguments)
+        or (None if is_inside else _polynomial(relation, unknown, residual, arguments))
         or _numeric(relation, unknown, residual, arguments)
     )
 
@@ -144,7 +147,8 @@ def _proof(relation: Relation, unknown: sympy.Symbol, form: sympy.Expr, residual
     """Prove a closed form; one over lists is proven written out for a few terms."""
     lists = lists_of(relation)
     if not lists:
-        return prove_closed(relation, unknown, form, residual)
+        whole = put_in(form.doit(), relation.parts)
+        return prove_closed(written_out(relation), unknown, whole, put_in(residual, relation.parts))
     plain = expand(relation, PROVEN_TERMS)
     own = term(unknown, 1) if is_list(unknown) else unknown
     residual = evaluated(plain.left) - evaluated(plain.right)

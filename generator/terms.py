@@ -77,13 +77,6 @@ def name_own(expression: sympy.Expr) -> sympy.Expr:
     return outside.xreplace({each: own_symbol(each) for each in outside.free_symbols if is_list(each)}).xreplace(back)
 
 
-def slope_by_own(expression: sympy.Expr, symbol: sympy.Symbol) -> sympy.Expr:
-    """Differentiate by the places of ``symbol`` outside the sums."""
-    held = {total: sympy.Dummy(positive=True) for total in expression.atoms(Total, Others)}
-    back = {dummy: total for total, dummy in held.items()}
-    return sympy.diff(expression.xreplace(held), symbol).xreplace(back)
-
-
 def _totals(expression: sympy.Expr, unknown: sympy.Symbol) -> list[sympy.Expr]:
     return sorted((total for total in expression.atoms(Total) if total.has(unknown)), key=str)
 

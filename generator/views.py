@@ -74,6 +74,7 @@ class RelationView:
     mathml: str
     text: str
     assumes: tuple[str, ...]
+    parts: tuple[tuple[str, str], ...] = ()
     validity: tuple[str, ...]
     source: str
     rows: tuple[RowView, ...]

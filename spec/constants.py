@@ -7,7 +7,7 @@ from fractions import Fraction
 
 from spec import dimensions as dim
 from spec.model import Constant
-from spec.sources import CODATA, ICAO_ATMOSPHERE, ISO_80000_4, SI_BROCHURE, WMO_8
+from spec.sources import CODATA, FOOT_1959, ICAO_ATMOSPHERE, ISO_80000_4, SI_BROCHURE, WMO_8
 
 BOLTZMANN_CONSTANT = Constant(
     title="Boltzmann constant",
@@ -78,4 +78,11 @@ STANDARD_AIR_CONSTANT = Constant(
     unit="J/(kg·K)",
     dimension=dim.ENERGY / (dim.MASS * dim.TEMPERATURE),
     source=ICAO_ATMOSPHERE.at("primary constants"),
+)
+INCH_LENGTH = Constant(
+    title="inch, the distance of flange tappings",
+    value=Fraction("0.0254"),
+    unit="m",
+    dimension=dim.LENGTH,
+    source=FOOT_1959.at("yard and pound, exact"),
 )

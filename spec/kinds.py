@@ -751,6 +751,42 @@ SUBSONIC_RATIO = Kind(
     low=0.2,
     high=0.9999999999,
 )
+CHOICE = Kind(
+    key="choice",
+    title="choice",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=0.0,
+    high=10.0,
+)
+PLATE_BORE = Kind(
+    key="plate_bore",
+    title="bore of an orifice plate",
+    dimension=dim.LENGTH,
+    si="m",
+    units=("mm", "cm", "m", "in"),
+    low=1e-3,
+    high=1.0,
+)
+PIPE_BORE = Kind(
+    key="pipe_bore",
+    title="bore of a metering pipe",
+    dimension=dim.LENGTH,
+    si="m",
+    units=("mm", "cm", "m", "in"),
+    low=1e-3,
+    high=2.0,
+)
+ISENTROPIC = Kind(
+    key="isentropic_exponent",
+    title="isentropic exponent",
+    dimension=dim.NUMBER,
+    si="1",
+    units=("1",),
+    low=1.0,
+    high=1e9,
+)
 SHARE_OF_LIMIT = Kind(
     key="share_of_limit",
     title="share of a limit",

@@ -117,12 +117,16 @@ class Constant:
 
 @dataclass(frozen=True, slots=True)
 class Variable:
-    """A variable of a relation: its kind, what it means there, its sign and a value taken when none is given."""
+    """A variable of a relation: its kind, what it means there, its sign and a value taken when none is given.
+
+    With ``choices`` it is one of these words, and stands in the equation as its place among them, from 0.
+    """
 
     kind: Kind
     text: str
     sign: Sign = Sign.POSITIVE
     default: Fraction | None = None
+    choices: tuple[str, ...] = ()
 
 
 @dataclass(frozen=True, slots=True)
@@ -172,7 +176,7 @@ class Relation:
     in textbook order, which labels, signatures and printing follow. ``example`` holds typed readings of the invented
     demo scenario; the unknown that is left out is the one found. A symbol whose name ends in ``_i`` is a list of any
     length; ``turned`` names the relation that gives such a list back whole. ``data`` are constants of the substance,
-    which are looked up and never asked for.
+    which are looked up and never asked for. ``parts`` name what the equation is built of, each from those before it.
     """
 
     key: str
@@ -187,6 +191,7 @@ class Relation:
     branches: tuple[Branch, ...] = ()
     splits: tuple[Split, ...] = ()
     data: tuple[sympy.Symbol, ...] = ()
+    parts: Mapping[sympy.Symbol, sympy.Expr] = MappingProxyType({})
     nature: Nature = Nature.LAW
     words: tuple[str, ...] = ()
     turned: Mapping[sympy.Symbol, str] = MappingProxyType({})

@@ -119,6 +119,11 @@ GREENSPAN_1976 = Source(
 NACA_1135 = Source(
     key="naca1135", work="NACA Report 1135, Equations, tables and charts for compressible flow, 1953", note=FROM_MEMORY
 )
+ISO_5167_2 = Source(
+    key="iso5167",
+    work="ISO 5167-2:2003, Measurement of fluid flow by pressure differential devices, orifice plates",
+    note=FROM_MEMORY,
+)
 ISO_9300 = Source(key="iso9300", work="ISO 9300:2005, Gas flow by critical flow Venturi nozzles", note=FROM_MEMORY)
 COLEBROOK_1939 = Source(
     key="colebrook",

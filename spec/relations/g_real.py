@@ -19,13 +19,16 @@ from spec.symbols import as_printed, gas, nonnegative, positive, real, rho_gas
 p, a, V_m, b, R, T, rho, m, V = positive("p a V_m b R T rho m V")
 Z, T_c, p_c, f, rho_w, rho_l, rho_v, V_0, V_l, rho_0 = positive("Z T_c p_c f rho_w rho_l rho_v V_0 V_l rho_0")
 (m_l,) = nonnegative("m_l")
-B, omega = real("B omega")
+B, omega, kappa = real("B omega kappa")
+(alpha,) = positive("alpha")
 
 with as_printed():
-    CO_VOLUME = Rational(7780, 100000) * R * T_c / p_c
-    ATTRACTION = Rational(45724, 100000) * (R * T_c) ** 2 / p_c
-    SLOPE = Rational(37464, 100000) + Rational(154226, 100000) * omega - Rational(26992, 100000) * omega**2
-    ALPHA = (1 + SLOPE * (1 - sqrt(T / T_c))) ** 2
+    PENG_ROBINSON_PARTS = {
+        a: Rational(45724, 100000) * (R * T_c) ** 2 / p_c,
+        b: Rational(7780, 100000) * R * T_c / p_c,
+        kappa: Rational(37464, 100000) + Rational(154226, 100000) * omega - Rational(26992, 100000) * omega**2,
+        alpha: (1 + kappa * (1 - sqrt(T / T_c))) ** 2,
+    }
 
 with as_printed():
     VAN_DER_WAALS = Relation(
@@ -135,7 +138,8 @@ with as_printed():
         key="peng_robinson",
         title="Peng–Robinson equation",
         left=p,
-        right=R * T / (V_m - CO_VOLUME) - ATTRACTION * ALPHA / (V_m**2 + 2 * CO_VOLUME * V_m - CO_VOLUME**2),
+        right=R * T / (V_m - b) - a * alpha / (V_m**2 + 2 * b * V_m - b**2),
+        parts=PENG_ROBINSON_PARTS,
         where={
             p: Variable(kinds.ABSOLUTE_PRESSURE, "pressure of the gas"),
             T: Variable(kinds.ABSOLUTE_TEMPERATURE, "temperature of the gas"),
@@ -149,7 +153,7 @@ with as_printed():
         assumes=("0.5 to 20 % off at 300 bar: a reference, not for signing",),
         valid=(
             Validity(
-                holds=V_m > CO_VOLUME,
+                holds=V_m > b,
                 says="The molar volume must be larger than the volume of the molecules, 0.0778·R·T_c/p_c.",
                 refuse=True,
             ),

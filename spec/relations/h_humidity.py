@@ -26,7 +26,7 @@ a_1, a_2, a_3, a_4, a_5, a_6 = real("a_1 a_2 a_3 a_4 a_5 a_6")
 b_1, b_2, b_3 = positive("b_1 b_2 b_3")
 g_1, g_2, g_3, g_4, g_5, g_6, g_7 = real("g_1 g_2 g_3 g_4 g_5 g_6 g_7")
 U, x_w, d_w, e_any = nonnegative("U x_w d_w e")
-(t,) = real("t")
+t, alpha, beta = real("t alpha beta")
 
 
 def _number(title: str, value: str, source: Citation) -> Constant:
@@ -84,8 +84,10 @@ def _cubic(factors: tuple[sympy.Symbol, ...]) -> sympy.Expr:
 
 
 with as_printed():
-    ALPHA = sympy.Piecewise((_cubic(WATER_FACTORS[:4]), t >= 0), (_cubic(ICE_FACTORS[:4]), True))
-    BETA = exp(sympy.Piecewise((_cubic(WATER_FACTORS[4:]), t >= 0), (_cubic(ICE_FACTORS[4:]), True)))
+    HARDY_PARTS = {
+        alpha: sympy.Piecewise((_cubic(WATER_FACTORS[:4]), t >= 0), (_cubic(ICE_FACTORS[:4]), True)),
+        beta: exp(sympy.Piecewise((_cubic(WATER_FACTORS[4:]), t >= 0), (_cubic(ICE_FACTORS[4:]), True))),
+    }
 SUPERCOOLED = Validity(
     holds=sympy.Ge(t, -45, evaluate=False), says="Below −45 °C the Magnus form over water is not stated."
 )
@@ -277,7 +279,8 @@ with as_printed():
         key="enhancement_factor",
         title="Enhancement factor of moist air",
         left=f_e,
-        right=exp(ALPHA * (1 - e_s / p) + BETA * (p / e_s - 1)),
+        right=exp(alpha * (1 - e_s / p) + beta * (p / e_s - 1)),
+        parts=HARDY_PARTS,
         where={
             f_e: Variable(kinds.ENHANCEMENT, "enhancement factor"),
             e_s: Variable(kinds.VAPOUR_PRESSURE, "saturation vapour pressure of pure water at t"),

@@ -9,6 +9,7 @@ from spec import kinds
 from spec.constants import MOLAR_GAS_CONSTANT
 from spec.dimensions import NUMBER
 from spec.model import Constant, Family, Relation, Sign, Split, Validity, Variable
+from spec.relations.j_orifice import ORIFICE_PLATE
 from spec.sources import (
     CFR_1066,
     COLEBROOK_1939,
@@ -409,6 +410,7 @@ FAMILY = Family(
         CRITICAL_RATIO,
         CHOKED_FLOW,
         SUBSONIC_FLOW,
+        ORIFICE_PLATE,
         CRITICAL_VENTURI,
         POSITIVE_DISPLACEMENT,
         ROTAMETER,

@@ -107,10 +107,24 @@ def kinds_of(relation: Relation) -> dict[str, str]:
 
 def read_variable(variable: Variable, raw: Raw, decimal: str | None, instruments: Instruments | None) -> Reading:
     """Read one variable of a law and refuse a value of the wrong sign."""
-    reading = read(f"{variable.symbol}, {variable.text}", raw, KINDS[variable.kind], decimal, instruments)
+    where = f"{variable.symbol}, {variable.text}"
+    if variable.choices and not isinstance(raw, (int, float)):
+        return _chosen(variable, raw, where)
+    reading = read(where, raw, KINDS[variable.kind], decimal, instruments)
     if reading.reference == KINDS[variable.kind].reference:
         _refuse_sign(variable, reading, reading.value)
     return reading
+
+
+def _chosen(variable: Variable, raw: Raw, where: str) -> Reading:
+    """Give the place of a word among the choices of a variable, as an exact reading."""
+    typed = text_of(raw)
+    words = [word for word in variable.choices if word.casefold() == typed.casefold()]
+    if not words:
+        expected = f"one of {', '.join(variable.choices)}"
+        raise ReadingError(where, repr(typed[:40]), expected, "Choose one.", offers=variable.choices)
+    reading = read(where, float(variable.choices.index(words[0])), KINDS[variable.kind])
+    return reading._replace(text=words[0])
 
 
 def _refuse_sign(variable: Variable, reading: Reading, value: float) -> None:

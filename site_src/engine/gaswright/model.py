@@ -11,7 +11,10 @@ Number = Callable[..., float]
 
 
 class Variable(NamedTuple):
-    """A variable of a relation: SI value of the kind named, with its sign (positive, nonnegative or any)."""
+    """A variable of a relation: SI value of the kind named, with its sign (positive, nonnegative or any).
+
+    With ``choices`` it is one of these words, and its value is the word's place among them.
+    """
 
     name: str
     symbol: str
@@ -19,6 +22,7 @@ class Variable(NamedTuple):
     text: str
     sign: str
     default: float | None
+    choices: tuple[str, ...] = ()
 
 
 class Constant(NamedTuple):
