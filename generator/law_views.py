@@ -22,7 +22,7 @@ from generator.check import constants_of, variables_of
 from generator.describe import FormText, RelationText
 from generator.load import Case
 from generator.printers import mathml, symbol_latex, symbol_text
-from generator.row_views import REFERENCES, Typed, may_be_negative, settled, split, units_of
+from generator.row_views import ANY_UNITS, REFERENCES, Typed, may_be_negative, settled, split, units_of
 from generator.terms import expand, lists_of
 from generator.views import CheckView, FormView, RelationView, RowView
 from spec import scenario
@@ -151,6 +151,7 @@ def _side_row(relation: Relation) -> RowView:
 
 def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowView:
     default = "" if variable.default is None else f"{float(variable.default):g}"
+    is_any = variable.kind.key == any_kind.ANY
     variable = replace(variable, kind=_kind_shown(relation, variable))
     typed = (
         Typed(_typed(relation, name), "", "")
@@ -164,7 +165,7 @@ def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowVi
         symbol=symbol_text(name),
         mathml=mathml(symbol_latex(name), display="inline"),
         kind=variable.kind.key,
-        units=() if variable.choices else units_of(variable.kind, unit),
+        units=_units(variable, unit, is_any=is_any),
         references=REFERENCES.get(variable.kind.key, ()),
         text=typed.text,
         unit=unit,
@@ -175,6 +176,15 @@ def _row(name: str, variable: Variable, relation: Relation, found: str) -> RowVi
         choices=tuple((word, word) for word in variable.choices),
         term=int(place) if (place := name.rpartition("_i_")[2]).isdigit() and "_i_" in name else 0,
     )
+
+
+def _units(variable: Variable, unit: str, *, is_any: bool) -> tuple[str, ...]:
+    """Give the units a row offers; one of any kind offers those of several."""
+    if variable.choices:
+        return ()
+    if is_any:
+        return tuple(dict.fromkeys((*units_of(variable.kind, unit), *ANY_UNITS)))
+    return units_of(variable.kind, unit)
 
 
 def _kind_shown(relation: Relation, variable: Variable) -> Kind:

@@ -28,6 +28,26 @@ MEASURES = (
     ("mass", "mass"),
     ("time", "time"),
 )
+ANY_UNITS = (
+    "1",
+    "%",
+    "ppm",
+    "bar",
+    "mbar",
+    "Pa",
+    "K",
+    "L",
+    "m³",
+    "L/min",
+    "kg",
+    "g",
+    "mol",
+    "min",
+    "h",
+    "mm",
+    "nm",
+    "MJ",
+)
 UNMEASURED = ("molar_mass", "molar_volume", "molar_flow")
 
 

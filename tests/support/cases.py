@@ -7,6 +7,7 @@ from pathlib import Path
 
 from gaswright import any_kind, number, unit
 from gaswright.find import relation
+from gaswright.law import read_variable
 from gaswright.reading import Reading, read
 from gaswright.records import Kind
 from gaswright.tables import KINDS
@@ -32,11 +33,14 @@ def kind_of(case: Case, name: str) -> Kind:
 def reading_of(case: Case, name: str) -> Reading:
     """Read one variable of the case as it is typed there."""
     text = case.expect if name == case.find else case.given[name]
-    return read(name, text, kind_of(case, name))
+    variable = relation(case.relation).variable(name)
+    return read_variable(variable, text, None, None) if variable.choices else read(name, text, kind_of(case, name))
 
 
 def half_digit(case: Case, name: str) -> float:
     """Give half a unit in the last place typed, in SI."""
+    if relation(case.relation).variable(name).choices:
+        return 0.0
     reading = reading_of(case, name)
     digits = reading.text.split(" ", maxsplit=1)[0]
     factor = unit.parse(reading.unit, name, kind_of(case, name).exponents).factor

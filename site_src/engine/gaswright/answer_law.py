@@ -43,7 +43,7 @@ def answer_relation(request: dict[str, Any]) -> Response:
     side = str(request.get("branch") or text_of(asked.readings.pop(SIDE_ROW, None)))
     relation, unknown = any_kind.settled(asked.relation, asked.readings), asked.unknown
     request = {**request, "rows": asked.readings}
-    unit = quantity.shown_unit(request.get("show"), KINDS[relation.variable(unknown).kind])
+    unit = _shown(asked.relation, relation, unknown, request)
     mark = request.get("decimal") or "."
     taken, rows, warnings = _read_law(relation, unknown, request)
     station, gas = _station_row(request, rows), _gas_row(relation, request, rows)
@@ -60,6 +60,17 @@ def answer_relation(request: dict[str, Any]) -> Response:
     except (NoSolutionError, OutsideRangeError) as error:
         return with_state({**response, "refusal": str(error)}, "refused")
     return _law_figure(response, relation, result, unit, mark)
+
+
+def _shown(asked: Relation, settled: Relation, unknown: str, request: dict[str, Any]) -> str:
+    """Give the unit asked for; where the law takes any kind, one that does not fit the readings is passed over."""
+    kind = KINDS[settled.variable(unknown).kind]
+    try:
+        return quantity.shown_unit(request.get("show"), kind)
+    except ReadingError:
+        if asked.variable(unknown).kind != any_kind.ANY:
+            raise
+        return ""
 
 
 def _unknown(relation: Relation, asked: Any) -> str:

@@ -13,9 +13,9 @@ from gaswright import find as finder
 from gaswright.errors import NoSolutionError, OutsideRangeError
 from gaswright.evaluate import check_validity, evaluate, slopes
 from gaswright.gas import Gas, find
+from gaswright.law import read_variable
 from gaswright.laws.index import FAMILY_OF
 from gaswright.model import Relation
-from gaswright.reading import read
 from gaswright.tables import KINDS
 
 LAWS = {
@@ -46,7 +46,7 @@ def example(relation: Relation) -> dict[str, float]:
     """Give the worked example in SI, without the variable asked for."""
     unknown = first_unknown(relation)
     return {
-        each.name: read(each.name, relation.example.get(each.name, each.default or 0.0), KINDS[each.kind]).value
+        each.name: read_variable(each, relation.example.get(each.name, each.default or 0.0), None, None).value
         for each in relation.variables
         if each.name != unknown
     }
@@ -83,6 +83,7 @@ def states(relation: Relation, count: int, seed: str) -> Iterator[State]:
         spread = 0.0 if turn == 0 else 1.0
         values = {name: _moved(random, value, spread * math.log(spans[name])) for name, value in base.items()}
         values = _shared_out(relation, values, base)
+        values |= {each.name: base[each.name] for each in relation.variables if each.choices}
         gas = find(random.choice(GASES)) if relation.uses_gas else None
         try:
             values[unknown] = evaluate(relation, unknown, values, gas, "state")

@@ -14,7 +14,7 @@ from generator.load import Case
 from tests.engine.laws.states import State, weights
 from tests.support.cases import CASES, half_digit, name_of, reading_of, span
 
-TRACE = 1e-12
+TRACE = 1e-9
 
 
 @pytest.mark.parametrize("case", CASES, ids=name_of)
