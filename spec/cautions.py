@@ -17,6 +17,21 @@ TRAPPED_LIQUID = Caution(
     text="If any liquid can be trapped, this sheet does not apply: a full pipe bursts within a few degrees. A relief "
     "device protects people, not this figure.",
 )
+UNDER_PRESSURE = Caution(
+    key="under_pressure",
+    text="The section is under pressure for the whole test: keep people away and nothing loosened. Find leaks with "
+    "soap or a detector before re-energising. The installation code sets limit and duration.",
+)
+FILLING = Caution(
+    key="filling",
+    text="Filling heats the gas, and oxygen with oil or dirt burns. The rating of the vessel holds at every moment. "
+    "Licensed fillers only.",
+)
+PURGING = Caution(
+    key="purging",
+    text="Inert gas at the vent suffocates without warning. Catalytic LEL sensors are blind in inert gas, and on the "
+    "way from product to air the mixture may cross the flammable range: purge with inert gas in between.",
+)
 DEFER = Caution(
     key="defer",
     text="The local code, the permit, the supplier’s data and the licensed person in charge decide. This figure "

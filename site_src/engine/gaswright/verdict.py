@@ -40,8 +40,9 @@ def _would_decide(result: SheetResult, mark: str) -> str:
     if not result.shares or margin == 0:
         return "The best estimate stands on the limit itself: no instrument decides it."
     worst = result.shares[0]
+    times = show.number(show.rounded_to(result.expanded / margin, 0.1, down=False), 1, mark)
     return (
-        f"An uncertainty {show.significant(result.expanded / margin, 2, mark)} times smaller would decide; "
+        f"An uncertainty {times} times smaller would decide; "
         f"{worst.label} contributes {worst.fraction * 100:.0f} % of it, so better that first."
     )
 

@@ -11,7 +11,7 @@ from gaswright.sheet import SheetResult, run_sheet
 
 GASES = ("nitrogen", "oxygen", "helium", "hydrogen", "methane", "argon", "air", "carbon dioxide")
 STATION = 99640.0
-KEYS = ("cylinder_receipt", "locked_in", "bank_endurance")
+KEYS = ("cylinder_receipt", "settle_after_fill", "purge_plan", "locked_in", "pressure_hold", "bank_endurance")
 QUESTIONS = [(key, row) for key in KEYS for row in finder.sheet(key).finds]
 # Pressure in Pa gauge, temperature in K: full and warm, half and cold, low; carbon dioxide stays a gas up to 30 bar.
 FULL = ((19.8e6, 298.0), (9.4e6, 268.0), (1.7e6, 285.0))
@@ -32,6 +32,15 @@ def readings(key: str, gas: str, level: tuple[float, float]) -> dict[str, float 
         return common | vessels | {"pg": pressure}
     if key == "bank_endurance":
         return common | vessels | {"pg_start": pressure, "pg_end": 0.3 * pressure, "q": 4.1e-4}
+    if key == "settle_after_fill":
+        return common | {"pg_now": pressure, "T_now": temperature + 26.0, "T_settled": temperature}
+    if key == "purge_plan":
+        shares = {"y_0": 0.209, "y_s": 2e-5, "N": 3.0}
+        cycle = {"V": 0.64, "pg_H": 2e5 + 0.01 * pressure, "pg_L": 2e4, "T": temperature}
+        return common | cycle | shares | {"T_ref": 288.15, "p_ref": 101325.0}
+    if key == "pressure_hold":
+        ends = {"pg_1": pressure, "T_1": temperature, "pg_2": 0.95 * pressure, "T_2": temperature - 2.0}
+        return common | ends | {"V": 0.64, "p_atm_2": STATION + 150.0, "t": 14400.0, "T_ref": 288.15}
     return common | {"pg_1": pressure, "T_1": temperature, "T_2": temperature + 31.0}
 
 
