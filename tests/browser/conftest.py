@@ -15,6 +15,7 @@ import pytest
 from playwright.sync_api import Playwright, sync_playwright
 
 from tests.browser.support.launch import BROWSERS, make_firefox_profile, start_tab
+from tests.browser.support.memory import folder_in_memory
 from tests.browser.support.quiet import MARKERS, list_noise
 from tests.browser.support.static_server import serve_folder
 from tests.browser.support.tab import Tab
@@ -55,7 +56,7 @@ def site() -> Path:
 @pytest.fixture(scope="module")
 def file_site(site: Path) -> Iterator[Path]:
     """Copy the site to a folder whose name has a space and a letter outside ASCII."""
-    with TemporaryDirectory() as folder:
+    with TemporaryDirectory(dir=folder_in_memory()) as folder:
         yield Path(shutil.copytree(site, Path(folder) / AWKWARD_FOLDER))
 
 
@@ -76,7 +77,7 @@ def playwright() -> Iterator[Playwright]:
 @pytest.fixture(scope="session")
 def firefox_profile() -> Iterator[Path]:
     """Make the profile that each tab in Firefox gets a copy of: no page has been opened in it."""
-    with TemporaryDirectory() as folder:
+    with TemporaryDirectory(dir=folder_in_memory()) as folder:
         yield make_firefox_profile(Path(folder))
 
 
@@ -84,7 +85,7 @@ def firefox_profile() -> Iterator[Path]:
 def profile() -> Iterator[Path]:
     """Make a folder for a profile, and remove it at once: each is some 50 MB, too much for pytest's kept folders."""
     # The browser's helpers may still be writing when its main process has ended.
-    with TemporaryDirectory(ignore_cleanup_errors=True) as folder:
+    with TemporaryDirectory(dir=folder_in_memory(), ignore_cleanup_errors=True) as folder:
         yield Path(folder) / "profile"
 
 

@@ -6,6 +6,7 @@ One tab types them all, law by law; the row found is compared with the interval 
 import re
 from collections.abc import Iterator
 from pathlib import Path
+from tempfile import TemporaryDirectory
 
 import pytest
 from gaswright.quantity import in_unit
@@ -13,6 +14,7 @@ from playwright.sync_api import Playwright
 
 from generator.load import Case
 from tests.browser.support.launch import start_tab
+from tests.browser.support.memory import folder_in_memory
 from tests.browser.support.tab import Tab
 from tests.support.cases import CASES, kind_of, reading_of, span
 
@@ -26,17 +28,18 @@ RAISED = str.maketrans("⁰¹²³⁴⁵⁶⁷⁸⁹⁻", "0123456789-")
 
 
 @pytest.fixture(scope="module")
-def page(playwright: Playwright, file_site: Path, tmp_path_factory: pytest.TempPathFactory) -> Iterator[Tab]:
+def page(playwright: Playwright, file_site: Path) -> Iterator[Tab]:
     """One tab in Chromium on the copied folder, quiet at the end."""
-    started = start_tab(
-        "chromium", playwright=playwright, profile=tmp_path_factory.mktemp("profile"), base=f"{file_site.as_uri()}/"
-    )
-    try:
-        yield started
-        assert started.foreign_requests() == []
-        assert started.console_errors() == []
-    finally:
-        started.close()
+    with TemporaryDirectory(dir=folder_in_memory(), ignore_cleanup_errors=True) as folder:
+        started = start_tab(
+            "chromium", playwright=playwright, profile=Path(folder) / "profile", base=f"{file_site.as_uri()}/"
+        )
+        try:
+            yield started
+            assert started.foreign_requests() == []
+            assert started.console_errors() == []
+        finally:
+            started.close()
 
 
 def offered(page: Tab, case: Case, name: str, unit: str) -> str:

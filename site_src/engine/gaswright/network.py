@@ -9,7 +9,7 @@ from collections.abc import Callable
 from typing import TYPE_CHECKING, NamedTuple
 
 from gaswright.errors import NoSolutionError, OutsideRangeError
-from gaswright.evaluate import evaluate, residual
+from gaswright.evaluate import check_validity, evaluate, residual
 from gaswright.evaluate import slopes as slopes_of
 from gaswright.find import relation as find_relation
 from gaswright.linear import solve_linear
@@ -46,7 +46,19 @@ def _take(sheet: Sheet, step: Step, values: dict[str, float], gas: "Gas") -> Non
     relation = find_relation(use.relation)
     inputs = {name: values[row] for name, row in use.rows.items() if name != step.unknown and row in values}
     title = sheet.rows[step.row].title
+    check_validity(relation, inputs, title)
     values[step.row] = evaluate(relation, step.unknown, inputs, gas, title)
+    check_validity(relation, {**inputs, step.unknown: values[step.row]}, title)
+
+
+def said_outside(sheet: Sheet, values: dict[str, float]) -> tuple[str, ...]:
+    """Give what the relations of a sheet say outside the bounds they are trusted in, each once."""
+    said: dict[str, None] = {}
+    for use in sheet.uses:
+        own = {name: values[row] for name, row in use.rows.items() if row in values}
+        relation = find_relation(use.relation)
+        said |= dict.fromkeys(check_validity(relation, own, relation.title))
+    return tuple(said)
 
 
 def _residual(sheet: Sheet, block: Block, values: dict[str, float], gas: "Gas") -> float:

@@ -13,7 +13,7 @@ from gaswright.counting import to_reference, turn
 from gaswright.errors import NoSolutionError, OutsideRangeError, ReadingError
 from gaswright.gas import Gas, IdealGas
 from gaswright.model import Find, Sheet, Step
-from gaswright.network import slopes, travel
+from gaswright.network import said_outside, slopes, travel
 from gaswright.notes import NOTES
 from gaswright.reading import Reading
 from gaswright.tables import KINDS
@@ -90,7 +90,7 @@ def work(sheet: Sheet, find: Find, taken: Taken, show: str = "", mark: str = "."
     warnings = _warnings(sheet, taken, given)
     values = travel(sheet, find, given, gas)
     _refuse_outside(sheet, find, values)
-    warnings += _near_critical(sheet, values, gas)
+    warnings += [*_near_critical(sheet, values, gas), *said_outside(sheet, values)]
     combined = _combined(sheet, find, values, taken, couplings)
     ideal, ideal_says = _ideal(sheet, find, given, gas)
     value, row = values[find.row], sheet.rows[find.row]

@@ -5,6 +5,7 @@ Source of commands and key codes: W3C WebDriver BiDi section 7; W3C WebDriver se
 """
 
 import base64
+import time
 from contextlib import ExitStack
 from pathlib import Path
 
@@ -42,6 +43,19 @@ CAN_CLICK = """selector => {
   if (top === null || !(node.contains(top) || top.closest("label")?.control === node)) return "covered";
   return "ready";
 }"""
+
+# Text that comes in between moves what is clicked; the page says whether the click arrived where it was meant.
+WATCH_CLICK = """selector => {
+  const node = document.querySelector(selector);
+  window.clickArrived = false;
+  addEventListener("click", event => {
+    const isMeant = node.contains(event.target) || event.target.closest("label")?.control === node;
+    window.clickArrived = event.isTrusted && isMeant;
+  }, {capture: true, once: true});
+}"""
+CLICK_ARRIVED = "() => window.clickArrived !== false"
+CLICKS = 4
+CLICK_PATIENCE_S = 2.0
 
 KEYS = {
     "Backspace": "\ue003",
@@ -150,7 +164,26 @@ class FirefoxTab(Tab):
             {"type": "pointerDown", "button": 0},
             {"type": "pointerUp", "button": 0},
         ]
-        self._act({"type": "pointer", "id": "mouse", "actions": steps})
+        for _ in range(CLICKS):
+            self.evaluate(WATCH_CLICK, selector)
+            self._act({"type": "pointer", "id": "mouse", "actions": steps})
+            if self._has_arrived():
+                return
+        raise BrowserError(
+            where=f"firefox, click {selector}",
+            found=f"no click in the page after {CLICKS} tries",
+            expected="a click that the page hears of",
+            todo="see whether the browser still answers",
+        )
+
+    def _has_arrived(self) -> bool:
+        """Say whether the page heard of a click; a page that has gone on since does not remember one."""
+        deadline = time.monotonic() + CLICK_PATIENCE_S
+        while not self.evaluate(CLICK_ARRIVED):
+            if time.monotonic() > deadline:
+                return False
+            self._pause(0.05)
+        return True
 
     def press(self, key: str) -> None:
         """Press and release a key or chord on the focused element."""

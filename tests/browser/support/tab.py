@@ -19,7 +19,7 @@ from urllib.parse import urljoin
 from tests.browser.support.errors import BrowserError
 from tests.browser.support.origins import origin_of, select_foreign
 
-DEFAULT_TIMEOUT_S = 15.0
+DEFAULT_TIMEOUT_S = 45.0
 POLL_S = 0.05
 # Long enough for an error or a request already on its way to be reported; what a page starts later is not seen.
 SETTLE_S = 0.1

@@ -6,6 +6,7 @@ from typing import Any
 import pytest
 from CoolProp.CoolProp import PropsSI
 from gaswright.browser import answer
+from gaswright.errors import OutsideRangeError
 from gaswright.sheet import SheetResult, run_sheet
 
 R = 8.31446261815324
@@ -136,3 +137,10 @@ def _all(readings: dict[str, str]) -> dict[str, str]:
     usual = {"gas": "nitrogen", "V": "1 m³", "pg_L": "0 bar gauge ± 0.01 bar", "p_atm": "1.01325 bar", "T": "20 °C"}
     shares = {"y_s": "0 ppm", "y_0": "20.9 %", "T_ref": "15 °C", "p_ref": "101.325 kPa absolute"}
     return usual | shares | readings
+
+
+def test_a_swing_that_does_not_rise_is_refused() -> None:
+    # the ratio of a swing is below one only where it is pressed up above what it is let off to
+    with pytest.raises(OutsideRangeError) as caught:
+        plan(N="3", pg_H="1 bar gauge", pg_L="2 bar gauge")
+    assert str(caught.value).startswith("Share reached: found readings outside the law; expected readings inside it.")

@@ -47,7 +47,7 @@ def _held(gas: Gas, row: Trial, off: Callable[[], float]) -> float:
 def _purged(gas: Gas, row: Trial, off: Callable[[], float]) -> float:
     del gas, off
     ratio = (row["pg_L"] + row["p_atm"]) / (row["pg_H"] + row["p_atm"])
-    return row["y_s"] + (row["y_0"] - row["y_s"]) * ratio ** row["N"]
+    return row["y_s"] + (row["y_0"] - row["y_s"]) * float(ratio ** row["N"])
 
 
 BALANCES = {
