@@ -8,7 +8,8 @@ from sympy import Rational, exp, log
 from spec import dimensions as dim
 from spec import kinds
 from spec.constants import MOLAR_GAS_CONSTANT
-from spec.model import Citation, Constant, Family, Nature, Relation, Sign, Validity, Variable
+from spec.model import Citation, Constant, Family, Relation, Sign, Validity, Variable
+from spec.relations.h_enhancement import ENHANCEMENT_FACTOR
 from spec.sources import (
     CFR_1065,
     CIPM_2007,
@@ -26,7 +27,7 @@ a_1, a_2, a_3, a_4, a_5, a_6 = real("a_1 a_2 a_3 a_4 a_5 a_6")
 b_1, b_2, b_3 = positive("b_1 b_2 b_3")
 g_1, g_2, g_3, g_4, g_5, g_6, g_7 = real("g_1 g_2 g_3 g_4 g_5 g_6 g_7")
 U, x_w, d_w, e_any = nonnegative("U x_w d_w e")
-t, alpha, beta = real("t alpha beta")
+(t,) = real("t")
 
 
 def _number(title: str, value: str, source: Citation) -> Constant:
@@ -41,26 +42,6 @@ def _pascal(title: str, value: str, source: Citation) -> Constant:
     return Constant(title=title, value=Fraction(value), unit="Pa", dimension=dim.PRESSURE, source=source)
 
 
-WATER_FACTORS = real("a_w1 a_w2 a_w3 a_w4 b_w1 b_w2 b_w3 b_w4")
-ICE_FACTORS = real("a_f1 a_f2 a_f3 a_f4 b_f1 b_f2 b_f3 b_f4")
-HARDY = GREENSPAN_1976.at("table 2, refitted to ITS-90 by Hardy 1998, from memory")
-HARDY_VALUES = (
-    ("3.53624e-4", "2.9328363e-5", "2.6168979e-7", "8.5813609e-9"),
-    ("-10.7588", "6.3268134e-2", "-2.5368934e-4", "6.3405286e-7"),
-    ("3.64449e-4", "2.9367585e-5", "4.8874766e-7", "4.3669918e-9"),
-    ("-10.7271", "7.6215115e-2", "-1.7490155e-4", "2.4668279e-6"),
-)
-HARDY_CONSTANTS = tuple(
-    Constant(
-        title="coefficient of the enhancement factor",
-        value=Fraction(value),
-        unit=f"1/K^{power}" if power else "1",
-        dimension=dim.NUMBER / dim.TEMPERATURE**power,
-        source=HARDY,
-    )
-    for row in HARDY_VALUES
-    for power, value in enumerate(row)
-)
 MAGNUS = WMO_8.at("annex 4.B, equations 4.B.1 and 4.B.2")
 SR1 = IAPWS_SR1.at("equation 1")
 R14 = IAPWS_R14.at("equation 6")
@@ -77,17 +58,6 @@ BELOW_TOTAL = Validity(
 )
 
 
-def _cubic(factors: tuple[sympy.Symbol, ...]) -> sympy.Expr:
-    """Give a polynomial of the third degree in the temperature."""
-    first, second, third, fourth = factors
-    return first + second * t + third * t**2 + fourth * t**3
-
-
-with as_printed():
-    HARDY_PARTS = {
-        alpha: sympy.Piecewise((_cubic(WATER_FACTORS[:4]), t >= 0), (_cubic(ICE_FACTORS[:4]), True)),
-        beta: exp(sympy.Piecewise((_cubic(WATER_FACTORS[4:]), t >= 0), (_cubic(ICE_FACTORS[4:]), True))),
-    }
 SUPERCOOLED = Validity(
     holds=sympy.Ge(t, -45, evaluate=False), says="Below −45 °C the Magnus form over water is not stated."
 )
@@ -274,31 +244,6 @@ with as_printed():
         source=CFR_1065.at("1065.645(c)"),
         example={"e": "7.20 hPa", "p": "996.4 hPa absolute"},
         words=("water content", "ppm water", "moisture"),
-    )
-    ENHANCEMENT_FACTOR = Relation(
-        key="enhancement_factor",
-        title="Enhancement factor of moist air",
-        left=f_e,
-        right=exp(alpha * (1 - e_s / p) + beta * (p / e_s - 1)),
-        parts=HARDY_PARTS,
-        where={
-            f_e: Variable(kinds.ENHANCEMENT, "enhancement factor"),
-            e_s: Variable(kinds.VAPOUR_PRESSURE, "saturation vapour pressure of pure water at t"),
-            p: Variable(kinds.ABSOLUTE_PRESSURE, "pressure of the air"),
-            t: Variable(kinds.CELSIUS_TEMPERATURE, "temperature", Sign.ANY),
-            **dict(zip(WATER_FACTORS + ICE_FACTORS, HARDY_CONSTANTS, strict=True)),
-        },
-        assumes=("air", "over water from 0 °C up, over ice below", "to 2 MPa"),
-        valid=(
-            Validity(holds=p <= 2 * 10**6, says="The factor is stated to 2 MPa only.", refuse=True),
-            Validity(holds=t <= 100, says="The factor is stated from −100 °C to 100 °C.", refuse=True),
-            Validity(holds=t >= -100, says="The factor is stated from −100 °C to 100 °C.", refuse=True),
-            Validity(holds=e_s < p, says="At this pressure water boils: nothing is saturated.", refuse=True),
-        ),
-        nature=Nature.FIT,
-        source=GREENSPAN_1976.at("functional equation, with the coefficients of Hardy 1998 for ITS-90, from memory"),
-        example={"e_s": "14.0 hPa", "p": "8.01 bar absolute", "t": "12.0 °C"},
-        words=("dew point", "compressed air", "real gas effect"),
     )
     SATURATED_FRACTION = Relation(
         key="saturated_fraction",
