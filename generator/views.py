@@ -36,6 +36,17 @@ class RowView:
     is_optional: bool = False
     choices: tuple[tuple[str, str], ...] = ()
     term: int = 0
+    groups: tuple["UnitGroup", ...] = ()
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class UnitGroup:
+    """Units of one kind of quantity among those a row offers; ``is_counted`` where gauge and absolute differ."""
+
+    kind: str
+    title: str
+    units: tuple[str, ...]
+    is_counted: bool = False
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -149,12 +160,35 @@ class GasView:
 
 @dataclass(frozen=True, slots=True, kw_only=True)
 class TableView:
-    """A ruled table with a caption."""
+    """A ruled table with a caption; ``is_figures`` where all but the first column are figures."""
 
     caption: str
     head: tuple[str, ...]
     rows: tuple[tuple[str, ...], ...]
     note: str = ""
+    is_figures: bool = False
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class ConvertView:
+    """The converter: its two rows, and its worked example as answered by the engine."""
+
+    reading: RowView
+    station: RowView
+    answer: Mapping[str, Any]
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class TablePageView:
+    """A page of reference tables; ``laws`` are the keys of those its figures come from."""
+
+    key: str
+    title: str
+    lead: str
+    tables: tuple[TableView, ...]
+    words: tuple[str, ...] = ()
+    laws: tuple[str, ...] = ()
+    convert: ConvertView | None = None
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -164,7 +198,7 @@ class SiteView:
     families: tuple[FamilyView, ...]
     sheets: tuple[SheetView, ...]
     gases: tuple[GasView, ...]
-    tables: tuple[TableView, ...]
+    tables: tuple[TablePageView, ...]
     scenario: str
     version: str
     digest: str
