@@ -6,7 +6,6 @@ Takes spec.kinds and the staged engine; gives a ConvertView. generator.table_vie
 from gaswright.answer_convert import READING, STATION, answer_convert, units_of
 from gaswright.tables import KINDS as SHIPPED
 
-from generator.printers import mathml, symbol_latex
 from generator.views import ConvertView, RowView, UnitGroup
 from spec import kinds, scenario
 
@@ -55,7 +54,6 @@ def convert_view() -> ConvertView:
         station=RowView(
             name=STATION,
             title="Station pressure",
-            mathml=mathml(symbol_latex(STATION), display="inline"),
             text=station[0],
             unit=station[1],
             units=kinds.STATION_PRESSURE.units,

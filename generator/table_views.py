@@ -9,7 +9,7 @@ from generator.convert_views import convert_view
 from generator.flow_tables import atmosphere_page, gauge_page, molecules_page
 from generator.gas_tables import conditions_page, saturation_page
 from generator.route import Routed
-from generator.unit_views import asked_table, offered_table, paired_table, unit_tables
+from generator.unit_views import asked_table, offered_table, paired_table, sources_table, unit_tables
 from generator.views import TablePageView, TableView
 
 
@@ -22,7 +22,13 @@ def table_pages(routed: Routed) -> tuple[TablePageView, ...]:
             title="Units",
             lead="A reading in every unit of its kind, and each unit with its exact factor to SI, "
             "the ways crews write it, its code in files and its source.",
-            tables=(*unit_tables(loaded.units), offered_table(loaded.kinds), paired_table(), asked_table()),
+            tables=(
+                *unit_tables(loaded.units),
+                offered_table(loaded.kinds),
+                paired_table(),
+                asked_table(),
+                sources_table(loaded.units),
+            ),
             words=("convert", "converter", "conversion", "UCUM", "spellings"),
             convert=convert_view(),
         ),

@@ -34,18 +34,33 @@ TITLES = {
 ROOTS = "Roots, for constants of meters and distances"
 LONGEST = 18
 DIGITS = 10
+NUMBERED = "The numbers of the sources are told at the end of the page."
 
 
 def unit_tables(units: Iterable[Unit]) -> tuple[TableView, ...]:
     """Give a table for each kind of quantity, in the order in which the spec has them."""
+    units = tuple(units)
+    marks = _marks(units)
     groups: dict[str, list[Unit]] = {}
     for unit in units:
         groups.setdefault(TITLES.get(unit.dimension, ROOTS), []).append(unit)
     titles = sorted(groups, key=lambda title: title == ROOTS)
-    return tuple(_unit_table(title, groups[title]) for title in titles)
+    return tuple(_unit_table(title, groups[title], marks) for title in titles)
 
 
-def _unit_table(title: str, units: list[Unit]) -> TableView:
+def sources_table(units: Iterable[Unit]) -> TableView:
+    """Give the sources of the factors, by the numbers that stand behind them."""
+    rows = tuple((mark, source) for source, mark in _marks(units).items())
+    return TableView(caption="Sources of the factors", head=("Number", "Source"), rows=rows)
+
+
+def _marks(units: Iterable[Unit]) -> dict[str, str]:
+    """Give each source its number, in the order in which the units first cite them."""
+    sources = dict.fromkeys(str(unit.source) for unit in units)
+    return {source: str(number) for number, source in enumerate(sources, 1)}
+
+
+def _unit_table(title: str, units: list[Unit], marks: dict[str, str]) -> TableView:
     has_zero = any(unit.zero for unit in units)
     own = units[0].dimension
     si = f", in {si_text(own)}" if title != ROOTS and own != dim.NUMBER else ""
@@ -57,11 +72,11 @@ def _unit_table(title: str, units: list[Unit]) -> TableView:
             *((exact_text(unit.zero) if unit.zero else "0",) if has_zero else ()),
             ", ".join(unit.spellings),
             unit.ucum,
-            str(unit.source),
+            marks[str(unit.source)],
         )
         for unit in units
     )
-    note = "SI value = (reading + what is added first) × factor." if has_zero else ""
+    note = f"{'SI value = (reading + what is added first) × factor. ' if has_zero else ''}{NUMBERED}"
     return TableView(caption=title, head=head, rows=rows, note=note)
 
 
