@@ -63,12 +63,12 @@ def _read(
     states: dict[str, Response], name: str, rows: dict[str, Any], kind: Kind, decimal: str | None
 ) -> Reading | None:
     """Read one row and keep its state; nothing where it is empty or cannot be taken."""
-    raw = rows.get(name)
+    raw = rows.get(name, "")
     if not text_of(raw):
         states[name] = {"state": "empty", "says": "", "offers": []}
         return None
     try:
-        reading = read("Station pressure" if name == STATION else "Reading", raw, kind, decimal)
+        reading = _read_station(raw, decimal) if name == STATION else read("Reading", raw, kind, decimal)
     except ReadingError as error:
         states[name] = problem_row(error)
         return None
@@ -76,13 +76,20 @@ def _read(
     return reading
 
 
+def _read_station(raw: Any, decimal: str | None) -> Reading:
+    reading = read("Station pressure", raw, KINDS["station_pressure"], decimal)
+    if reading.reference != "absolute":
+        raise ReadingError(reading.name, reading.text, "an absolute pressure", "Read the barometer at the place.")
+    return reading
+
+
 def _converted(
     states: dict[str, Response], reading: Reading, station: Reading | None, kind: Kind, mark: str
 ) -> Response:
-    ways = _ways(reading, station) if kind.reference in COUNTED else {"": reading.value}
+    ways = _ways(reading, station) if kind.reference in COUNTED else {kind.reference: reading.value}
     lines = [[unit, *(_shown(value, kind, unit, mark) for value in ways.values())] for unit in units_of(kind)]
     response = _response(states, "answer")
-    response["head"] = ["Unit", *ways] if kind.reference in COUNTED else ["Unit", "Reading"]
+    response["head"] = ["Unit", *(way or "Reading" for way in ways)]
     response["lines"] = lines
     response["label"] = f"{reading.text} is"
     response["says"] = _says(reading, station, kind)
