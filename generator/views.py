@@ -2,7 +2,7 @@
 
 Takes nothing; gives frozen values. ``generator.make_views`` fills them from the solved spec and the emitted engine,
 ``generator.emit_pages`` and the templates draw them. Every text is plain (escaped by the template), except the
-fields called ``mathml``, which hold a whole ``<math>`` element.
+fields called ``mathml`` and ``figure``, which hold a whole ``<math>`` or ``<svg>`` element.
 """
 
 from collections.abc import Mapping
@@ -100,6 +100,7 @@ class RelationView:
     used_by: tuple[tuple[str, str], ...] = ()
     words: tuple[str, ...] = ()
     cautions: tuple[str, ...] = ()
+    figure: str = ""
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)

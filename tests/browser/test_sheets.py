@@ -47,6 +47,7 @@ PAGES = (
     "sheets.html#locked_in",
     "laws.html",
     "laws/boyle.html",
+    "laws/choked_flow.html",
     "laws/van_der_waals.html",
     "gases.html",
     "gases/nitrogen.html",

@@ -1,7 +1,8 @@
 """Figures of the reference tables beside published ones and an independent library, read from the rows as drawn.
 
 CODATA 2022: molar volumes of the ideal gas. US Standard Atmosphere 1976, table I by geopotential height.
-IAPWS SR1-86 and R14-08: verification values. CoolProp 8.0.0: viscosity of gases. Digits of printed works are from memory.
+IAPWS SR1-86 and R14-08: verification values. CoolProp 8.0.0: viscosity of gases.
+Digits of printed works are from memory.
 """
 
 import math
