@@ -14,7 +14,9 @@ from gaswright.show import tidy
 WIDTH, HEIGHT = 360, 300
 LEFT, RIGHT, TOP, BOTTOM = 68, 334, 40, 232
 MIDDLE = (LEFT + RIGHT) / 2
+WORD = 90  # the width of a word at the size of the page
 STEPS = 4
+FULL = 0.85  # of the height: a curve above this leaves no room for words at the top
 Point = tuple[float, float]
 
 
@@ -70,16 +72,28 @@ def draw(figure: Figure, key: str) -> str:
     SubElement(svg, "desc", {"id": f"{key}-says"}).text = figure.says
     _axes(svg, figure, xs, ys)
     SubElement(svg, "path", {"class": "curve", "d": _path(figure.points, xs, ys)})
+    _lines(svg, figure, xs, ys)
+    _marks(svg, figure, xs, ys)
+    return tostring(svg, encoding="unicode")
+
+
+def _lines(svg: Element, figure: Figure, xs: Scale, ys: Scale) -> None:
+    """Draw the upright lines, their words at the top, or at the foot where the curve fills the top."""
+    is_full = max(y for _, y in figure.points) > FULL * ys.high
     for at, words in figure.lines:
         place = _number(xs.at(at))
         SubElement(svg, "path", {"class": "line", "d": f"M{place} {BOTTOM}V{TOP}"})
-        _beside(svg, (xs.at(at), TOP + 18), words, is_right=xs.at(at) < MIDDLE)
+        _beside(svg, (xs.at(at), BOTTOM - 12 if is_full else TOP + 18), words, is_right=xs.at(at) < MIDDLE)
+
+
+def _marks(svg: Element, figure: Figure, xs: Scale, ys: Scale) -> None:
+    """Draw the points marked, their words where the curve does not go."""
     for (x, y), words in figure.marks:
         SubElement(svg, "circle", {"class": "mark", "cx": _number(xs.at(x)), "cy": _number(ys.at(y)), "r": "6"})
-        is_right = xs.at(x) < MIDDLE
-        is_clear_above = is_right == _falls(figure.points, x)
-        _beside(svg, (xs.at(x), ys.at(y) + (-8 if is_clear_above else 24)), words, is_right=is_right)
-    return tostring(svg, encoding="unicode")
+        falls, is_near_axis = _falls(figure.points, x), xs.at(x) < LEFT + WORD
+        is_right = is_near_axis or (falls and xs.at(x) < MIDDLE)
+        rise = 24 if falls and not is_right else -20 if is_near_axis and not falls else -8
+        _beside(svg, (xs.at(x), ys.at(y) + rise), words, is_right=is_right)
 
 
 def _axes(svg: Element, figure: Figure, xs: Scale, ys: Scale) -> None:
