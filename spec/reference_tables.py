@@ -61,13 +61,13 @@ PAIRS = (
         temperature="20 °C",
         pressure="101.325 kPa",
         used="emission tests of the United States (68 °F)",
-        source=CFR_60.at("section 60.2, standard conditions"),
+        source=CFR_60.at(f"section 60.2, standard conditions, {FROM_MEMORY}"),
     ),
     ReferenceConditions(
         temperature="25 °C",
         pressure="101.325 kPa",
         used="limits of air at the workplace (760 mmHg)",
-        source=OSHA_1000.at("table Z-1, footnote on parts per million"),
+        source=OSHA_1000.at(f"table Z-1, footnote on parts per million, {FROM_MEMORY}"),
     ),
     ReferenceConditions(
         temperature="60 °F",
