@@ -107,6 +107,7 @@ def draw_bodies(view: SiteView) -> Iterator[Body]:
     env.globals["site"] = view
     env.globals["groups"] = group_sheets(view)
     env.globals["formulas"] = {law.key: law.text for family in view.families for law in family.relations}
+    env.globals["titles"] = {law.key: law.title for family in view.families for law in family.relations}
     env.globals["laws"] = frozenset(law.key for family in view.families for law in family.relations)
     yield Body("index.md", "home", "Gaswright", env.get_template("home.html").render(root=""))
     yield Body("sheets.md", "sheets", "Sheets", env.get_template("sheets.html").render(root=""))
@@ -117,6 +118,9 @@ def draw_bodies(view: SiteView) -> Iterator[Body]:
         for law in family.relations:
             html = env.get_template("law.html").render(root="../", law=law)
             yield Body(f"laws/{law.key}.md", "laws", law.title, html)
+    for page in view.tables:
+        html = env.get_template("table_page.html").render(root="../", page=page)
+        yield Body(f"tables/{page.key}.md", "tables", page.title, html)
     for gas in view.gases:
         yield Body(f"gases/{gas.key}.md", "gases", gas.title, env.get_template("gas.html").render(root="../", gas=gas))
 

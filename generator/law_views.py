@@ -20,6 +20,7 @@ from gaswright.tables import KINDS
 
 from generator.check import constants_of, variables_of
 from generator.describe import FormText, RelationText
+from generator.figures import figure_of
 from generator.load import Case
 from generator.printers import mathml, symbol_latex, symbol_text
 from generator.row_views import ANY_UNITS, REFERENCES, Typed, may_be_negative, settled, split, units_of
@@ -78,7 +79,15 @@ def law_view(
         nature=relation.nature.value,
         used_by=used_by,
         words=relation.words,
+        figure=figure_of(
+            relation.key, find, {row.name: _whole(row) for row in rows if row.text and row.name != STATION}
+        ),
     )
+
+
+def _whole(row: RowView) -> str:
+    """Give the reading that stands in a row at the start as one text."""
+    return " ".join(part for part in (row.text, row.unit, row.reference) if part not in ("", "1"))
 
 
 def shown(relation: Relation) -> Relation:

@@ -30,9 +30,9 @@ def list_entries(view: SiteView) -> Iterator[Entry]:
     for gas in view.gases:
         words = " ".join((gas.formula, *gas.words, *(value for _, value in gas.identity)))
         yield {"href": f"gases/{gas.key}.html", "title": gas.title, "part": "gas", "words": words}
-    for number, table in enumerate(view.tables, start=1):
-        href = f"tables.html#table-{number}"
-        yield {"href": href, "title": table.caption, "part": "table", "words": " ".join((*table.head, table.note))}
+    for page in view.tables:
+        words = " ".join((page.lead, *page.words, *(table.caption for table in page.tables)))
+        yield {"href": f"tables/{page.key}.html", "title": page.title, "part": "table", "words": words}
     yield {"href": "sheets.html#site", "title": "Site conditions", "part": "sheet", "words": "barometer weather"}
     yield {
         "href": "sheets.html#instruments",

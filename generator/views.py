@@ -2,7 +2,7 @@
 
 Takes nothing; gives frozen values. ``generator.make_views`` fills them from the solved spec and the emitted engine,
 ``generator.emit_pages`` and the templates draw them. Every text is plain (escaped by the template), except the
-fields called ``mathml``, which hold a whole ``<math>`` element.
+fields called ``mathml`` and ``figure``, which hold a whole ``<math>`` or ``<svg>`` element.
 """
 
 from collections.abc import Mapping
@@ -36,6 +36,17 @@ class RowView:
     is_optional: bool = False
     choices: tuple[tuple[str, str], ...] = ()
     term: int = 0
+    groups: tuple["UnitGroup", ...] = ()
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class UnitGroup:
+    """Units of one kind of quantity among those a row offers; ``is_counted`` where gauge and absolute differ."""
+
+    kind: str
+    title: str
+    units: tuple[str, ...]
+    is_counted: bool = False
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -89,6 +100,7 @@ class RelationView:
     used_by: tuple[tuple[str, str], ...] = ()
     words: tuple[str, ...] = ()
     cautions: tuple[str, ...] = ()
+    figure: str = ""
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -149,12 +161,35 @@ class GasView:
 
 @dataclass(frozen=True, slots=True, kw_only=True)
 class TableView:
-    """A ruled table with a caption."""
+    """A ruled table with a caption; ``is_figures`` where all but the first column are figures."""
 
     caption: str
     head: tuple[str, ...]
     rows: tuple[tuple[str, ...], ...]
     note: str = ""
+    is_figures: bool = False
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class ConvertView:
+    """The converter: its two rows, and its worked example as answered by the engine."""
+
+    reading: RowView
+    station: RowView
+    answer: Mapping[str, Any]
+
+
+@dataclass(frozen=True, slots=True, kw_only=True)
+class TablePageView:
+    """A page of reference tables; ``laws`` are the keys of those its figures come from."""
+
+    key: str
+    title: str
+    lead: str
+    tables: tuple[TableView, ...]
+    words: tuple[str, ...] = ()
+    laws: tuple[str, ...] = ()
+    convert: ConvertView | None = None
 
 
 @dataclass(frozen=True, slots=True, kw_only=True)
@@ -164,7 +199,7 @@ class SiteView:
     families: tuple[FamilyView, ...]
     sheets: tuple[SheetView, ...]
     gases: tuple[GasView, ...]
-    tables: tuple[TableView, ...]
+    tables: tuple[TablePageView, ...]
     scenario: str
     version: str
     digest: str

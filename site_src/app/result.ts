@@ -1,5 +1,5 @@
 // Takes the section of a calculator and an answer; draws the result box, the working and the plot.
-// calculator.ts comes next.
+// calculator.ts and convert.ts come next.
 
 import { all, draw, fill, find, make, maybe, show } from "./dom";
 import { drawPlot } from "./plot";
@@ -49,7 +49,7 @@ function drawVerdict(place: HTMLElement, verdict: Answer["verdict"]): void {
   show(place, Boolean(verdict));
 }
 
-function drawWarnings(place: HTMLElement, texts: readonly string[]): void {
+export function drawWarnings(place: HTMLElement, texts: readonly string[]): void {
   place.replaceChildren(...texts.map((text) => make("li", text)));
   show(place, texts.length > 0);
 }

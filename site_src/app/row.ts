@@ -1,5 +1,5 @@
 // Takes the element of one row; gives what stands in it as a reading, and draws what the engine says about it.
-// calculator.ts comes next.
+// calculator.ts and convert.ts come next.
 
 import { all, fill, find, make, maybe, show, turnSign } from "./dom";
 import { drawOffers } from "./offers";

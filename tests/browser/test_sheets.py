@@ -35,7 +35,7 @@ READINGS = {
 }
 UNITS = {"p_atm": "mbar", "p_ref": "kPa", "q": "L/min", "T_gas": "°C", "T_ref": "°C"}
 # The loader begins 300 ms after the page at the latest, and takes each script away once it has been read.
-PAYLOADS_ARE_IN = """() => !document.querySelector("#law, #sheet-day")
+PAYLOADS_ARE_IN = """() => !document.querySelector("#law, #convert, #sheet-day")
   || performance.now() > 900 && !document.querySelector('head script[src*="/engine/"]')"""
 PAGES = (
     "index.html",
@@ -47,10 +47,15 @@ PAGES = (
     "sheets.html#locked_in",
     "laws.html",
     "laws/boyle.html",
+    "laws/choked_flow.html",
     "laws/van_der_waals.html",
     "gases.html",
     "gases/nitrogen.html",
     "tables.html",
+    "tables/units.html",
+    "tables/reference_conditions.html",
+    "tables/saturation.html",
+    "tables/molecules.html",
     "about.html",
     "hosting.html",
 )

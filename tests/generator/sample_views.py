@@ -7,6 +7,7 @@ from typing import Any
 
 from generator.views import (
     CheckView,
+    ConvertView,
     FamilyView,
     FindView,
     FormView,
@@ -15,7 +16,9 @@ from generator.views import (
     RowView,
     SheetView,
     SiteView,
+    TablePageView,
     TableView,
+    UnitGroup,
 )
 
 MATH = '<math display="block"><msub><mi>p</mi><mn>1</mn></msub><mo>=</mo><mi>F</mi></math>'
@@ -233,6 +236,36 @@ def make_gas() -> GasView:
     )
 
 
+def make_table_page() -> TablePageView:
+    """A page of tables with a converter."""
+    reading = RowView(
+        name="reading",
+        title="Reading",
+        text="12.4",
+        unit="bar",
+        reference="gauge",
+        references=COUNTS,
+        groups=(UnitGroup(kind="absolute_pressure", title="Pressure", units=PRESSURES, is_counted=True),),
+    )
+    station = RowView(name="p_station", title="Station pressure", units=("hPa",), text="996.4", is_optional=True)
+    answer = {
+        "label": "12.4 bar gauge is",
+        "head": ["Unit", "gauge"],
+        "lines": [["bar", "12.4"]],
+        "says": "",
+        "warnings": ["A <warning>."],
+    }
+    return TablePageView(
+        key="units",
+        title="Units & factors",
+        lead="Every unit <once>.",
+        tables=make_gas().tables * 3,
+        words=("convert",),
+        laws=("boyle", "not_in_this_copy"),
+        convert=ConvertView(reading=reading, station=station, answer=answer),
+    )
+
+
 def make_site() -> SiteView:
     """A whole small site."""
     laws = (make_law("force_pressure", "Pressure: force & area"), make_law("boyle", "Boyle’s law"))
@@ -241,7 +274,7 @@ def make_site() -> SiteView:
         families=(family,),
         sheets=(make_sheet(),),
         gases=(make_gas(),),
-        tables=(make_gas().tables[0],),
+        tables=(make_table_page(),),
         scenario="Hollin Tarn works is invented.",
         version="0.1.0",
         digest="0123456789abcdef0123456789abcdef",

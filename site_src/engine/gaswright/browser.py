@@ -8,6 +8,7 @@ import json
 from typing import Any
 
 from gaswright import request as requests
+from gaswright.answer_convert import answer_convert
 from gaswright.answer_law import answer_relation
 from gaswright.answer_sheet import answer_sheet
 from gaswright.errors import GaswrightError, ReadingError
@@ -43,11 +44,13 @@ def _answer(request: dict[str, Any]) -> Response:
         return answer_relation(request) if do == "relation" else answer_sheet(request)
     if do == "reading":
         return _answer_reading(request)
+    if do == "convert":
+        return answer_convert(request)
     if do == "about":
         return {"version": VERSION, "digest": DIGEST}
     if do == "units":
         return {"units": list(_kind(request).units)}
-    raise ReadingError("request", repr(do)[:60], "relation, sheet, reading, units or about", RELOAD)
+    raise ReadingError("request", repr(do)[:60], "relation, sheet, reading, convert, units or about", RELOAD)
 
 
 def _answer_reading(request: dict[str, Any]) -> Response:

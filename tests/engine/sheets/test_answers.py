@@ -163,7 +163,7 @@ REQUESTS = [
     ('{"id": NaN}', "request: found text that is not JSON; expected a JSON object. Load the page again."),
     ("[" * 100_000, "request: found text that is not JSON; expected a JSON object. Load the page again."),
     (" " * 200_001, "request: found 200001 characters; expected at most 200000. Send less at once."),
-    ("{}", "request: found None; expected relation, sheet, reading, units or about. Load the page again."),
+    ("{}", "request: found None; expected relation, sheet, reading, convert, units or about. Load the page again."),
     ('{"do": "sheet"}', "request: found no key; expected the key of a law or sheet. Load the page again."),
     (
         '{"do": "sheet", "key": "bank"}',

@@ -215,7 +215,9 @@ def test_any_json_at_all(examples: int) -> None:
             "branch",
         ]
     )
-    values = HOSTILE | st.sampled_from(["sheet", "relation", "reading", "units", "boyle", "locked_in", "V_2", "pg_2"])
+    values = HOSTILE | st.sampled_from(
+        ["sheet", "relation", "reading", "convert", "units", "volume", "boyle", "locked_in", "V_2", "pg_2"]
+    )
     seen = _run(HOSTILE | st.dictionaries(names, values, max_size=8), 2 * examples)
     assert all(response.get("refusal") or response.get("state") != "refused" for response in seen)
 
