@@ -7,7 +7,7 @@ with the page; the worked example of the page is drawn with it, too.
 from typing import Any
 
 from gaswright import quantity, show
-from gaswright.counting import to_reference
+from gaswright.counting import read_station, to_reference
 from gaswright.errors import ReadingError
 from gaswright.reading import COUNTED, Reading, read
 from gaswright.records import Kind
@@ -68,18 +68,13 @@ def _read(
         states[name] = {"state": "empty", "says": "", "offers": []}
         return None
     try:
-        reading = _read_station(raw, decimal) if name == STATION else read("Reading", raw, kind, decimal)
+        reading = (
+            read_station("Station pressure", raw, decimal) if name == STATION else read("Reading", raw, kind, decimal)
+        )
     except ReadingError as error:
         states[name] = problem_row(error)
         return None
     states[name] = ok_row(reading, kind, decimal or ".")
-    return reading
-
-
-def _read_station(raw: Any, decimal: str | None) -> Reading:
-    reading = read("Station pressure", raw, KINDS["station_pressure"], decimal)
-    if reading.reference != "absolute":
-        raise ReadingError(reading.name, reading.text, "an absolute pressure", "Read the barometer at the place.")
     return reading
 
 

@@ -8,12 +8,13 @@ from typing import Any
 
 from gaswright import any_kind, conditions, quantity, show, terms
 from gaswright import find as finder
+from gaswright.counting import read_station
 from gaswright.errors import NoSolutionError, OutsideRangeError, ReadingError
 from gaswright.gas import Gas
 from gaswright.gas import find as find_gas
 from gaswright.law import Around, Result, finish, kinds_of, like_unit, read_variable
 from gaswright.model import Relation
-from gaswright.reading import Reading, read
+from gaswright.reading import Reading
 from gaswright.respond import (
     NO_U,
     ROW_DIGITS,
@@ -153,7 +154,7 @@ def _site_station(request: dict[str, Any]) -> Reading | None:
     raw = (request.get("rows") or {}).get(STATION_ROW) or (request.get("site") or {}).get("station_pressure")
     if not text_of(raw):
         return None
-    return read("Station pressure", "" if raw is None else raw, KINDS["station_pressure"], request.get("decimal"))
+    return read_station("Station pressure", "" if raw is None else raw, request.get("decimal"))
 
 
 def _law_figure(response: Response, relation: Relation, result: Result, unit: str, mark: str) -> Response:

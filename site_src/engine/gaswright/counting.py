@@ -5,7 +5,8 @@ gaswright.sheet come next.
 """
 
 from gaswright.errors import ReadingError
-from gaswright.reading import Reading
+from gaswright.reading import Raw, Reading, read
+from gaswright.tables import KINDS
 
 
 def to_reference(reading: Reading, wanted: str, station: Reading | None) -> tuple[float, float]:
@@ -14,6 +15,8 @@ def to_reference(reading: Reading, wanted: str, station: Reading | None) -> tupl
     Raises ReadingError: no station pressure where one is needed, or less than no pressure at all.
     """
     have = reading.reference
+    if reading is station:
+        _refuse_counted(reading)
     if have == wanted or wanted in ("", "difference"):
         value, slope = reading.value, 0.0
     else:
@@ -75,3 +78,15 @@ def questioned(reading: Reading) -> tuple[str, ...]:
         todo = "A gauge of smaller span reads it better."
         return (f"{reading.name}: {reading.text} is below a tenth of the span. {todo}",)
     return ()
+
+
+def read_station(where: str, raw: Raw, decimal: str | None) -> Reading:
+    """Give the station pressure as read; ReadingError where it is counted from the air around, as gauges count."""
+    reading = read(where, raw, KINDS["station_pressure"], decimal)
+    _refuse_counted(reading)
+    return reading
+
+
+def _refuse_counted(station: Reading) -> None:
+    if station.reference != "absolute":
+        raise ReadingError(station.name, station.text, "an absolute pressure", "Read the barometer at the place.")

@@ -8,7 +8,7 @@ from collections.abc import Mapping, Sequence
 from typing import NamedTuple
 
 from gaswright import any_kind, conditions, find, quantity, terms, working
-from gaswright.counting import questioned, to_reference, turn
+from gaswright.counting import questioned, read_station, to_reference, turn
 from gaswright.errors import ReadingError
 from gaswright.evaluate import check_validity, evaluate, no_slope
 from gaswright.evaluate import slopes as slopes_of
@@ -65,9 +65,7 @@ def solve(  # noqa: PLR0913 - what a caller may say, all by name but three
     relation, unknown, given = terms.spread(find.relation(key), unknown, readings)
     relation = any_kind.settled(relation, given)
     _check_names(relation, unknown, given)
-    station = (
-        None if station_pressure is None else read(NO_STATION, station_pressure, KINDS["station_pressure"], decimal)
-    )
+    station = None if station_pressure is None else read_station(NO_STATION, station_pressure, decimal)
     gas_name = gas or text_of(given.get("gas"))
     model = find_gas(gas_name) if relation.uses_gas and gas_name else None
     taken, warnings = _read_all(relation, unknown, given, decimal, instruments)

@@ -4,6 +4,7 @@ import math
 from typing import Any
 
 import pytest
+from gaswright.errors import ReadingError
 from gaswright.law import solve
 from gaswright.sheet import run_sheet
 from uncertainties import ufloat
@@ -25,6 +26,18 @@ def _absolute(text: str, way: float, station: Any) -> Any:
     if way == 0:
         return reading
     return station + reading if way > 0 else station - reading
+
+
+def test_a_station_pressure_counted_from_itself_is_refused() -> None:
+    readings: dict[str, Any] = {"p_1": "1 bar gauge", "V_1": "1 L", "p_2": "2 bar gauge"}
+    with pytest.raises(ReadingError) as caught:
+        solve("boyle", "V_2", readings, station_pressure="30 kPa gauge")
+    assert str(caught.value) == (
+        "station pressure: found 30 kPa gauge; expected an absolute pressure. Read the barometer at the place."
+    )
+    with pytest.raises(ReadingError) as caught:
+        solve("gauge_pressure", "p_abs", {"p_gauge": "1 bar gauge", "p_atm": "30 kPa gauge"})
+    assert caught.value.expected == "an absolute pressure"
 
 
 @pytest.mark.parametrize(
