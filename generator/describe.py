@@ -19,7 +19,7 @@ from generator.check import Checked, variables_of
 from generator.emit_engine import form_text, relation_python
 from generator.errors import SpecError
 from generator.parts import slope, used_parts
-from generator.printers import TextWriter, equation_mathml, latex, mathml, symbol_latex, symbol_text
+from generator.printers import TextWriter, equation_mathml, latex, mathml, name_choices, symbol_latex, symbol_text
 from generator.solve import Form, SolvedRelation, Way, order_of, solve_relation
 from generator.terms import slope_by_term
 from spec.model import Relation
@@ -104,14 +104,22 @@ def describe_relation(relation: Relation, family: str) -> RelationText:
     return RelationText(
         key=relation.key,
         python=relation_python(solved, family),
-        text=f"{text(relation.left)} = {text(relation.right)}",
+        text=_equation(relation),
         mathml=equation_mathml(relation.left, relation.right),
         forms=tuple(_form(solved, form) for form in solved.forms.values()),
         parts=tuple(
-            (f"{text(symbol)} = {text(value)}", equation_mathml(symbol, value))
+            (
+                name_choices(relation, f"{text(symbol)} = {text(value)}"),
+                mathml(name_choices(relation, f"{latex(symbol)} = {latex(value)}")),
+            )
             for symbol, value in relation.parts.items()
         ),
     )
+
+
+def _equation(relation: Relation) -> str:
+    text = TextWriter().write
+    return f"{text(relation.left)} = {text(relation.right)}"
 
 
 def _form(solved: SolvedRelation, form: Form) -> FormText:
@@ -122,7 +130,7 @@ def _form(solved: SolvedRelation, form: Form) -> FormText:
         unknown=name,
         symbol=symbol_text(name),
         way=form.way.value,
-        text=f"{symbol_text(name)} = {form_text(relation, form)}" if is_closed else form_text(relation, form),
+        text=f"{symbol_text(name)} = {form_text(relation, form)}" if is_closed else f"from {_equation(relation)}",
         mathml=mathml(f"{symbol_latex(name)} = {latex(form.expression)}") if is_closed else "",
         proof=form.proof,
         sensitivities=_sensitivities(relation, form) if is_closed else (),

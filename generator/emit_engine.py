@@ -13,7 +13,7 @@ import sympy
 from generator.check import constants_of, variables_of
 from generator.parameters import OWN, Parameter, form_parameters, terms_name, whole_parameters
 from generator.parts import put_in, used_parts
-from generator.printers import PythonWriter, TextWriter, symbol_text
+from generator.printers import PythonWriter, TextWriter, name_choices, symbol_text
 from generator.solve import Form, SolvedRelation, Way, evaluated
 from generator.terms import is_per_term, lists_of, own_symbol
 from spec.model import Constant, Family, Relation, Sign, Validity, Variable
@@ -363,4 +363,5 @@ def form_text(relation: Relation, form: Form) -> str:
     if form.way is Way.CLOSED and form.expression is not None:
         return text(put_in(form.expression, relation.parts))
     parts = ", ".join(f"{text(symbol)} = {text(value)}" for symbol, value in relation.parts.items())
-    return f"from {text(relation.left)} = {text(relation.right)}{f', with {parts}' if parts else ''}"
+    whole = f"from {text(relation.left)} = {text(relation.right)}{f', with {parts}' if parts else ''}"
+    return name_choices(relation, whole)

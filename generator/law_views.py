@@ -105,7 +105,7 @@ def shown(relation: Relation) -> Relation:
 
 def may_be_found(relation: Relation, name: str) -> bool:
     """Tell whether a row may be asked for."""
-    names = {symbol.name for symbol in variables_of(relation) if symbol not in relation.turned}
+    names = {symbol.name for symbol in variables_of(relation) if symbol not in (*relation.turned, *relation.data)}
     return re.sub(r"(_i)_\d+$", r"\1", name) in names
 
 

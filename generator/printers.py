@@ -14,6 +14,7 @@ from latex2mathml.converter import convert
 
 from generator.arrange import flatten
 from generator.errors import SpecError
+from spec.model import Relation
 from spec.symbols import GAS_FUNCTIONS, Others, Total, is_list
 
 SUM, PRODUCT, SIGN, POWER, ATOM = range(5)
@@ -279,6 +280,16 @@ class TextWriter(LineWriter):
     def write(self, expression: sympy.Expr) -> str:
         """Give the expression as one line with a true minus sign."""
         return super().write(with_decimals(expression)).replace(" - ", " − ").replace("-", "−")
+
+
+def name_choices(relation: Relation, text: str) -> str:
+    """Write the words of a variable with choices in place of the bounds between their numbers."""
+    for symbol, meaning in relation.where.items():
+        for place, word in enumerate(getattr(meaning, "choices", ())):
+            half = 2 * place + 1
+            text = text.replace(f"{symbol_text(symbol.name)} < {half}/2", word)
+            text = text.replace(rf"{symbol_latex(symbol.name)} < \frac{{{half}}}{{2}}", rf"\text{{{word}}}")
+    return text
 
 
 def with_decimals(expression: sympy.Expr) -> sympy.Expr:
